@@ -1,0 +1,35 @@
+package bubblechain.report;
+
+import java.util.Collection;
+import java.util.HashSet;
+import java.util.Set;
+import java.util.regex.Pattern;
+
+/** The rule for names in machine-readable output: a letter, then letters, digits and underscores, each used once. */
+final class Keys {
+    private static final Pattern KEY = Pattern.compile("[A-Za-z][A-Za-z0-9_]*");
+
+    private Keys() {}
+
+    static void check(String key) {
+        if (!KEY.matcher(key).matches()) {
+            throw new IllegalArgumentException(
+                    "key '" + key + "' must be a letter followed by letters, digits and underscores");
+        }
+    }
+
+    static void checkOrEmpty(String key) {
+        if (!key.isEmpty()) {
+            check(key);
+        }
+    }
+
+    static void checkUnique(Collection<String> keys, String place) {
+        Set<String> seen = new HashSet<>();
+        for (String key : keys) {
+            if (!seen.add(key)) {
+                throw new IllegalArgumentException("key '" + key + "' appears twice in " + place);
+            }
+        }
+    }
+}
