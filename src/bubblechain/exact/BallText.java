@@ -1,0 +1,162 @@
+package bubblechain.exact;
+
+import java.math.BigDecimal;
+import java.math.BigInteger;
+import java.util.Optional;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+
+/** Balls from text and to text; the formats are described at {@link Ball#parse} and {@link Ball#toDecimal}. */
+final class BallText {
+    private static final Pattern LAST_DIGITS =
+            Pattern.compile("([+-]?\\d+(?:\\.(\\d*))?)\\((\\d+)\\)(?:[eE]([+-]?\\d{1,5}))?");
+    private static final Pattern PLUS_MINUS = Pattern.compile("\\s*(?:\\+-|\\+/-|\u00b1)\\s*");
+    private static final int MOST_DIGITS = 20;
+    private static final int FEW_DIGITS = 4;
+    private static final int SMALLEST_PLAIN_EXPONENT = -6;
+    private static final double LOG10_OF_2 = Math.log10(2);
+
+    private BallText() {}
+
+    /** digits * 10^(exponent - number of digits + 1), digits signed and of the length asked for. */
+    private record Decimal(BigInteger digits, long exponent) {}
+
+    static Ball parse(String text, int bits) {
+        Matcher m = LAST_DIGITS.matcher(text.strip());
+        if (m.matches()) {
+            int places = m.group(2) == null ? 0 : m.group(2).length();
+            int power = m.group(4) == null ? 0 : Integer.parseInt(m.group(4));
+            Rational scale = Rational.of(10).power(power);
+            Rational unit = Rational.of(10).power(power - places);
+            return Ball.of(Rational.parse(m.group(1)).multiply(scale), Rational.parse(m.group(3)).multiply(unit), bits);
+        }
+        String[] parts = PLUS_MINUS.split(text.strip(), -1);
+        if (parts.length == 1) {
+            return Ball.of(Rational.parse(text), bits);
+        }
+        if (parts.length > 2 || parts[0].isEmpty()) {
+            throw new DomainException("'" + text + "' is not a number with an uncertainty such as 1.23+-0.05");
+        }
+        Rational radius = Rational.parse(parts[1]);
+        if (radius.signum() < 0) {
+            throw new DomainException("'" + text + "' has a negative uncertainty; give its size after +-");
+        }
+        return Ball.of(Rational.parse(parts[0]), radius, bits);
+    }
+
+    static Optional<String> toDecimal(Ball ball, int digits) {
+        if (digits < 1) {
+            throw new DomainException("asked for " + digits + " significant digits; ask for at least 1");
+        }
+        if (ball.isZero()) {
+            return Optional.of("0");
+        }
+        if (ball.containsZero()) {
+            return Optional.empty();
+        }
+        // rounding is monotonic: if the ends agree, so does every point between them
+        Decimal low = nearest(ball.low(), digits);
+        Decimal high = ball.isExact() ? low : nearest(ball.high(), digits);
+        return low.equals(high) ? Optional.of(format(low, digits)) : Optional.empty();
+    }
+
+    /** Rounds a non-zero number to a number of significant digits, ties to even. */
+    private static Decimal nearest(Dyadic value, int digits) {
+        Dyadic size = value.abs();
+        BigInteger top = BigInteger.TEN.pow(digits);
+        BigInteger bottom = BigInteger.TEN.pow(digits - 1);
+        long exponent = (long) Math.floor((size.top() - 0.5) * LOG10_OF_2); // a guess, put right below
+        while (true) {
+            BigInteger divisor = divisor(size, exponent - digits + 1);
+            BigInteger[] parts = dividend(size, exponent - digits + 1).divideAndRemainder(divisor);
+            BigInteger whole = parts[0];
+            if (whole.compareTo(top) >= 0) {
+                exponent++;
+            } else if (whole.compareTo(bottom) < 0) {
+                exponent--;
+            } else {
+                int half = parts[1].shiftLeft(1).compareTo(divisor);
+                boolean up = half > 0 || half == 0 && whole.testBit(0);
+                BigInteger rounded = up ? whole.add(BigInteger.ONE) : whole;
+                boolean carry = rounded.equals(top);
+                BigInteger result = carry ? bottom : rounded;
+                return new Decimal(value.signum() < 0 ? result.negate() : result, carry ? exponent + 1 : exponent);
+            }
+        }
+    }
+
+    /** Numerator of value / 10^place. */
+    private static BigInteger dividend(Dyadic value, long place) {
+        BigInteger shifted = value.exponent() > 0
+                ? value.mantissa().shiftLeft(Math.toIntExact(value.exponent()))
+                : value.mantissa();
+        return place < 0 ? shifted.multiply(BigInteger.TEN.pow(Math.toIntExact(-place))) : shifted;
+    }
+
+    /** Denominator of value / 10^place. */
+    private static BigInteger divisor(Dyadic value, long place) {
+        BigInteger power = place > 0 ? BigInteger.TEN.pow(Math.toIntExact(place)) : BigInteger.ONE;
+        return value.exponent() < 0 ? power.shiftLeft(Math.toIntExact(-value.exponent())) : power;
+    }
+
+    private static String format(Decimal decimal, int digits) {
+        String sign = decimal.digits.signum() < 0 ? "-" : "";
+        String text = decimal.digits.abs().toString();
+        if (decimal.exponent < SMALLEST_PLAIN_EXPONENT || decimal.exponent >= digits) {
+            String fraction = digits == 1 ? "" : "." + text.substring(1);
+            return sign + text.charAt(0) + fraction + "e" + (decimal.exponent < 0 ? "" : "+") + decimal.exponent;
+        }
+        int whole = (int) decimal.exponent + 1;
+        if (whole <= 0) {
+            return sign + "0." + "0".repeat(-whole) + text;
+        }
+        return whole == digits ? sign + text : sign + text.substring(0, whole) + "." + text.substring(whole);
+    }
+
+    static int certainDigits(Ball ball, int max) {
+        if (ball.isExact()) {
+            return max;
+        }
+        // two numbers closer than 10^-d relative can agree in at most d + 1 digits or so
+        double guess = Math.max(0, ball.accuracyBits()) * LOG10_OF_2 + 2;
+        for (int digits = (int) Math.min(max, guess); digits >= 1; digits--) {
+            if (toDecimal(ball, digits).isPresent()) {
+                return digits;
+            }
+        }
+        return 0;
+    }
+
+    static String toString(Ball ball) {
+        if (ball.isExact()) {
+            return exactToString(ball);
+        }
+        int certain = certainDigits(ball, MOST_DIGITS);
+        return certain >= FEW_DIGITS ? toDecimal(ball, certain).orElseThrow() : withRadius(ball);
+    }
+
+    private static String exactToString(Ball ball) {
+        String text = toDecimal(ball, MOST_DIGITS).orElseThrow();
+        if (!text.contains(".") || text.contains("e")) {
+            return text;
+        }
+        BigDecimal stripped = new BigDecimal(text).stripTrailingZeros();
+        return stripped.scale() < 0 ? stripped.setScale(0).toPlainString() : stripped.toPlainString();
+    }
+
+    /** Two digits of the radius, rounded up after adding what the midpoint lost in rounding: encloses the ball. */
+    private static String withRadius(Ball ball) {
+        Rational radius = ball.radius().toRational();
+        long place = nearest(ball.radius().toDyadic(), 2).exponent - 1;
+        Rational unit = Rational.of(10).power(Math.toIntExact(place));
+        BigInteger middle = ball.midpoint().divide(unit).add(Rational.HALF).floor();
+        Rational lost = ball.midpoint().subtract(unit.multiply(Rational.of(middle))).abs();
+        BigInteger error = radius.add(lost).divide(unit).ceiling();
+        return decimal(middle, place) + "+-" + decimal(error, place);
+    }
+
+    private static String decimal(BigInteger units, long place) {
+        BigDecimal value = new BigDecimal(units, Math.toIntExact(-place));
+        return Math.abs(place) <= MOST_DIGITS ? value.toPlainString() : value.toString().replace('E', 'e');
+    }
+}
