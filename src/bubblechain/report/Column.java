@@ -1,16 +1,28 @@
 package bubblechain.report;
 
+import java.util.List;
+
 /**
  * Heading of a column of a {@link Table}.
  *
  * @param key     name in JSON objects and in the header row of CSV
  * @param heading what a reader sees above the column
- * @param unit    unit of every number in the column ("GeV"), or empty for a pure number
+ * @param unit    unit of every number in the column ("GeV"), or empty for a pure number; in JSON the entry
+ *                {@link #unitKey} of each row
  * @param place   where the column is shown
  */
 public record Column(String key, String heading, String unit, Place place) {
     public Column {
         Keys.check(key);
+    }
+
+    /** Name of the unit in JSON. */
+    public String unitKey() {
+        return Keys.unitKey(key);
+    }
+
+    List<String> keys() {
+        return Keys.taken(key, unit);
     }
 
     /** A column of pure numbers or texts, shown everywhere. */

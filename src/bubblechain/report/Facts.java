@@ -14,7 +14,7 @@ public record Facts(String key, String title, List<Fact> facts) implements Block
     public Facts {
         Keys.checkOrEmpty(key);
         facts = List.copyOf(facts);
-        Keys.checkUnique(facts.stream().map(Fact::key).toList(), "the facts '" + title + "'");
+        Keys.checkUnique(facts.stream().flatMap(fact -> fact.keys().stream()).toList(), "the facts '" + title + "'");
     }
 
     /** An empty list to be filled by {@link #with}. */

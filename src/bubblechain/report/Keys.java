@@ -2,6 +2,7 @@ package bubblechain.report;
 
 import java.util.Collection;
 import java.util.HashSet;
+import java.util.List;
 import java.util.Set;
 import java.util.regex.Pattern;
 
@@ -22,6 +23,15 @@ final class Keys {
         if (!key.isEmpty()) {
             check(key);
         }
+    }
+
+    /** The names a value takes in a JSON object: its key and, if it has a unit, the key of the unit. */
+    static List<String> taken(String key, String unit) {
+        return unit.isEmpty() ? List.of(key) : List.of(key, unitKey(key));
+    }
+
+    static String unitKey(String key) {
+        return key + "_unit";
     }
 
     static void checkUnique(Collection<String> keys, String place) {

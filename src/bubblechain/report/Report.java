@@ -43,7 +43,7 @@ public record Report(
                 Keys.check(table.key());
                 keys.add(table.key());
             } else if (block instanceof Facts facts && facts.key().isEmpty()) {
-                facts.facts().forEach(fact -> keys.add(fact.key()));
+                facts.facts().forEach(fact -> keys.addAll(fact.keys()));
             } else if (block instanceof Facts facts) {
                 keys.add(facts.key());
             }

@@ -19,13 +19,20 @@ public record Table(String key, String title, List<Column> columns, List<List<Va
         if (columns.isEmpty()) {
             throw new IllegalArgumentException("table '" + title + "' has no columns");
         }
-        Keys.checkUnique(columns.stream().map(Column::key).toList(), "the columns of table '" + title + "'");
+        Keys.checkUnique(
+                columns.stream().flatMap(column -> column.keys().stream()).toList(),
+                "the columns of table '" + title + "'");
         for (List<Value> row : rows) {
             if (row.size() != columns.size()) {
                 throw new IllegalArgumentException("a row of table '" + title + "' has " + row.size()
                         + " cells, there are " + columns.size() + " columns");
             }
         }
+    }
+
+    /** True if no row has a value in that column. */
+    public boolean isEmpty(int column) {
+        return rows.stream().allMatch(row -> row.get(column) instanceof Value.Absent);
     }
 
     /** A table under construction. */

@@ -1,0 +1,32 @@
+package bubblechain.output;
+
+/** Makes text harmless for a terminal and a line-oriented format: no control or direction-changing characters. */
+final class Cleaning {
+    private static final int REPLACEMENT = 0xFFFD;
+
+    private Cleaning() {}
+
+    /** One line: white space and line ends become single spaces, other control characters the replacement sign. */
+    static String oneLine(String text) {
+        return clean(text).replaceAll("\\s+", " ").strip();
+    }
+
+    /** Line ends become line feeds, tabs spaces, other control characters the replacement sign. */
+    static String clean(String text) {
+        StringBuilder clean = new StringBuilder(text.length());
+        text.replace("\r\n", "\n").replace('\r', '\n').codePoints().forEach(c -> clean.appendCodePoint(harmless(c)));
+        return clean.toString();
+    }
+
+    private static int harmless(int c) {
+        if (c == '\n') {
+            return c;
+        }
+        if (c == '\t' || c == 0x2028 || c == 0x2029) {
+            return ' ';
+        }
+        int type = Character.getType(c);
+        boolean harmful = type == Character.CONTROL || type == Character.SURROGATE || type == Character.FORMAT;
+        return harmful ? REPLACEMENT : c;
+    }
+}
