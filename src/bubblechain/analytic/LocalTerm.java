@@ -1,0 +1,154 @@
+package bubblechain.analytic;
+
+import bubblechain.analytic.TermKey.GammaFactor;
+import bubblechain.analytic.TermKey.PolygammaFactor;
+import bubblechain.analytic.TermKey.SineFactor;
+import bubblechain.exact.ExactConstant;
+import bubblechain.exact.ExactFunctions;
+import bubblechain.exact.Rational;
+import bubblechain.series.SeriesAlgebra;
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+
+/**
+ * One term of a normal form written about u0, x = u - u0: an exact power of x, an exact constant, polynomials in x with
+ * non-zero constant term above and below, gamma functions at arguments in (0,1] at x = 0, and the rest. The power of x is
+ * settled here, in exact arithmetic, before any approximate number enters.
+ */
+final class LocalTerm {
+    private final Rational point;
+    private final TermKey key;
+    private final List<Polynomial> above = new ArrayList<>();
+    private final List<Polynomial> below = new ArrayList<>();
+    private final List<GammaPower> gammas = new ArrayList<>();
+    private ExactConstant constant;
+    private int valuation;
+
+    /** Gamma(shift + slope x)^power with shift in (0,1]. */
+    private record GammaPower(Rational shift, Rational slope, int power) {}
+
+    LocalTerm(TermKey key, RationalFunction factor, Rational point) {
+        this.key = key;
+        this.point = point;
+        this.constant = key.constant().multiply(key.slope().multiply(point).exp());
+        RationalFunction local = factor.shifted(point);
+        valuation = local.numerator().valuation() - local.denominator().valuation();
+        above.add(local.numerator().dividedByPower(local.numerator().valuation()));
+        below.add(local.denominator().dividedByPower(local.denominator().valuation()));
+        key.gammas().forEach(this::addGamma);
+        key.polygammas().forEach((p, power) -> {
+            if (isPole(argument(p.shift(), p.slope()))) {
+                valuation -= (p.n() + 1) * power;
+            }
+        });
+    }
+
+    /** Lowest power of x this term can have; a sine that vanishes at the point is not counted. */
+    int valuation() {
+        return valuation;
+    }
+
+    private Rational argument(Rational shift, Rational slope) {
+        return shift.add(slope.multiply(point));
+    }
+
+    private static boolean isPole(Rational argument) {
+        return argument.isInteger() && argument.signum() <= 0;
+    }
+
+    /** Gamma(z + b x) = Gamma(s + b x) times or over the factors (s + j + b x), s in (0,1]. */
+    private void addGamma(GammaFactor gamma, int power) {
+        Rational z = argument(gamma.shift(), gamma.slope());
+        Rational s = z.subtract(Rational.of(z.ceiling())).add(1);
+        int steps = z.subtract(s).intValueExact();
+        for (int j = 0; j < steps; j++) {
+            addFactor(s.add(j), gamma.slope(), power);
+        }
+        for (int j = 1; j <= -steps; j++) {
+            addFactor(s.subtract(j), gamma.slope(), -power);
+        }
+        constant = constant.multiply(ExactFunctions.gamma(s).power(power));
+        gammas.add(new GammaPower(s, gamma.slope(), power));
+    }
+
+    /** The factor (value + slope x)^power. */
+    private void addFactor(Rational value, Rational slope, int power) {
+        if (value.isZero()) {
+            constant = constant.multiply(slope.power(power));
+            valuation += power;
+            return;
+        }
+        List<Polynomial> side = power > 0 ? above : below;
+        for (int k = 0; k < Math.abs(power); k++) {
+            side.add(Polynomial.linear(value, slope));
+        }
+    }
+
+    /** The expansion in x with the length of the algebra. */
+    <S> S expand(SeriesAlgebra<S> algebra) {
+        S result = functions(algebra);
+        for (Polynomial p : above) {
+            result = algebra.multiply(result, p.coefficients());
+        }
+        for (Polynomial p : below) {
+            result = algebra.divide(result, p.coefficients());
+        }
+        int poles = 0;
+        for (Map.Entry<PolygammaFactor, Integer> entry : key.polygammas().entrySet()) {
+            S power = algebra.power(polygamma(algebra, entry.getKey()), entry.getValue());
+            if (isPole(argument(entry.getKey().shift(), entry.getKey().slope()))) {
+                poles += (entry.getKey().n() + 1) * entry.getValue();
+            }
+            result = algebra.multiply(result, power);
+        }
+        for (Map.Entry<SineFactor, Integer> entry : key.sines().entrySet()) {
+            result = algebra.multiply(result, algebra.power(sine(algebra, entry.getKey()), entry.getValue()));
+        }
+        // The poles of the polygammas are already in the series, the other powers of x are not.
+        return algebra.shift(result, valuation + poles);
+    }
+
+    /** constant exp(sum of log-gamma tails + slope x). */
+    private <S> S functions(SeriesAlgebra<S> algebra) {
+        if (gammas.isEmpty() && key.slope().isZero()) {
+            return algebra.constant(constant);
+        }
+        S exponent = algebra.linear(ExactConstant.ZERO, key.slope());
+        for (GammaPower g : gammas) {
+            S tail = algebra.logGammaTail(g.shift(), g.slope());
+            exponent = algebra.add(exponent, algebra.multiply(tail, Rational.of(g.power())));
+        }
+        S exponential = algebra.exp(exponent);
+        return constant.equals(ExactConstant.ONE)
+                ? exponential
+                : algebra.multiply(exponential, algebra.constant(constant));
+    }
+
+    /** psi^(n)(z + b x) = psi^(n)(s + b x) plus or minus (-1)^n n! sum (s + j + b x)^(-n-1). */
+    private <S> S polygamma(SeriesAlgebra<S> algebra, PolygammaFactor factor) {
+        Rational z = argument(factor.shift(), factor.slope());
+        Rational s = z.subtract(Rational.of(z.ceiling())).add(1);
+        int steps = z.subtract(s).intValueExact();
+        int n = factor.n();
+        BigInteger factorial = ExactFunctions.factorial(n);
+        Rational scale = Rational.of(n % 2 == 0 ? factorial : factorial.negate());
+        S sum = algebra.polygammaTail(n, s, factor.slope());
+        ExactConstant slope = ExactConstant.of(factor.slope());
+        for (int j = 0; j < steps; j++) {
+            S argument = algebra.linear(ExactConstant.of(s.add(j)), slope);
+            sum = algebra.add(sum, algebra.multiply(algebra.power(argument, -n - 1), scale));
+        }
+        for (int j = 1; j <= -steps; j++) {
+            S argument = algebra.linear(ExactConstant.of(s.subtract(j)), slope);
+            sum = algebra.add(sum, algebra.multiply(algebra.power(argument, -n - 1), scale.negate()));
+        }
+        return sum;
+    }
+
+    private <S> S sine(SeriesAlgebra<S> algebra, SineFactor factor) {
+        ExactConstant value = factor.constant().add(ExactConstant.of(factor.slope().multiply(point)));
+        return algebra.sin(algebra.linear(value, ExactConstant.of(factor.slope())));
+    }
+}

@@ -1,0 +1,181 @@
+package bubblechain.analytic;
+
+import bubblechain.exact.DomainException;
+import bubblechain.exact.ExactConstant;
+import bubblechain.exact.Rational;
+import bubblechain.formula.ConstantValue;
+import bubblechain.formula.Formula;
+import bubblechain.formula.FormulaException;
+import bubblechain.formula.FormulaLimits;
+import java.util.HashMap;
+import java.util.Map;
+import java.util.Optional;
+
+/** Turns a formula tree into a {@link NormalForm}, or says which sub-expression is outside the class. */
+final class NormalFormCompiler {
+    /** Nodes visited while sums are written out. */
+    private static final int STEP_LIMIT = 200_000;
+
+    private final String variable;
+    private final Map<String, ExactConstant> indices = new HashMap<>();
+    private int steps;
+
+    NormalFormCompiler(String variable) {
+        this.variable = variable;
+    }
+
+    NormalForm compile(Formula formula) {
+        if (++steps > STEP_LIMIT) {
+            throw FormulaException.at(formula.span(), "the sums of this formula have too many terms in all");
+        }
+        try {
+            return unchecked(formula);
+        } catch (FormulaException placed) {
+            throw placed;
+        } catch (ArithmeticException | DomainException e) {
+            throw FormulaException.at(formula.span(), String.valueOf(e.getMessage()));
+        }
+    }
+
+    private NormalForm unchecked(Formula formula) {
+        if (formula instanceof Formula.Literal l) {
+            return NormalForm.constant(ExactConstant.of(l.value()));
+        }
+        if (formula instanceof Formula.Name n) {
+            return n.name().equals(variable) && !indices.containsKey(variable)
+                    ? NormalForm.VARIABLE
+                    : NormalForm.constant(ConstantValue.of(n, indices));
+        }
+        if (formula instanceof Formula.Negation n) {
+            return compile(n.operand()).negate();
+        }
+        if (formula instanceof Formula.Call c) {
+            return call(c);
+        }
+        if (formula instanceof Formula.FiniteSum s) {
+            return sum(s);
+        }
+        Formula.Binary b = (Formula.Binary) formula;
+        NormalForm left = compile(b.left());
+        return switch (b.operator()) {
+            case ADD -> left.add(compile(b.right()));
+            case SUBTRACT -> left.subtract(compile(b.right()));
+            case MULTIPLY -> left.multiply(compile(b.right()));
+            case DIVIDE -> left.multiply(inverse(compile(b.right()), b.right()));
+            case POWER -> power(left, b);
+        };
+    }
+
+    private static NormalForm inverse(NormalForm form, Formula place) {
+        return form.inverse()
+                .orElseThrow(() -> new InadmissibleFormulaException(
+                        place.span(),
+                        "a denominator must be a product of rational functions, exponentials, gammas and"
+                                + " sin(pi*...); the zeros of this one cannot be listed exactly"));
+    }
+
+    private NormalForm power(NormalForm base, Formula.Binary b) {
+        NormalForm exponent = compile(b.right());
+        Optional<Rational> constant = exponent.asConstant().flatMap(ExactConstant::asRational);
+        if (constant.isPresent() && constant.get().isInteger()) {
+            if (constant.get().abs().compareTo(Rational.of(FormulaLimits.EXPONENT)) > 0) {
+                throw FormulaException.at(
+                        b.right().span(), "an exponent of more than " + FormulaLimits.EXPONENT + " in size");
+            }
+            int n = constant.get().intValueExact();
+            return integerPower(n < 0 ? inverse(base, b.left()) : base, Math.abs(n));
+        }
+        Optional<ExactConstant> constantBase = base.asConstant();
+        Optional<NormalForm.Linear> linear = exponent.asLinear();
+        if (constantBase.isEmpty() || linear.isEmpty()) {
+            throw new InadmissibleFormulaException(
+                    b.span(), "a power needs an integer exponent, or a positive constant to a power linear in u");
+        }
+        ExactConstant log = constantBase.get().ln();
+        return NormalForm.exponential(
+                linear.get().constant().multiply(log), linear.get().slope().multiply(log));
+    }
+
+    private static NormalForm integerPower(NormalForm base, int n) {
+        NormalForm result = NormalForm.ONE;
+        NormalForm square = base;
+        for (int e = n; e > 0; e >>= 1) {
+            if ((e & 1) == 1) {
+                result = result.multiply(square);
+            }
+            if (e > 1) {
+                square = square.multiply(square);
+            }
+        }
+        return result;
+    }
+
+    private NormalForm sum(Formula.FiniteSum s) {
+        int from = ConstantValue.integer(s.from(), indices, "the start of a sum");
+        int to = ConstantValue.integer(s.to(), indices, "the end of a sum");
+        if (to - from >= FormulaLimits.SUM_TERMS) {
+            throw FormulaException.at(s.span(), "a sum of more than " + FormulaLimits.SUM_TERMS + " terms");
+        }
+        ExactConstant hidden = indices.get(s.index());
+        NormalForm total = NormalForm.ZERO;
+        for (int k = from; k <= to; k++) {
+            indices.put(s.index(), ExactConstant.of(k));
+            total = total.add(compile(s.body()));
+        }
+        if (hidden == null) {
+            indices.remove(s.index());
+        } else {
+            indices.put(s.index(), hidden);
+        }
+        return total;
+    }
+
+    private NormalForm call(Formula.Call c) {
+        Formula last = c.arguments().get(c.arguments().size() - 1);
+        if (!dependsOnVariable(c)) {
+            return NormalForm.constant(ConstantValue.of(c, indices));
+        }
+        NormalForm argument = compile(last);
+        NormalForm.Linear linear = argument.asLinear()
+                .orElseThrow(() -> new InadmissibleFormulaException(
+                        last.span(), "the argument of " + c.function().text() + " must be linear in u"));
+        return switch (c.function()) {
+            case GAMMA -> NormalForm.gamma(rational(linear.constant(), last), rational(linear.slope(), last));
+            case DIGAMMA -> NormalForm.polygamma(0, rational(linear.constant(), last), rational(linear.slope(), last));
+            case POLYGAMMA -> NormalForm.polygamma(
+                    polygammaOrder(c), rational(linear.constant(), last), rational(linear.slope(), last));
+            case EXP -> NormalForm.exponential(linear.constant(), linear.slope());
+            case SIN -> sine(linear.constant(), linear.slope(), last);
+            case COS -> sine(
+                    linear.constant().add(ExactConstant.PI.multiply(Rational.HALF)), linear.slope(), last);
+            case LN, SQRT, ZETA, POLYLOG -> throw new InadmissibleFormulaException(
+                    c.span(), c.function().text() + " of an expression with u has no exact list of singularities");
+        };
+    }
+
+    private int polygammaOrder(Formula.Call c) {
+        Formula order = c.arguments().get(0);
+        int n = ConstantValue.integer(order, indices, "the order of a polygamma");
+        if (n < 0 || n > FormulaLimits.SUM_TERMS) {
+            throw FormulaException.at(
+                    order.span(), "the order of a polygamma lies between 0 and " + FormulaLimits.SUM_TERMS);
+        }
+        return n;
+    }
+
+    private static NormalForm sine(ExactConstant constant, ExactConstant slope, Formula place) {
+        return NormalForm.sine(constant, slope)
+                .orElseThrow(() -> new InadmissibleFormulaException(
+                        place.span(), "the slope of u in a sine or cosine must be rational or a multiple of pi"));
+    }
+
+    private static Rational rational(ExactConstant value, Formula place) {
+        return value.asRational()
+                .orElseThrow(() -> new InadmissibleFormulaException(
+                        place.span(), "a gamma function needs an argument s + b*u with rational s and b"));
+    }
+
+    private boolean dependsOnVariable(Formula formula) {
+        return !indices.containsKey(variable) && formula.names().contains(variable);
+    }
+}

@@ -1,0 +1,80 @@
+package bubblechain.analytic;
+
+import bubblechain.exact.ExactConstant;
+import bubblechain.exact.Rational;
+import java.util.HashMap;
+import java.util.Map;
+
+/**
+ * The transcendental part of one term of a {@link NormalForm}:
+ * constant e^(slope u) prod Gamma(shift + b u)^m prod psi^(n)(shift + b u)^k prod sin(c + b u)^k.
+ *
+ * @param constant   a single product of constants, with coefficient one
+ * @param slope      coefficient of u in the exponent
+ * @param gammas     powers of gamma functions, never zero
+ * @param polygammas positive powers of polygamma functions
+ * @param sines      positive powers of sines whose slope is rational (not a multiple of pi)
+ */
+record TermKey(
+        ExactConstant constant,
+        ExactConstant slope,
+        Map<GammaFactor, Integer> gammas,
+        Map<PolygammaFactor, Integer> polygammas,
+        Map<SineFactor, Integer> sines) {
+    static final TermKey ONE = new TermKey(ExactConstant.ONE, ExactConstant.ZERO, Map.of(), Map.of(), Map.of());
+
+    /** Gamma(shift + slope u) with shift in (0,1] and slope not zero. */
+    record GammaFactor(Rational slope, Rational shift) {}
+
+    /** psi^(n)(shift + slope u) with shift in (0,1] and slope not zero. */
+    record PolygammaFactor(int n, Rational slope, Rational shift) {}
+
+    /** sin(constant + slope u) with slope not zero. */
+    record SineFactor(ExactConstant constant, Rational slope) {}
+
+    TermKey {
+        gammas = Map.copyOf(gammas);
+        polygammas = Map.copyOf(polygammas);
+        sines = Map.copyOf(sines);
+    }
+
+    /** The product of the parts that depend on u; the constants are multiplied by the caller. */
+    TermKey timesFunctions(TermKey other, ExactConstant newConstant) {
+        return new TermKey(
+                newConstant,
+                slope.add(other.slope),
+                merged(gammas, other.gammas),
+                merged(polygammas, other.polygammas),
+                merged(sines, other.sines));
+    }
+
+    private static <F> Map<F, Integer> merged(Map<F, Integer> left, Map<F, Integer> right) {
+        if (left.isEmpty() || right.isEmpty()) {
+            return left.isEmpty() ? right : left;
+        }
+        Map<F, Integer> result = new HashMap<>(left);
+        right.forEach((factor, power) -> result.merge(factor, power, Integer::sum));
+        result.values().removeIf(power -> power == 0);
+        return result;
+    }
+
+    boolean isConstant() {
+        return slope.isZero() && gammas.isEmpty() && polygammas.isEmpty() && sines.isEmpty();
+    }
+
+    /** True if only exponentials and gamma functions depend on u, so that the inverse is of the same kind. */
+    boolean isInvertible() {
+        return polygammas.isEmpty() && sines.isEmpty();
+    }
+
+    /** The inverse of the parts that depend on u, with constant one. */
+    TermKey inverseFunctions() {
+        Map<GammaFactor, Integer> inverted = new HashMap<>();
+        gammas.forEach((factor, power) -> inverted.put(factor, -power));
+        return new TermKey(ExactConstant.ONE, slope.negate(), inverted, Map.of(), Map.of());
+    }
+
+    TermKey withConstant(ExactConstant value) {
+        return new TermKey(value, slope, gammas, polygammas, sines);
+    }
+}

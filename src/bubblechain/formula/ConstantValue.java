@@ -1,0 +1,123 @@
+package bubblechain.formula;
+
+import bubblechain.exact.ConstantFunctions;
+import bubblechain.exact.DomainException;
+import bubblechain.exact.ExactConstant;
+import bubblechain.exact.ExactFunctions;
+import bubblechain.exact.Rational;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * The value of a formula without free variables, as an {@link ExactConstant}: canonical where a canonical form is
+ * known, opaque (known by its balls) otherwise.
+ */
+public final class ConstantValue {
+    private static final Rational LARGEST_ARGUMENT = Rational.of(10_000);
+
+    private final Map<String, ExactConstant> values;
+
+    private ConstantValue(Map<String, ExactConstant> values) {
+        this.values = values;
+    }
+
+    /** The value of a constant. @throws FormulaException if a name has no value or a function is out of its range */
+    public static ExactConstant of(Formula formula) {
+        return of(formula, Map.of());
+    }
+
+    /** The value with given numbers for some names. */
+    public static ExactConstant of(Formula formula, Map<String, ExactConstant> values) {
+        return new ConstantValue(values).value(formula);
+    }
+
+    /** The integer a formula stands for, such as the order of a polygamma or the end of a sum. */
+    public static int integer(Formula formula, Map<String, ExactConstant> values, String what) {
+        Optional<Rational> value = of(formula, values).asRational();
+        if (value.isEmpty() || !value.get().isInteger() || value.get().abs().compareTo(LARGEST_ARGUMENT) > 0) {
+            throw FormulaException.at(formula.span(), what + " must be an integer of at most " + LARGEST_ARGUMENT);
+        }
+        return value.get().intValueExact();
+    }
+
+    private ExactConstant value(Formula formula) {
+        try {
+            return unchecked(formula);
+        } catch (FormulaException alreadyPlaced) {
+            throw alreadyPlaced;
+        } catch (ArithmeticException | DomainException e) {
+            throw FormulaException.at(formula.span(), String.valueOf(e.getMessage()));
+        }
+    }
+
+    private ExactConstant unchecked(Formula formula) {
+        if (formula instanceof Formula.Literal l) {
+            return ExactConstant.of(l.value());
+        }
+        if (formula instanceof Formula.Name n) {
+            return named(n);
+        }
+        if (formula instanceof Formula.Negation n) {
+            return value(n.operand()).negate();
+        }
+        if (formula instanceof Formula.Call c) {
+            return call(c);
+        }
+        if (formula instanceof Formula.FiniteSum s) {
+            return sum(s);
+        }
+        Formula.Binary b = (Formula.Binary) formula;
+        return switch (b.operator()) {
+            case ADD -> value(b.left()).add(value(b.right()));
+            case SUBTRACT -> value(b.left()).subtract(value(b.right()));
+            case MULTIPLY -> value(b.left()).multiply(value(b.right()));
+            case DIVIDE -> value(b.left()).multiply(value(b.right()).inverse());
+            case POWER -> ConstantFunctions.power(value(b.left()), value(b.right()));
+        };
+    }
+
+    private ExactConstant named(Formula.Name n) {
+        if (values.containsKey(n.name())) {
+            return values.get(n.name());
+        }
+        return switch (n.name()) {
+            case Constants.PI -> ExactConstant.PI;
+            case Constants.EULER_GAMMA -> ExactConstant.EULER_GAMMA;
+            default -> throw FormulaException.at(n.span(), "the name '" + n.name() + "' has no value here");
+        };
+    }
+
+    private ExactConstant sum(Formula.FiniteSum s) {
+        int from = integer(s.from(), values, "the start of a sum");
+        int to = integer(s.to(), values, "the end of a sum");
+        if (to - from >= FormulaLimits.SUM_TERMS) {
+            throw FormulaException.at(s.span(), "a sum of more than " + FormulaLimits.SUM_TERMS + " terms");
+        }
+        ExactConstant total = ExactConstant.ZERO;
+        Map<String, ExactConstant> inner = new HashMap<>(values);
+        for (int k = from; k <= to; k++) {
+            inner.put(s.index(), ExactConstant.of(k));
+            total = total.add(of(s.body(), inner));
+        }
+        return total;
+    }
+
+    private ExactConstant call(Formula.Call c) {
+        List<Formula> arguments = c.arguments();
+        ExactConstant last = value(arguments.get(arguments.size() - 1));
+        return switch (c.function()) {
+            case ZETA -> ExactFunctions.zeta(integer(arguments.get(0), values, "the argument of zeta"));
+            case POLYLOG -> ConstantFunctions.polylog(integer(arguments.get(0), values, "the order of a polylog"), last);
+            case POLYGAMMA -> ConstantFunctions.polygamma(integer(arguments.get(0), values, "the order of a polygamma"), last);
+            case GAMMA -> ConstantFunctions.gamma(last);
+            case DIGAMMA -> ConstantFunctions.polygamma(0, last);
+            case LN -> last.ln();
+            case SQRT -> ConstantFunctions.power(last, ExactConstant.of(Rational.HALF));
+            case EXP -> last.exp();
+            case SIN -> ConstantFunctions.sine(last, Rational.ZERO);
+            case COS -> ConstantFunctions.sine(last, Rational.HALF);
+        };
+    }
+}
