@@ -23,13 +23,15 @@ final class TextColumn {
     private final Alignment alignment;
     private final int beforePoint;
     private final int natural;
+    private final int body;
     private final int least;
 
-    private TextColumn(String heading, Alignment alignment, int beforePoint, int natural, int least) {
+    private TextColumn(String heading, Alignment alignment, int beforePoint, int natural, int body, int least) {
         this.heading = heading;
         this.alignment = alignment;
         this.beforePoint = beforePoint;
         this.natural = natural;
+        this.body = body;
         this.least = least;
     }
 
@@ -46,13 +48,15 @@ final class TextColumn {
                 widest = Math.max(widest, cell.width());
             }
         }
-        int body = Math.max(widest, before + after);
+        int cellsWidth = Math.max(widest, before + after);
         int longestWord = 1;
         for (String word : heading.split(" ")) {
             longestWord = Math.max(longestWord, Wrapping.width(word));
         }
-        int least = Math.max(longestWord, Math.min(body, NARROW));
-        return new TextColumn(heading, alignment, before, Math.max(body, Wrapping.width(heading)), least);
+        int natural = Math.max(cellsWidth, Wrapping.width(heading));
+        int body = Math.max(cellsWidth, longestWord);
+        int least = Math.max(longestWord, Math.min(cellsWidth, NARROW));
+        return new TextColumn(heading, alignment, before, natural, body, least);
     }
 
     private static Alignment alignment(List<Cell> cells) {
@@ -83,6 +87,11 @@ final class TextColumn {
     /** Width at which nothing is broken. */
     int natural() {
         return natural;
+    }
+
+    /** Width at which only the heading is broken. */
+    int body() {
+        return body;
     }
 
     /** Width below which the column is not pressed. */

@@ -27,6 +27,10 @@ final class TextPage {
     }
 
     void line(String line) {
+        if (line.isBlank()) {
+            gap();
+            return;
+        }
         if (blankPending && text.length() > 0) {
             text.append('\n');
         }

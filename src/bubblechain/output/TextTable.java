@@ -49,10 +49,15 @@ final class TextTable {
         return rows.stream().mapToInt(row -> lines(row).size()).sum();
     }
 
-    /** Narrows the widest of the columns to be narrowed first, then the widest of all. */
+    /** Breaks headings, then narrows the widest of the columns to be narrowed first, then the widest of all. */
     private static Optional<TextTable> narrowed(List<TextColumn> columns, Predicate<TextColumn> first, int room) {
         int[] widths = columns.stream().mapToInt(TextColumn::natural).toArray();
         int excess = GAP * (widths.length - 1) + IntStream.of(widths).sum() - room;
+        for (int c = 0; c < widths.length && excess > 0; c++) {
+            int less = Math.min(excess, widths[c] - columns.get(c).body());
+            widths[c] -= less;
+            excess -= less;
+        }
         for (; excess > 0; excess--) {
             int widest = widestToNarrow(columns, widths, first);
             if (widest < 0) {

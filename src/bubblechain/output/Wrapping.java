@@ -54,12 +54,12 @@ final class Wrapping {
         String rest = text;
         while (width(rest) > width) {
             int limit = rest.offsetByCodePoints(0, width);
-            int end = limit;
-            for (int i = limit; i > 0; i--) {
-                if (breaksAt(rest, i, formula)) {
-                    end = i;
-                    break;
-                }
+            int end = formula ? lastBreak(rest, limit, limit / 2, Wrapping::startsTerm) : 0;
+            if (end == 0) {
+                end = lastBreak(rest, limit, 0, formula ? Wrapping::splitsFormula : Wrapping::splitsWords);
+            }
+            if (end == 0) {
+                end = limit;
             }
             lines.add(rest.substring(0, end).stripTrailing());
             rest = rest.substring(end).stripLeading();
@@ -70,14 +70,32 @@ final class Wrapping {
         return lines;
     }
 
-    /** True if a line may end just before position i. */
-    private static boolean breaksAt(String text, int i, boolean formula) {
-        char before = text.charAt(i - 1);
-        char after = text.charAt(i);
-        if (after == ' ' || before == ' ') {
-            return !formula || !endsWithSign(text, i);
+    /** Where a line may end: a place in a text, just before the character at the index. */
+    @FunctionalInterface
+    private interface Place {
+        boolean allows(String text, int index);
+    }
+
+    /** The last such place after {@code from} and not after {@code limit}; 0 if there is none. */
+    private static int lastBreak(String text, int limit, int from, Place place) {
+        for (int i = limit; i > from; i--) {
+            if (place.allows(text, i)) {
+                return i;
+            }
         }
-        return formula && (before == '*' || before == ',' || startsTerm(before, after));
+        return 0;
+    }
+
+    private static boolean splitsWords(String text, int i) {
+        return text.charAt(i) == ' ' || text.charAt(i - 1) == ' ';
+    }
+
+    private static boolean splitsFormula(String text, int i) {
+        if (splitsWords(text, i)) {
+            return !endsWithSign(text, i);
+        }
+        char before = text.charAt(i - 1);
+        return before == '*' || before == ',' || startsTerm(text, i);
     }
 
     /** True if the line would end with a plus or minus that belongs to what follows. */
@@ -86,8 +104,10 @@ final class Wrapping {
         return line.endsWith(" +") || line.endsWith(" -");
     }
 
-    private static boolean startsTerm(char before, char after) {
-        boolean sign = after == '+' || after == '-';
+    /** True before a plus or minus between two terms, not before the sign of an exponent. */
+    private static boolean startsTerm(String text, int i) {
+        char before = i > 1 && text.charAt(i - 1) == ' ' ? text.charAt(i - 2) : text.charAt(i - 1);
+        boolean sign = text.charAt(i) == '+' || text.charAt(i) == '-';
         return sign && (Character.isLetterOrDigit(before) || before == ')') && before != 'e' && before != 'E';
     }
 }
