@@ -187,14 +187,15 @@ public final class Ball {
     /** @throws PrecisionException if the exponent is negative and this contains zero */
     public Ball power(int n, int bits) {
         int working = bits + 2 * (32 - Integer.numberOfLeadingZeros(Math.abs(n))) + 4;
+        Ball base = n < 0 ? inverse(working) : this; // inverted first: a power of a wide ball may reach zero
         Ball result = ONE;
         for (int bit = 31 - Integer.numberOfLeadingZeros(Math.abs(n)); bit >= 0; bit--) {
             result = result.multiply(result, working);
             if ((Math.abs(n) >> bit & 1) == 1) {
-                result = result.multiply(this, working);
+                result = result.multiply(base, working);
             }
         }
-        return n < 0 ? result.inverse(bits) : result.round(bits);
+        return result.round(bits);
     }
 
     public Ball negate() {
