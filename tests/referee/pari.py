@@ -15,7 +15,7 @@ def run(script, memory="2G"):
     finally:
         os.unlink(path)
     if "***" in done.stdout + done.stderr:
-        raise RuntimeError((done.stdout + done.stderr)[:2000])
+        raise RuntimeError((done.stderr + done.stdout)[:2000])
     return done.stdout
 
 
