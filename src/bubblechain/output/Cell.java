@@ -29,7 +29,7 @@ record Cell(String text, Kind kind) {
             return new Cell(numeral.decimal(), Kind.DECIMAL);
         }
         if (value instanceof Value.Exact exact) {
-            String formula = Cleaning.oneLine(exact.formula());
+            String formula = PlainText.oneLine(exact.formula());
             return new Cell(formula, RATIONAL.matcher(formula).matches() ? Kind.WHOLE : Kind.FORMULA);
         }
         if (value instanceof Value.Count count) {
@@ -43,7 +43,7 @@ record Cell(String text, Kind kind) {
 
     private static String words(Value value) {
         if (value instanceof Value.Text text) {
-            return Cleaning.oneLine(text.text());
+            return PlainText.oneLine(text.text());
         }
         if (value instanceof Value.Flag flag) {
             return flag.set() ? "yes" : "no";
@@ -69,7 +69,7 @@ record Cell(String text, Kind kind) {
     }
 
     private static String labelled(Fact fact) {
-        return Cleaning.oneLine(fact.label() + " " + of(fact.value()).text() + " " + fact.unit());
+        return PlainText.oneLine(fact.label() + " " + of(fact.value()).text() + " " + fact.unit());
     }
 
     /** Columns taken by an unbroken line. */

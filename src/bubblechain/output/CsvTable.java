@@ -51,7 +51,7 @@ record CsvTable(String title, List<String> header, List<List<String>> rows) {
     }
 
     private static String header(Column column) {
-        return column.unit().isEmpty() ? column.key() : column.key() + " [" + Cleaning.oneLine(column.unit()) + "]";
+        return column.unit().isEmpty() ? column.key() : column.key() + " [" + PlainText.oneLine(column.unit()) + "]";
     }
 
     /** The tables of one column, those with equal columns joined, each row behind the name of the row it belongs to. */

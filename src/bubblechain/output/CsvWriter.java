@@ -59,7 +59,7 @@ public final class CsvWriter implements ReportWriter {
     }
 
     private static void comment(Writer out, String text) throws IOException {
-        out.write("# " + Cleaning.oneLine(text) + "\n");
+        out.write("# " + PlainText.oneLine(text) + "\n");
     }
 
     private static void write(Writer out, List<CsvTable> tables) throws IOException {
@@ -125,7 +125,7 @@ public final class CsvWriter implements ReportWriter {
 
     /** The text, behind an apostrophe if a spreadsheet would run it. */
     static String protect(String text) {
-        String clean = Cleaning.clean(text);
+        String clean = PlainText.clean(text);
         String start = clean.stripLeading();
         boolean formula = !start.isEmpty() && "=+-@".indexOf(start.charAt(0)) >= 0;
         boolean number = start.matches("[+-]?\\d+(?:[./]\\d+)?(?:[eE][+-]?\\d+)?(?:; .*)?");

@@ -71,7 +71,7 @@ public final class JsonWriter implements ReportWriter {
         text(json, "command", report.command());
         json.writeObjectFieldStart("request");
         for (Map.Entry<String, String> option : report.request().entrySet()) {
-            text(json, Cleaning.clean(option.getKey()), option.getValue());
+            text(json, PlainText.clean(option.getKey()), option.getValue());
         }
         json.writeEndObject();
         text(json, "normalisation", report.normalisation());
@@ -86,13 +86,13 @@ public final class JsonWriter implements ReportWriter {
     }
 
     private static void text(JsonGenerator json, String key, String text) throws IOException {
-        json.writeStringField(key, Cleaning.clean(text));
+        json.writeStringField(key, PlainText.clean(text));
     }
 
     private static void texts(JsonGenerator json, String key, List<String> texts) throws IOException {
         json.writeArrayFieldStart(key);
         for (String text : texts) {
-            json.writeString(Cleaning.clean(text));
+            json.writeString(PlainText.clean(text));
         }
         json.writeEndArray();
     }
@@ -145,11 +145,11 @@ public final class JsonWriter implements ReportWriter {
 
     private static void value(JsonGenerator json, Value value) throws IOException {
         if (value instanceof Value.Text text) {
-            json.writeString(Cleaning.clean(text.text()));
+            json.writeString(PlainText.clean(text.text()));
         } else if (value instanceof Value.Numeral numeral) {
             json.writeString(numeral.decimal());
         } else if (value instanceof Value.Exact exact) {
-            json.writeString(Cleaning.clean(exact.formula()));
+            json.writeString(PlainText.clean(exact.formula()));
         } else if (value instanceof Value.Count count) {
             json.writeNumber(count.count());
         } else if (value instanceof Value.Flag flag) {

@@ -7,7 +7,7 @@ final class LatexText {
     /** One line that LaTeX prints as the given text. */
     static String escape(String text) {
         StringBuilder escaped = new StringBuilder();
-        Cleaning.oneLine(text).codePoints().forEach(c -> append(escaped, c));
+        PlainText.oneLine(text).codePoints().forEach(c -> append(escaped, c));
         return escaped.toString();
     }
 

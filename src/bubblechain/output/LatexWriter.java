@@ -28,7 +28,7 @@ public final class LatexWriter implements ReportWriter {
         for (Block block : report.blocks()) {
             latex.append('\n');
             if (block instanceof Note note) {
-                Cleaning.clean(note.text()).lines().forEach(line -> line(latex, LatexText.escape(line)));
+                PlainText.clean(note.text()).lines().forEach(line -> line(latex, LatexText.escape(line)));
             } else if (block instanceof Facts facts) {
                 floating(latex, caption(facts.title(), report), () -> facts(latex, facts));
             } else if (block instanceof Table table) {
@@ -44,7 +44,7 @@ public final class LatexWriter implements ReportWriter {
     }
 
     private static void comment(StringBuilder latex, String text) {
-        latex.append("% ").append(Cleaning.oneLine(text)).append('\n');
+        latex.append("% ").append(PlainText.oneLine(text)).append('\n');
     }
 
     private static void line(StringBuilder latex, String line) {

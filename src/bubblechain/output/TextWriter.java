@@ -51,20 +51,20 @@ public final class TextWriter implements ReportWriter {
     }
 
     private static void header(TextPage page, Report report) {
-        page.paragraph("", Cleaning.oneLine("bubblechain " + report.command()));
+        page.paragraph("", PlainText.oneLine("bubblechain " + report.command()));
         if (!report.normalisation().isBlank()) {
-            page.paragraph("  expansion  ", Cleaning.oneLine(report.normalisation()));
+            page.paragraph("  expansion  ", PlainText.oneLine(report.normalisation()));
         }
         if (!report.request().isEmpty()) {
             List<String> settings = new ArrayList<>();
-            report.request().forEach((key, value) -> settings.add(Cleaning.oneLine(key + " = " + value)));
+            report.request().forEach((key, value) -> settings.add(PlainText.oneLine(key + " = " + value)));
             page.items("  request    ", settings);
         }
     }
 
     private static void block(TextPage page, Block block) {
         if (block instanceof Note note) {
-            Cleaning.clean(note.text()).lines().forEach(line -> page.paragraph("", line.strip()));
+            PlainText.clean(note.text()).lines().forEach(line -> page.paragraph("", line.strip()));
         } else if (block instanceof Facts facts) {
             title(page, facts.title());
             page.indented(facts.title().isBlank() ? 0 : 2, () -> facts(page, facts));
@@ -76,7 +76,7 @@ public final class TextWriter implements ReportWriter {
 
     private static void title(TextPage page, String title) {
         if (!title.isBlank()) {
-            page.paragraph("", Cleaning.oneLine(title));
+            page.paragraph("", PlainText.oneLine(title));
         }
     }
 
@@ -84,7 +84,7 @@ public final class TextWriter implements ReportWriter {
         if (!remarks.isEmpty()) {
             page.gap();
             page.line(title);
-            remarks.forEach(remark -> page.paragraph("  - ", Cleaning.oneLine(remark)));
+            remarks.forEach(remark -> page.paragraph("  - ", PlainText.oneLine(remark)));
         }
     }
 
@@ -94,7 +94,7 @@ public final class TextWriter implements ReportWriter {
         int limit = Math.min(WIDEST_LABEL, page.room() / 2);
         int labels = present.stream()
                 .filter(fact -> !isNested(fact.value()))
-                .mapToInt(fact -> Wrapping.width(Cleaning.oneLine(fact.label())))
+                .mapToInt(fact -> Wrapping.width(PlainText.oneLine(fact.label())))
                 .filter(length -> length <= limit)
                 .max()
                 .orElse(0);
@@ -102,7 +102,7 @@ public final class TextWriter implements ReportWriter {
     }
 
     private static void fact(TextPage page, Fact fact, int labels) {
-        String label = Cleaning.oneLine(fact.label());
+        String label = PlainText.oneLine(fact.label());
         if (isNested(fact.value())) {
             page.paragraph("", label + bracketed(fact.unit()));
             page.indented(INDENT, () -> nested(page, fact.value()));
@@ -115,7 +115,7 @@ public final class TextWriter implements ReportWriter {
         String lead = label + " ".repeat(labels - Wrapping.width(label) + 2);
         Cell cell = Cell.of(fact.value());
         List<String> pieces = new ArrayList<>(cell.wrapped(page.room() - Wrapping.width(lead)));
-        String unit = Cleaning.oneLine(fact.unit());
+        String unit = PlainText.oneLine(fact.unit());
         if (!unit.isEmpty()) {
             int last = pieces.size() - 1;
             pieces.addAll(Wrapping.words(pieces.remove(last) + " " + unit, page.room() - Wrapping.width(lead)));
@@ -183,11 +183,11 @@ public final class TextWriter implements ReportWriter {
     }
 
     private static String heading(Column column) {
-        return Cleaning.oneLine(column.heading()) + bracketed(column.unit());
+        return PlainText.oneLine(column.heading()) + bracketed(column.unit());
     }
 
     private static String bracketed(String unit) {
-        return unit.isBlank() ? "" : " [" + Cleaning.oneLine(unit) + "]";
+        return unit.isBlank() ? "" : " [" + PlainText.oneLine(unit) + "]";
     }
 
     /** One row below each other, for a table that is too wide. */

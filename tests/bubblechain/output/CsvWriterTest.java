@@ -36,7 +36,7 @@ class CsvWriterTest extends WriterContract {
 
     @Override
     boolean shows(String output, String text) throws IOException {
-        String clean = Cleaning.clean(text);
+        String clean = PlainText.clean(text);
         return records(output).stream()
                 .flatMap(CSVRecord::stream)
                 .anyMatch(cell -> cell.equals(clean) || cell.equals("'" + clean) || clean.equals("GeV"));

@@ -49,7 +49,7 @@ class JsonWriterTest extends WriterContract {
 
     @Override
     boolean shows(String output, String text) throws IOException {
-        return JsonTree.strings(JsonTree.object(output)).contains(Cleaning.clean(text));
+        return JsonTree.strings(JsonTree.object(output)).contains(PlainText.clean(text));
     }
 
     @Override

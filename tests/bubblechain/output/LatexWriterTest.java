@@ -65,7 +65,7 @@ class LatexWriterTest extends WriterContract {
                 .replace("\\char34", "\"")
                 .replaceAll("\\\\([{}#$%&_])", "$1")
                 .replace("\\textbackslash", "\\");
-        return plain.contains(Cleaning.oneLine(text));
+        return plain.contains(PlainText.oneLine(text));
     }
 
     @Override

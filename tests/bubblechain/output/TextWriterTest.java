@@ -29,7 +29,7 @@ class TextWriterTest extends WriterContract {
 
     @Override
     boolean shows(String output, String text) {
-        String dense = Cleaning.oneLine(text).replace(" ", "");
+        String dense = PlainText.oneLine(text).replace(" ", "");
         return output.replaceAll("\\s", "").contains(dense);
     }
 

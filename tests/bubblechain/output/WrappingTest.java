@@ -37,7 +37,7 @@ class WrappingTest {
             for (int i = random.nextInt(60); i > 0; i--) {
                 text.appendCodePoint(letters.get(random.nextInt(letters.size())));
             }
-            String line = Cleaning.oneLine(text.toString());
+            String line = PlainText.oneLine(text.toString());
             int width = 1 + random.nextInt(20);
             for (List<String> pieces : List.of(Wrapping.words(line, width), Wrapping.formula(line, width))) {
                 assertThat(String.join("", pieces).replace(" ", "")).isEqualTo(line.replace(" ", ""));

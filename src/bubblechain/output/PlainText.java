@@ -1,18 +1,18 @@
 package bubblechain.output;
 
 /** Makes text harmless for a terminal and a line-oriented format: no control or direction-changing characters. */
-final class Cleaning {
+public final class PlainText {
     private static final int REPLACEMENT = 0xFFFD;
 
-    private Cleaning() {}
+    private PlainText() {}
 
     /** One line: white space and line ends become single spaces, other control characters the replacement sign. */
-    static String oneLine(String text) {
+    public static String oneLine(String text) {
         return clean(text).replaceAll("\\s+", " ").strip();
     }
 
     /** Line ends become line feeds, tabs spaces, other control characters the replacement sign. */
-    static String clean(String text) {
+    public static String clean(String text) {
         StringBuilder clean = new StringBuilder(text.length());
         text.replace("\r\n", "\n").replace('\r', '\n').codePoints().forEach(c -> clean.appendCodePoint(harmless(c)));
         return clean.toString();
