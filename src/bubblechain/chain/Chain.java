@@ -1,0 +1,128 @@
+package bubblechain.chain;
+
+import bubblechain.exact.Ball;
+import bubblechain.exact.DomainException;
+import bubblechain.exact.ExactConstant;
+import bubblechain.kernel.Kernel;
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * The bubble chain of a kernel: its coefficients c_n in f = prefactor x sum_{n>=0} c_n a^(n+1),
+ * a = beta0 alpha(mu)/(4 pi), exactly or to any number of certified digits.
+ *
+ * <p>Entry 0 of every list is c_0, the one-loop coefficient. The error of a {@link CertifiedNumber} covers truncation
+ * and rounding; that the chain is a model of the full series it does not cover.
+ */
+public final class Chain {
+    /** Largest number of coefficients by the ball route. */
+    public static final int LARGEST_LOOPS = 1_000;
+    /** Largest number of coefficients in exact form. */
+    public static final int LARGEST_EXACT_LOOPS = 40;
+    /** Largest number of digits. */
+    public static final int LARGEST_DIGITS = 10_000;
+
+    private static final double BITS_PER_DIGIT = 3.3219280948873626;
+    private static final int FIRST_GUARD_BITS = 48;
+    private static final int LARGEST_GUARD_BITS = 2_048;
+
+    private final Kernel kernel;
+    private final Scales scales;
+
+    private Chain(Kernel kernel, Scales scales) {
+        this.kernel = kernel;
+        this.scales = scales;
+    }
+
+    /** The chain at the kernel's own scale. */
+    public static Chain of(Kernel kernel) {
+        return new Chain(kernel, Scales.NATURAL);
+    }
+
+    public static Chain of(Kernel kernel, Scales scales) {
+        return new Chain(kernel, scales);
+    }
+
+    /**
+     * The chain of the kernel's anomalous dimension, gamma(a) = sum gamma_n a^n with d ln O/d ln mu = prefactor x a gamma(a).
+     *
+     * @throws DomainException if the kernel has none
+     */
+    public static Chain ofAnomalousDimension(Kernel kernel) {
+        return new Chain(kernel.anomalousDimensionAsKernel(), Scales.NATURAL);
+    }
+
+    public Kernel kernel() {
+        return kernel;
+    }
+
+    public Scales scales() {
+        return scales;
+    }
+
+    /**
+     * c_0 .. c_(loops-1) in closed form.
+     *
+     * @param loops between 1 and {@link #LARGEST_EXACT_LOOPS}
+     */
+    public List<ExactConstant> exact(int loops) {
+        requireRange("the number of loops in exact form", loops, LARGEST_EXACT_LOOPS);
+        return new ExactCoefficients().coefficients(kernel, loops, scales);
+    }
+
+    /** Balls for c_0 .. c_(loops-1) at a working precision in bits. */
+    public List<Ball> balls(int loops, int bits) {
+        requireRange("the number of loops", loops, LARGEST_LOOPS);
+        return new BallCoefficients(bits).coefficients(kernel, loops, scales);
+    }
+
+    /**
+     * c_0 .. c_(loops-1) to a number of certified significant digits.
+     *
+     * <p>The working precision is raised until both ends of every ball round to the same decimal. A ball that still
+     * contains zero, or sits on a tie, is settled by the exact route where that reaches.
+     *
+     * @param loops  between 1 and {@link #LARGEST_LOOPS}
+     * @param digits between 1 and {@link #LARGEST_DIGITS}
+     */
+    public List<CertifiedNumber> certified(int loops, int digits) {
+        return certified(loops, digits, Rendering.PLAIN);
+    }
+
+    /** The same in another coupling and normalisation. */
+    public List<CertifiedNumber> certified(int loops, int digits, Rendering rendering) {
+        requireRange("the number of digits", digits, LARGEST_DIGITS);
+        int needed = (int) Math.ceil(digits * BITS_PER_DIGIT) + 2 * (32 - Integer.numberOfLeadingZeros(loops));
+        for (int guard = FIRST_GUARD_BITS; ; guard *= 2) {
+            int bits = needed + guard;
+            List<Ball> balls = rendering.applyToBalls(balls(loops, bits), bits);
+            boolean last = 2 * guard > LARGEST_GUARD_BITS;
+            boolean exactReaches = loops <= LARGEST_EXACT_LOOPS;
+            boolean stuck = guard >= 4 * FIRST_GUARD_BITS && exactReaches;
+            if (last || stuck || balls.stream().allMatch(b -> b.toDecimal(digits).isPresent())) {
+                return numbers(balls, digits, rendering, bits);
+            }
+        }
+    }
+
+    private List<CertifiedNumber> numbers(List<Ball> balls, int digits, Rendering rendering, int bits) {
+        boolean allSettled = balls.stream().allMatch(b -> b.toDecimal(digits).isPresent());
+        List<ExactConstant> exact = allSettled || balls.size() > LARGEST_EXACT_LOOPS
+                ? List.of()
+                : rendering.applyToExact(exact(balls.size()));
+        List<CertifiedNumber> numbers = new ArrayList<>();
+        for (int n = 0; n < balls.size(); n++) {
+            numbers.add(
+                    exact.isEmpty()
+                            ? CertifiedNumber.of(balls.get(n), digits)
+                            : CertifiedNumber.of(exact.get(n), balls.get(n), digits, bits));
+        }
+        return numbers;
+    }
+
+    static void requireRange(String what, int value, int largest) {
+        if (value < 1 || value > largest) {
+            throw new DomainException(what + " lies between 1 and " + largest + ", got " + value);
+        }
+    }
+}

@@ -1,0 +1,232 @@
+package bubblechain.kernel;
+
+import bubblechain.analytic.AnalyticFunction;
+import bubblechain.exact.DomainException;
+import bubblechain.exact.ExactConstant;
+import bubblechain.exact.Rational;
+import bubblechain.formula.ConstantValue;
+import bubblechain.formula.Constants;
+import bubblechain.formula.Definitions;
+import bubblechain.formula.Formula;
+import bubblechain.formula.FormulaException;
+import bubblechain.qcd.Theory;
+import bubblechain.toml.TomlSection;
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+
+/**
+ * Reads a kernel from TOML.
+ *
+ * <p>Keys: {@code name}, {@code title}, {@code quantity}, {@code scale}, {@code theory} (QCD or QED, default QCD),
+ * {@code prefactor} (formula in CF, CA, TF, nf, beta0, default CF/beta0), {@code prefactor_words},
+ * {@code mass_dimension}, {@code form}, {@code T} (form borel), {@code G} (form d-dimensional),
+ * {@code anomalous_dimension} with {@code defining_equation}, {@code heavy_quark} ("yes" or "no"), {@code series},
+ * {@code sources}, {@code cautions}, {@code [definitions]}, {@code [parameters]}, {@code [[singularity]]} (u, kind,
+ * operator, power, anomalous_dimension, source) and {@code [[check]]} (kind, n, u, power, value, kernel, source).
+ */
+final class KernelFile {
+    private static final List<String> TOP_KEYS = List.of(
+            "name", "title", "quantity", "scale", "theory", "prefactor", "prefactor_words", "mass_dimension", "form",
+            "T", "G", "anomalous_dimension", "defining_equation", "heavy_quark", "series", "sources", "cautions",
+            "definitions", "parameters", "singularity", "check");
+    private static final List<String> SINGULARITY_KEYS =
+            List.of("u", "kind", "operator", "power", "anomalous_dimension", "source");
+    private static final Set<String> PREFACTOR_NAMES = Set.of("CF", "CA", "TF", "nf", "beta0", "pi", "euler_gamma");
+
+    private final TomlSection top;
+    private final ParameterValues parameters;
+    private final Definitions definitions;
+
+    private KernelFile(TomlSection top, Map<String, Rational> parameterValues) {
+        this.top = top;
+        top.requireKnown(TOP_KEYS);
+        this.parameters = ParameterValues.read(top, parameterValues);
+        this.definitions = readDefinitions();
+    }
+
+    /**
+     * The kernel of a file.
+     *
+     * @param parameterValues values for the parameters of a family
+     * @throws bubblechain.toml.TomlException with file, line, column and reason
+     */
+    static Kernel read(TomlSection top, Map<String, Rational> parameterValues) {
+        return new KernelFile(top, parameterValues).kernel();
+    }
+
+    private Definitions readDefinitions() {
+        Definitions found = parameters.asDefinitions();
+        Optional<TomlSection> section = top.optionalTable("definitions");
+        if (section.isEmpty()) {
+            return found;
+        }
+        Set<String> taken = new HashSet<>(Set.of("u", "eps", "a", "x", "tau"));
+        for (String key : section.get().keys()) {
+            if (!Constants.isFreeName(key) || !taken.add(key) || found.contains(key)) {
+                throw section.get().error(key, "'" + key + "' cannot be the name of a definition");
+            }
+            Formula formula = section.get().formula(key, section.get().text(key));
+            try {
+                found = found.with(key, formula);
+            } catch (FormulaException e) {
+                throw section.get().rethrown(key, e);
+            }
+        }
+        return found;
+    }
+
+    private Kernel kernel() {
+        KernelForm form = oneOf("form", KernelForm::parse);
+        Theory theory = top.optionalText("theory").isPresent() ? oneOf("theory", Theory::parse) : Theory.QCD;
+        KernelFunctions functions = form == KernelForm.BOREL ? borel() : dDimensional();
+        Kernel kernel = new Kernel(
+                name(), parameters.titled(top.text("title")), top.text("quantity"),
+                top.text("scale"), theory, prefactor(), top.rational("mass_dimension"), form, functions.transform(),
+                functions.anomalousDimension(), flag("heavy_quark"), top.optionalText("series"), singularities(),
+                top.texts("sources"), top.texts("cautions"), new CheckEntries(top).read());
+        requireFinite(kernel, form == KernelForm.BOREL ? "T" : "G");
+        return kernel;
+    }
+
+    private String name() {
+        String name = top.text("name");
+        if (!name.matches("[a-z0-9]+(-[a-z0-9]+)*")) {
+            throw top.error("name", "a kernel name has lower-case letters, digits and hyphens, got '" + name + "'");
+        }
+        return name;
+    }
+
+    private <V> V oneOf(String key, java.util.function.Function<String, V> parse) {
+        String text = top.text(key);
+        try {
+            return parse.apply(text);
+        } catch (DomainException e) {
+            throw top.rethrown(key, String.valueOf(e.getMessage()), e);
+        }
+    }
+
+    private boolean flag(String key) {
+        return top.optionalText(key)
+                .map(text -> switch (text) {
+                    case "yes" -> true;
+                    case "no" -> false;
+                    default -> throw top.error(key, key + " is \"yes\" or \"no\", got \"" + text + "\"");
+                })
+                .orElse(false);
+    }
+
+    private KernelFunctions borel() {
+        refuse("G", "form \"borel\" takes T, not G");
+        Optional<AnalyticFunction> transform = optionalFunction("T", "u");
+        Optional<AnalyticFunction> anomalous = optionalFunction("anomalous_dimension", "a");
+        if (transform.isEmpty() && anomalous.isEmpty()) {
+            throw top.error("form", "form \"borel\" needs T(u), an anomalous_dimension in a, or both");
+        }
+        if (anomalous.isPresent()) {
+            top.text("defining_equation");
+        }
+        return new KernelFunctions(transform, anomalous);
+    }
+
+    private KernelFunctions dDimensional() {
+        refuse("T", "form \"d-dimensional\" takes G, not T");
+        refuse("anomalous_dimension", "form \"d-dimensional\" derives the anomalous dimension from G");
+        Formula diagram = resolved("G");
+        requireNames("G", diagram, Set.of("u", "eps"));
+        try {
+            return KernelFunctions.ofDiagram(diagram);
+        } catch (FormulaException e) {
+            throw top.rethrown("G", e);
+        }
+    }
+
+    private void refuse(String key, String reason) {
+        if (top.keys().contains(key)) {
+            throw top.error(key, reason);
+        }
+    }
+
+    private Optional<AnalyticFunction> optionalFunction(String key, String variable) {
+        if (top.optionalText(key).isEmpty()) {
+            return Optional.empty();
+        }
+        Formula formula = resolved(key);
+        requireNames(key, formula, Set.of(variable));
+        try {
+            return Optional.of(AnalyticFunction.of(formula, variable));
+        } catch (FormulaException e) {
+            throw top.rethrown(key, e);
+        }
+    }
+
+    private Formula resolved(String key) {
+        Formula formula = top.formula(key, top.text(key));
+        try {
+            return definitions.resolve(formula);
+        } catch (FormulaException e) {
+            throw top.rethrown(key, e);
+        }
+    }
+
+    private void requireNames(String key, Formula formula, Set<String> variables) {
+        for (String name : formula.names()) {
+            if (!variables.contains(name) && !Constants.isConstant(name)) {
+                throw top.error(key, "the name '" + name + "' in '" + key + "' has no meaning; variables are "
+                        + String.join(", ", new java.util.TreeSet<>(variables))
+                        + ", other names are set in [definitions] or [parameters]");
+            }
+        }
+    }
+
+    /** B(u) must be regular at u = 0: no pole but a simple one, and that one taken away by the anomalous dimension. */
+    private void requireFinite(Kernel kernel, String key) {
+        try {
+            SubtractionCheck.require(kernel);
+        } catch (FormulaException e) {
+            throw top.rethrown(key, e);
+        } catch (DomainException e) {
+            throw top.rethrown(key, String.valueOf(e.getMessage()), e);
+        }
+    }
+
+    private Prefactor prefactor() {
+        String text = top.optionalText("prefactor").orElse("CF/beta0");
+        Formula formula = top.formula("prefactor", text);
+        if (!PREFACTOR_NAMES.containsAll(formula.names())) {
+            throw top.error("prefactor", "a prefactor uses the names CF, CA, TF, nf, beta0 and pi only");
+        }
+        return new Prefactor(formula, top.optionalText("prefactor_words").orElse(text));
+    }
+
+    private List<SingularityNote> singularities() {
+        List<SingularityNote> notes = new ArrayList<>();
+        for (TomlSection entry : top.tables("singularity")) {
+            entry.requireKnown(SINGULARITY_KEYS);
+            String kind = entry.text("kind");
+            if (!kind.equals("IR") && !kind.equals("UV")) {
+                throw entry.error("kind", "a singularity is \"IR\" or \"UV\", got \"" + kind + "\"");
+            }
+            Optional<Rational> delta = entry.optionalText("anomalous_dimension").isPresent()
+                    ? Optional.of(entry.rational("anomalous_dimension"))
+                    : Optional.empty();
+            notes.add(new SingularityNote(
+                    entry.rational("u"), SingularityNote.Kind.valueOf(kind), entry.optionalText("operator"),
+                    entry.optionalText("power"), delta, entry.optionalText("source")));
+        }
+        return notes;
+    }
+
+    /** The constant an entry of a section stands for. */
+    static ExactConstant constant(TomlSection section, String key) {
+        Formula formula = section.formula(key, section.text(key));
+        try {
+            return ConstantValue.of(formula);
+        } catch (FormulaException e) {
+            throw section.rethrown(key, e);
+        }
+    }
+}

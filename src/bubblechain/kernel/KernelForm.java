@@ -1,0 +1,32 @@
+package bubblechain.kernel;
+
+import java.util.Arrays;
+import java.util.Locale;
+import java.util.stream.Collectors;
+
+/** How a kernel file gives its quantity. */
+public enum KernelForm {
+    /** T(u), the Borel transform before subtraction, and the anomalous dimension where one is needed. */
+    BOREL("borel"),
+    /** G(eps, u), the one-loop diagram in d = 4 - 2 eps with gluon index 1 + u - eps. */
+    D_DIMENSIONAL("d-dimensional");
+
+    private final String text;
+
+    KernelForm(String text) {
+        this.text = text;
+    }
+
+    /** The word in a kernel file. */
+    public String text() {
+        return text;
+    }
+
+    static KernelForm parse(String text) {
+        return Arrays.stream(values())
+                .filter(f -> f.text.equals(text.toLowerCase(Locale.ROOT)))
+                .findFirst()
+                .orElseThrow(() -> new KernelException("form '" + text + "' is not one of "
+                        + Arrays.stream(values()).map(KernelForm::text).collect(Collectors.joining(", "))));
+    }
+}

@@ -1,0 +1,77 @@
+package bubblechain.toml;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.nio.ByteBuffer;
+import java.nio.charset.CharacterCodingException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import org.tomlj.Toml;
+import org.tomlj.TomlParseError;
+import org.tomlj.TomlParseResult;
+import org.tomlj.TomlPosition;
+
+/** Opens a TOML file or resource of limited size. */
+public final class TomlFile {
+    /** Largest size of a file in bytes. */
+    public static final int LARGEST_SIZE = 1_000_000;
+    /** Deepest nesting of brackets in a file; deeper ones are refused before parsing. */
+    private static final int DEEPEST_NESTING = 50;
+
+    private TomlFile() {}
+
+    /** The top of a file. @throws TomlException if it cannot be read, is too large, or is not TOML in UTF-8 */
+    public static TomlSection read(Path path) {
+        if (Files.isDirectory(path)) {
+            throw new TomlException(path + " is a directory; name a file in it");
+        }
+        try (InputStream stream = Files.newInputStream(path)) {
+            return read(stream, path.toString());
+        } catch (IOException e) {
+            throw new TomlException("cannot read the file " + path + "; check that it exists and is readable", e);
+        }
+    }
+
+    /** The top of a stream; {@code file} names it in messages. The stream is left open. */
+    public static TomlSection read(InputStream stream, String file) throws IOException {
+        byte[] bytes = stream.readNBytes(LARGEST_SIZE + 1);
+        if (bytes.length > LARGEST_SIZE) {
+            throw new TomlException(file + ": larger than the limit of " + LARGEST_SIZE + " bytes");
+        }
+        try {
+            return parse(
+                    StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString(), file);
+        } catch (CharacterCodingException e) {
+            throw new TomlException(file + ": not a text in UTF-8", e);
+        }
+    }
+
+    /** The top of a text; {@code file} names it in messages. */
+    public static TomlSection parse(String text, String file) {
+        refuseDeepNesting(text, file);
+        TomlParseResult result = Toml.parse(text);
+        if (result.hasErrors()) {
+            TomlParseError first = result.errors().get(0);
+            TomlPosition position = first.position();
+            String reason = String.valueOf(first.getMessage()).lines().findFirst().orElse("malformed");
+            throw new TomlException(file + ", line " + position.line() + ", column " + position.column()
+                    + ": not TOML: " + reason);
+        }
+        return new TomlSection(file, "at the top of the file", result, TomlPosition.positionAt(1, 1));
+    }
+
+    private static void refuseDeepNesting(String text, String file) {
+        int depth = 0;
+        for (int k = 0; k < text.length(); k++) {
+            char c = text.charAt(k);
+            depth += c == '[' || c == '{' ? 1 : c == ']' || c == '}' ? -1 : 0;
+            if (c == '\n') {
+                depth = Math.min(depth, DEEPEST_NESTING);
+            }
+            if (depth > DEEPEST_NESTING) {
+                throw new TomlException(file + ": brackets nested deeper than " + DEEPEST_NESTING + " levels");
+            }
+        }
+    }
+}
