@@ -19,7 +19,7 @@ import org.junit.jupiter.api.Test;
 class ArchitectureTest {
     /** A package may use those before it. */
     private static final List<String> ORDER = List.of(
-            "exact", "series", "report", "formula", "analytic", "numeric", "kernel", "chain", "borel", "qcd",
+            "exact", "series", "report", "formula", "toml", "analytic", "numeric", "kernel", "chain", "borel", "qcd",
             "fixedorder", "sumrule", "forecast", "assessment", "output", "cli");
 
     private static JavaClasses classes = new ClassFileImporter().importClasses(Set.of());
@@ -93,7 +93,7 @@ class ArchitectureTest {
 
     @Test
     void onlyReadersOfFilesUseToml() {
-        checkLibrary("org.tomlj..", "kernel", "fixedorder");
+        checkLibrary("org.tomlj..", "toml", "kernel", "fixedorder");
     }
 
     @Test

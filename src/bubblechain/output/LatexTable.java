@@ -126,7 +126,7 @@ final class LatexTable {
     }
 
     private static String labelled(Fact fact) {
-        String unit = fact.unit().isBlank() ? "" : "~" + LatexText.escape(fact.unit());
+        String unit = fact.unit().isBlank() ? "" : "\\," + LatexText.escape(fact.unit());
         return LatexText.escape(fact.label()) + " " + cell(fact.value()) + unit;
     }
 

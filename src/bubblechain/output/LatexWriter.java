@@ -76,7 +76,7 @@ public final class LatexWriter implements ReportWriter {
         line(latex, "\\toprule");
         for (Fact fact : facts.facts()) {
             if (!(fact.value() instanceof Value.Absent)) {
-                String unit = fact.unit().isBlank() ? "" : "~" + LatexText.escape(fact.unit());
+                String unit = fact.unit().isBlank() ? "" : "\\," + LatexText.escape(fact.unit());
                 line(latex, LatexText.escape(fact.label()) + " & " + LatexTable.cell(fact.value()) + unit + " \\\\");
             }
         }

@@ -2,7 +2,11 @@ package bubblechain.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -171,8 +175,9 @@ class CommandFrameTest {
     }
 
     @Test
-    void anArgumentBeginningWithAnAtSignIsNotReadAsAFile() {
-        assertThat(Console.run("sample", "@etc").out()).contains("@etc");
+    void anArgumentBeginningWithAnAtSignIsNotReadAsAFile(@TempDir Path folder) throws IOException {
+        Path file = Files.writeString(folder.resolve("arguments"), "other");
+        assertThat(Console.run("sample", "@" + file, "--format=json").out()).contains("\"name\": \"@" + file);
     }
 
     @Test

@@ -14,7 +14,7 @@ import java.util.regex.Pattern;
 import org.junit.jupiter.api.Test;
 
 class LatexWriterTest extends WriterContract {
-    private static final Pattern TOKEN = Pattern.compile("\\\\(begin|end)\\{(\\w+)\\}|\\\\(?:[A-Za-z]+|.)|[{}$#^_\"|<>%]");
+    private static final Pattern TOKEN = Pattern.compile("\\\\(begin|end)\\{(\\w+)\\}|\\\\(?:[A-Za-z]+|.)|[{}$#^_\"|<>%~]");
 
     @Override
     ReportWriter writer() {
@@ -117,7 +117,7 @@ class LatexWriterTest extends WriterContract {
     @Test
     void namedValuesBecomeATable() {
         Facts facts = Facts.titled("f", "Scale").with("mu", "mu_0", Value.numeral("2.5"), "GeV");
-        assertThat(write(writer(), Report.builder("test").add(facts).build())).contains("mu\\_0 & $2.5$~GeV \\\\\n");
+        assertThat(write(writer(), Report.builder("test").add(facts).build())).contains("mu\\_0 & $2.5$\\,GeV \\\\\n");
     }
 
     @Test

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 
@@ -19,6 +20,13 @@ class ReportTest {
                 .build();
         assertThat(report.sources()).containsExactly("second", "first");
         assertThat(report.cautions()).containsExactly("c");
+    }
+
+    @Test
+    void aReportMadeWithoutTheBuilderDropsDuplicatesToo() {
+        Report report = new Report("x", Map.of(), "", List.of(), List.of("s", "s"), List.of("c", "d", "c"));
+        assertThat(report.sources()).containsExactly("s");
+        assertThat(report.cautions()).containsExactly("c", "d");
     }
 
     @Test
