@@ -23,7 +23,7 @@ final class Constants {
     }
 
     static Ball eulerGamma(int bits) {
-        return kept("Euler's constant", bits, Constants::brentMcMillan);
+        return kept("Euler's constant", bits, working -> brentMcMillan(working / 5 + 6, working + GUARD));
     }
 
     /** The value to {@code bits}, computed afresh (with a margin for later requests) if not known well enough. */
@@ -58,7 +58,7 @@ final class Constants {
      * <p>Error. floor(floor(a/b)/c) = floor(a/(bc)), so each term is less than one unit low. The sum stops when
      * x^-(2k+1) is below one unit; what is left out is below 1/(1 - x^-2) <= 4/3 units.
      */
-    private static Ball inverseTangent(int x, int scale, int sign) {
+    static Ball inverseTangent(int x, int scale, int sign) {
         BigInteger square = BigInteger.valueOf((long) x * x);
         BigInteger power = BigInteger.ONE.shiftLeft(scale).divide(BigInteger.valueOf(x));
         BigInteger sum = BigInteger.ZERO;
@@ -80,9 +80,7 @@ final class Constants {
      * cosh t >= 1 + t^2/2; I_0(x) >= (1/pi) int_0^pi e^(x(1 - t^2/2)) dt = e^x erf(pi sqrt(x/2))/sqrt(2 pi x) from
      * cos t >= 1 - t^2/2. Hence 0 < K_0/I_0 <= pi e^(-4n)/erf(pi sqrt n) < 4 e^(-4n), and e^-4 < 2^-5.
      */
-    private static Ball brentMcMillan(int bits) {
-        int working = bits + GUARD;
-        int n = working / 5 + 1;
+    static Ball brentMcMillan(int n, int working) {
         BesselSums sums = BesselSums.of(n, working);
         Ball ratio = sums.weighted.divide(sums.plain, working);
         Ball logarithm = Elementary.ln(Ball.of(n), working);
@@ -90,7 +88,7 @@ final class Constants {
     }
 
     /** The sums I and S of {@link #brentMcMillan}. */
-    private record BesselSums(Ball plain, Ball weighted) {
+    record BesselSums(Ball plain, Ball weighted) {
         /**
          * Fixed point: a_k = floor(a_(k-1) n^2/k^2), b_k = floor((b_(k-1) n^2/k + a_k)/k) with b_k for H_k a_k.
          *

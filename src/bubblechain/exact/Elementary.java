@@ -89,7 +89,7 @@ final class Elementary {
      * d <= 1/2. The computed term n is floor(term (n-1) u) / n, off by e_n <= (e_(n-1)/2 + 1)/n + 1 <= 2 units. The
      * loop ends when a term is zero; the true one is then at most 2 units and the rest at most 2 units.
      */
-    private static Ball expSeries(Ball t, int scale) {
+    static Ball expSeries(Ball t, int scale) {
         BigInteger u = t.fixed(scale);
         BigInteger term = BigInteger.ONE.shiftLeft(scale);
         BigInteger sum = term;
@@ -167,7 +167,7 @@ final class Elementary {
     }
 
     /** ln(1 + d) = d - d^2/2 + d^3/3 with an error of at most d^4/(4 (1 - |d|)) <= d^4/2 for |d| <= 1/2. */
-    private static Ball lnOnePlus(Ball d, int bits) {
+    static Ball lnOnePlus(Ball d, int bits) {
         Magnitude size = d.upperBound();
         if (size.compareTo(Magnitude.powerOfTwo(-1)) > 0) {
             throw new PrecisionException("the start of a logarithm is not close enough; raise the precision");

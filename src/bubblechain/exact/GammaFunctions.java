@@ -103,7 +103,7 @@ final class GammaFunctions {
     }
 
     /** ln Gamma(z) = (z - 1/2) ln z - z + ln(2 pi)/2 + sum_k B_2k/(2k (2k-1) z^(2k-1)). */
-    private static Ball stirling(Ball z, int bits) {
+    static Ball stirling(Ball z, int bits) {
         Ball inverse = z.inverse(bits);
         Ball correction = decreasingSeries(
                 inverse, inverse, bits, k -> Bernoulli.number(2 * k).divide(2L * k * (2L * k - 1)));

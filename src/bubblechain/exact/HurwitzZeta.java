@@ -87,7 +87,7 @@ final class HurwitzZeta {
     }
 
     /** c_1, ..., c_(M+1): up to the one whose term for s = last is small enough, or the least there is. */
-    private static List<Ball> coefficients(Ball z, int last, int working) {
+    static List<Ball> coefficients(Ball z, int last, int working) {
         List<Ball> result = new ArrayList<>();
         Ball inverse = z.inverse(working);
         Ball square = inverse.multiply(inverse, working);
@@ -109,7 +109,7 @@ final class HurwitzZeta {
     }
 
     /** z^s zeta(s, z), by Horner's rule; the last coefficient bounds the remainder. */
-    private static Ball tail(Ball z, int s, List<Ball> coefficients, int working) {
+    static Ball tail(Ball z, int s, List<Ball> coefficients, int working) {
         int used = coefficients.size() - 1;
         Ball sum = Ball.ZERO;
         Magnitude rising = Magnitude.of(s);

@@ -8,12 +8,6 @@ final class Polylogarithm {
 
     private Polylogarithm() {}
 
-    /**
-     * Fixed point with p_k = p_(k-1) x cut to an integer.
-     *
-     * <p>Error. p_k is off by e_k <= e_(k-1)/2 + 1 <= 2 units, the term p_k/k^s by at most 3. The sum stops at the first
-     * p_k = 0; the true power is then at most 2 units and the rest, itself included, at most 2/(1 - 1/2) = 4 units.
-     */
     static Ball of(int s, Rational x, int bits) {
         if (s < 1) {
             throw new DomainException("the polylogarithm of order " + s + " is not provided; the order must be from 1");
@@ -26,6 +20,16 @@ final class Polylogarithm {
         }
         // the value is at least |x|/2: as many bits more as x has zeros after the point
         int scale = bits + GUARD + (int) Math.max(0, Magnitude.ofRational(x.inverse()).exponent());
+        return fixedPointSum(s, x, scale).round(bits);
+    }
+
+    /**
+     * Fixed point with p_k = p_(k-1) x cut to an integer.
+     *
+     * <p>Error. p_k is off by e_k <= e_(k-1)/2 + 1 <= 2 units, the term p_k/k^s by at most 3. The sum stops at the first
+     * p_k = 0; the true power is then at most 2 units and the rest, itself included, at most 2/(1 - 1/2) = 4 units.
+     */
+    static Ball fixedPointSum(int s, Rational x, int scale) {
         BigInteger power = BigInteger.ONE.shiftLeft(scale);
         BigInteger sum = BigInteger.ZERO;
         int k = 0;
@@ -36,6 +40,6 @@ final class Polylogarithm {
             boolean small = (double) s * (31 - Integer.numberOfLeadingZeros(k)) > power.bitLength();
             sum = small ? sum : sum.add(power.divide(BigInteger.valueOf(k).pow(s)));
         }
-        return Ball.ofFixed(sum, scale, 3L * k + 4).round(bits);
+        return Ball.ofFixed(sum, scale, 3L * k + 4);
     }
 }

@@ -94,7 +94,7 @@ final class Trigonometric {
      * first - first u^2/((offset+1)(offset+2)) + ...; the bound is found at {@link #sineOfSmall}. For the cosine the
      * first step divides by 2: e_1 <= (0 + 2)/2 + 1 = 2, then e_n <= (0.81 * 2 + 2)/12 + 1 <= 2.
      */
-    private static Ball alternating(BigInteger first, BigInteger u, int offset, int scale) {
+    static Ball alternating(BigInteger first, BigInteger u, int offset, int scale) {
         BigInteger square = u.multiply(u).shiftRight(scale);
         BigInteger term = first;
         BigInteger sum = first;

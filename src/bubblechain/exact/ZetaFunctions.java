@@ -30,7 +30,7 @@ final class ZetaFunctions {
         }
         return k % 2 == 0 && k <= LARGEST_BERNOULLI_INDEX
                 ? fromBernoulli(k, bits)
-                : alternatingSums(k, k, 2, bits)[0].round(bits);
+                : alternatingSums(k, k, terms(bits), bits + GUARD)[0].round(bits);
     }
 
     static Ball[] table(int max, int bits) {
@@ -77,8 +77,9 @@ final class ZetaFunctions {
             factor = factor.multiply(square, working).divide(Rational.of((long) k * (k - 1)), working);
             table[k] = factor.multiply(Bernoulli.number(k).abs(), bits + 4);
         }
-        fill(table, alternatingSums(3, max, 2, bits), 3);
-        fill(table, alternatingSums(LARGEST_BERNOULLI_INDEX + 2, max, 2, bits), LARGEST_BERNOULLI_INDEX + 2);
+        fill(table, alternatingSums(3, max, terms(bits), working), 3);
+        int even = LARGEST_BERNOULLI_INDEX + 2;
+        fill(table, alternatingSums(even, max, terms(bits), working), even);
         return table;
     }
 
@@ -102,7 +103,7 @@ final class ZetaFunctions {
     }
 
     /**
-     * zeta(first), zeta(first + step), ..., up to {@code last}; empty if first > last.
+     * zeta(first), zeta(first + 2), ..., up to {@code last}, from n terms; empty if first > last.
      *
      * <p>P. Borwein, "An efficient algorithm for the Riemann zeta function" (2000), algorithm 2: with
      * d_k = sum_{i<=k} t_i, t_i = n (n+i-1)! 4^i/((n-i)! (2i)!), and eta(s) = (1 - 2^(1-s)) zeta(s),
@@ -113,19 +114,17 @@ final class ZetaFunctions {
      * d_n - d_k are exact, times 2^spare; floor(floor(a/b)/c) = floor(a/(bc)), so each term is less than one unit low.
      * Sum of both: n + 2^spare units of 1/(d_n 2^spare).
      */
-    private static Ball[] alternatingSums(int first, int last, int step, int bits) {
+    static Ball[] alternatingSums(int first, int last, int n, int working) {
         if (first > last) {
             return new Ball[0];
         }
-        int working = bits + GUARD;
-        int n = 2 * working / 5 + 2;
         int spare = 32 - Integer.numberOfLeadingZeros(n);
         BigInteger[] weights = suffixSums(n);
-        BigInteger[] sums = new BigInteger[(last - first) / step + 1];
+        BigInteger[] sums = new BigInteger[(last - first) / 2 + 1];
         Arrays.fill(sums, BigInteger.ZERO);
         for (int k = 0; k < n; k++) {
             BigInteger base = BigInteger.valueOf(k + 1L);
-            BigInteger divisor = base.pow(step);
+            BigInteger divisor = base.multiply(base);
             BigInteger weight = weights[k + 1].shiftLeft(spare);
             // the first power may be far longer than the weight: then every term is below one unit
             BigInteger term = (double) first * (base.bitLength() - 1) > weight.bitLength()
@@ -141,9 +140,14 @@ final class ZetaFunctions {
         Ball[] result = new Ball[sums.length];
         for (int i = 0; i < sums.length; i++) {
             Ball eta = Ball.of(sums[i]).addError(error).divide(scale, working);
-            result[i] = fromEta(eta, first + step * i, working).round(bits + 4);
+            result[i] = fromEta(eta, first + 2 * i, working);
         }
         return result;
+    }
+
+    /** So many that 1/d_n < 2^(1 - 5n/2) is below 2^-(bits + GUARD). */
+    private static int terms(int bits) {
+        return 2 * (bits + GUARD) / 5 + 2;
     }
 
     /** Entry i is t_i + ... + t_n, which is d_n - d_(i-1); from t_(i+1)/t_i = 4 (n+i)(n-i)/((2i+1)(2i+2)), t_0 = 1. */
