@@ -8,6 +8,13 @@ final class Subcommands {
 
     /** A new instance of each command. */
     static List<ReportCommand> all() {
-        return List.of();
+        return List.of(
+                new KernelsCommand(),
+                new CoefficientsCommand(),
+                new PolesCommand(),
+                new ResidueCommand(),
+                new CrosscheckCommand(),
+                new AssessCommand(),
+                new ValidateCommand());
     }
 }

@@ -25,10 +25,8 @@ public final class ConstantFunctions {
         if (q.isPresent() && q.get().isInteger()) {
             return base.power(limited(q.get()).intValueExact());
         }
-        if (q.isPresent() && base.asRational().isPresent()) {
-            return ExactFunctions.power(base.asRational().get(), limited(q.get()));
-        }
-        return base.ln().multiply(exponent).exp();
+        Optional<ExactConstant> closed = q.flatMap(r -> base.rationalPower(limited(r)));
+        return closed.orElseGet(() -> base.ln().multiply(exponent).exp());
     }
 
     /** Gamma(z). @throws DomainException at a pole */

@@ -217,6 +217,31 @@ public final class ExactConstant {
     }
 
     /**
+     * This to a rational power in canonical form: for a positive rational times powers of pi, primes and exponentials whose
+     * power of pi stays a multiple of 1/2.
+     */
+    Optional<ExactConstant> rationalPower(Rational q) {
+        if (terms.size() != 1) {
+            return Optional.empty();
+        }
+        Map.Entry<Monomial, Rational> only = terms.entrySet().iterator().next();
+        Monomial monomial = only.getKey();
+        Rational halfPi = q.multiply(monomial.halfPi());
+        if (monomial.hasGenerators() || only.getValue().signum() <= 0 || !halfPi.isInteger()) {
+            return Optional.empty();
+        }
+        ExactConstant result = ExactFunctions.power(only.getValue(), q)
+                .multiply(of(Monomial.piPower(halfPi.intValueExact()), Rational.ONE))
+                .multiply(of(
+                        Monomial.exp(monomial.exponent().multiply(q), monomial.eulerExponent().multiply(q)),
+                        Rational.ONE));
+        for (Map.Entry<BigInteger, Rational> root : monomial.roots().entrySet()) {
+            result = result.multiply(ExactFunctions.primePower(root.getKey(), root.getValue().multiply(q)));
+        }
+        return Optional.of(result);
+    }
+
+    /**
      * The natural logarithm: split into the logarithms of the factors if this is a single positive product.
      *
      * @throws DomainException if the constant is not positive

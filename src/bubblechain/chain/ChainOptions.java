@@ -1,0 +1,154 @@
+package bubblechain.chain;
+
+import bubblechain.exact.DomainException;
+import bubblechain.exact.ExactConstant;
+import bubblechain.exact.Rational;
+import bubblechain.formula.ConstantValue;
+import bubblechain.formula.Formula;
+import bubblechain.kernel.Kernel;
+import bubblechain.qcd.Coupling;
+import bubblechain.qcd.Normalisation;
+import bubblechain.qcd.Theory;
+import java.util.Optional;
+import java.util.OptionalInt;
+
+/**
+ * How a chain is expanded: scales, coupling, normalisation, scheme and flavours, as the user states them.
+ *
+ * @param muOverScale         scale of the coupling over the kernel's scale; a constant of the formula language
+ * @param operatorMuOverScale scale of the operator over the kernel's scale
+ * @param coupling            expansion parameter
+ * @param normalisation       what is taken out of the coefficients
+ * @param scheme              scheme of the coupling
+ * @param nf                  massless flavours in the bubbles
+ * @param couplingFlavours    flavours of the coupling; nf, or nf + 1 for a heavy-quark quantity
+ */
+public record ChainOptions(
+        String muOverScale,
+        String operatorMuOverScale,
+        Coupling coupling,
+        Normalisation normalisation,
+        Scheme scheme,
+        OptionalInt nf,
+        OptionalInt couplingFlavours) {
+    /** Largest number of massless flavours. */
+    public static final int LARGEST_NF = 16;
+
+    /** mu = scale, coupling a, prefactor taken out, MS-bar. */
+    public static final ChainOptions DEFAULT = new ChainOptions(
+            "1", "1", Coupling.A, Normalisation.PREFACTOR, Scheme.MSBAR, OptionalInt.empty(), OptionalInt.empty());
+
+    public ChainOptions {
+        nf.ifPresent(ChainOptions::requireFlavours);
+        couplingFlavours.ifPresent(ChainOptions::requireFlavours);
+    }
+
+    /** The same with another scale of the coupling. */
+    public ChainOptions withMu(String value) {
+        return new ChainOptions(value, operatorMuOverScale, coupling, normalisation, scheme, nf, couplingFlavours);
+    }
+
+    private static void requireFlavours(int nf) {
+        if (nf < 0 || nf > LARGEST_NF) {
+            throw new DomainException("the number of flavours lies between 0 and " + LARGEST_NF + ", got " + nf);
+        }
+    }
+
+    /** The logarithms of the two scales. @throws DomainException if a ratio is not positive or flavours do not fit */
+    public Scales scales(Kernel kernel) {
+        Scales scales = Scales.of(ratio("--mu-over-scale", muOverScale), ratio("--operator-mu-over-scale", operatorMuOverScale));
+        if (!scales.operatorLog().isZero() && (kernel.anomalousDimension().isEmpty() || kernel.isAnomalousDimension())) {
+            throw new DomainException("the kernel " + kernel.name() + " has no operator to renormalise;"
+                    + " --operator-mu-over-scale must stay 1");
+        }
+        Scales flavoured = countsHeavyQuark(kernel) ? scales.withHeavyFlavour(kernel, nf.getAsInt()) : scales;
+        return scheme == Scheme.V ? flavoured.withVCoupling() : flavoured;
+    }
+
+    /** A positive constant of the formula language. */
+    public static ExactConstant ratio(String option, String text) {
+        ExactConstant value = ConstantValue.of(Formula.parse(text));
+        boolean positive = value.asRational()
+                .map(q -> q.signum() > 0)
+                .orElseGet(() -> value.toBall(128).isPositive());
+        if (!positive) {
+            throw new DomainException(option + " must be positive, got " + text);
+        }
+        return value;
+    }
+
+    private boolean countsHeavyQuark(Kernel kernel) {
+        if (couplingFlavours.isEmpty() || nf.isPresent() && nf.getAsInt() == couplingFlavours.getAsInt()) {
+            return false;
+        }
+        if (nf.isEmpty()) {
+            throw new DomainException("--coupling-nf needs --nf, the number of massless flavours in the bubbles");
+        }
+        if (!kernel.heavyQuark()) {
+            throw new DomainException("the kernel " + kernel.name() + " has no heavy quark;"
+                    + " --coupling-nf must be equal to --nf");
+        }
+        if (couplingFlavours.getAsInt() != nf.getAsInt() + 1) {
+            throw new DomainException("--coupling-nf is --nf or --nf plus the heavy quark, " + nf.getAsInt() + " or "
+                    + (nf.getAsInt() + 1) + ", got " + couplingFlavours.getAsInt());
+        }
+        requireBeta0(kernel);
+        return true;
+    }
+
+    private void requireBeta0(Kernel kernel) {
+        if (kernel.theory().beta0(nf.getAsInt()).isZero()) {
+            throw new DomainException("beta0 is zero for nf = " + nf.getAsInt());
+        }
+    }
+
+    /** How the coefficients are shown. */
+    public Rendering rendering(Kernel kernel) {
+        return Rendering.of(kernel, coupling, normalisation, nf);
+    }
+
+    /** The scale of the coupling in words, such as "2 m". */
+    public String scaleWords(Kernel kernel) {
+        return scaled(muOverScale, kernel.scale());
+    }
+
+    private static String scaled(String ratio, String scale) {
+        Optional<Rational> value = ConstantValue.of(Formula.parse(ratio)).asRational();
+        if (value.isPresent() && value.get().equals(Rational.ONE)) {
+            return scale;
+        }
+        String factor = value.map(Rational::toString).orElse(ratio);
+        boolean plain = factor.matches("[0-9a-z(]+[0-9a-z_(),]*\\)?");
+        if (scale.startsWith("1/")) {
+            return (plain ? factor : "(" + factor + ")") + scale.substring(1);
+        }
+        return (plain ? factor : "(" + factor + ")") + " " + scale;
+    }
+
+    /** The coupling in words, such as "alpha_s^(4)(2 m)/pi". */
+    public String couplingWords(Kernel kernel) {
+        Theory theory = kernel.theory();
+        String flavours = couplingFlavours.isPresent()
+                ? Integer.toString(couplingFlavours.getAsInt())
+                : nf.isPresent() ? Integer.toString(nf.getAsInt()) : "nf";
+        String schemeMark = scheme == Scheme.V ? ",V" : "";
+        String symbol = theory.coupling() + "^(" + flavours + schemeMark + ")(" + scaleWords(kernel) + ")";
+        return coupling.words().replace("alpha_s", symbol);
+    }
+
+    /** The whole convention in one sentence: what is expanded, in what, and what the numbers multiply. */
+    public String words(Kernel kernel) {
+        String expansion = coupling == Coupling.A ? "a" : "x";
+        String meaning = coupling == Coupling.A
+                ? couplingWords(kernel)
+                : "x = " + couplingWords(kernel);
+        String front = normalisation == Normalisation.FULL
+                ? ""
+                : normalisation == Normalisation.FIRST ? "(first coefficient) " : kernel.prefactor().words() + " ";
+        String operator = operatorMuOverScale.equals("1") || kernel.anomalousDimension().isEmpty()
+                ? ""
+                : "; operator renormalised at " + scaled(operatorMuOverScale, kernel.scale());
+        return kernel.quantity() + " = " + front + "sum_{n>=0} c_n " + expansion + "^(n+1), " + meaning + operator
+                + ", large-beta0 limit" + (scheme == Scheme.V ? ", V-scheme coupling" : ", MS-bar coupling");
+    }
+}
