@@ -153,8 +153,9 @@ public record PerturbativeSeries(
      */
     public List<ExactConstant> flavourCoefficients(int loops) {
         Formula value = coefficient(loops).value();
-        return FlavourPolynomial.coefficients(nf -> evaluate(value, nf), loops).orElseThrow(() -> new DomainException(
-                "coefficient " + loops + " of series '" + name + "' is not a polynomial in nf of degree " + loops + " or less"));
+        return FlavourPolynomial.coefficients(nf -> evaluate(value, nf), loops)
+                .orElseThrow(() -> new DomainException("coefficient " + loops + " of series '" + name
+                        + "' is not a polynomial in nf of degree " + loops + " or less"));
     }
 
     /** The coefficient of nf^(n-1) in c_n, which a bubble chain reproduces. */

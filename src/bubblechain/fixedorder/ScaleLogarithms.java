@@ -20,7 +20,7 @@ import java.util.List;
  */
 public final class ScaleLogarithms<C> {
     private final CoefficientRing<C> ring;
-    /** Entry n - 1 holds a_{n,0} .. a_{n,n-1}, or one more if the series starts at y^s with s not zero. */
+    /** Entry n - 1 holds a_{n,0} .. a_{n,n-1}. */
     private final List<List<C>> table;
 
     private ScaleLogarithms(CoefficientRing<C> ring, List<List<C>> table) {
@@ -54,7 +54,7 @@ public final class ScaleLogarithms<C> {
         C sum = ring.constant(Rational.ZERO);
         for (int j = 0; j < beta.size() && n - 1 - j >= 1; j++) {
             List<C> earlier = table.get(n - 2 - j);
-            if (m < earlier.size()) {
+            if (m < earlier.size()) { // a_{n,m} = 0 for m >= n
                 C product = ring.multiply(beta.get(j), earlier.get(m));
                 sum = ring.add(sum, ring.multiply(product, shift.add(n - 1 - j)));
             }

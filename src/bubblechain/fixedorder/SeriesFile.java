@@ -22,6 +22,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.Function;
 import org.tomlj.Toml;
 import org.tomlj.TomlParseError;
 import org.tomlj.TomlParseResult;
@@ -99,7 +100,8 @@ public final class SeriesFile {
         Set<String> known = new HashSet<>(Set.of("nf"));
         for (String key : section.keys()) {
             if (!Constants.isFreeName(key) || !known.add(key)) {
-                throw section.error(key, "'" + key + "' cannot be the name of a definition; use a plain word without meaning");
+                throw section.error(
+                        key, "'" + key + "' cannot be the name of a definition; use a plain word without meaning");
             }
             Formula formula = section.formula(key, section.text(key));
             try {
@@ -149,7 +151,7 @@ public final class SeriesFile {
         };
     }
 
-    private <T> T named(String key, java.util.function.Function<String, T> parser) {
+    private <T> T named(String key, Function<String, T> parser) {
         String text = top.text(key);
         try {
             return parser.apply(text);

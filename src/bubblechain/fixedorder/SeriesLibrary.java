@@ -48,7 +48,9 @@ public final class SeriesLibrary {
         }
         List<String> nearest = NearestNames.of(nameOrPath, names());
         throw new DomainException("there is no series '" + nameOrPath + "'; "
-                + (nearest.isEmpty() ? "known are " + String.join(", ", names()) : "did you mean " + String.join(" or ", nearest) + "?")
+                + (nearest.isEmpty()
+                        ? "known are " + String.join(", ", names()) + "."
+                        : "did you mean " + String.join(" or ", nearest) + "?")
                 + " A path to a series file works too.");
     }
 

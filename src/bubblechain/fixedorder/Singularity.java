@@ -49,8 +49,8 @@ public record Singularity(
     public Optional<Rational> exponentShift(int nf) {
         return exponentShift.map(formula -> ConstantValue.of(formula, flavours(nf))
                 .asRational()
-                .orElseThrow(() -> new DomainException("the exponent shift '" + formula.print() + "' of the singularity at u = "
-                        + position + " must be a rational number")));
+                .orElseThrow(() -> new DomainException("the exponent shift '" + formula.print()
+                        + "' of the singularity at u = " + position + " must be a rational number")));
     }
 
     /** C_1, C_2, ... at a flavour number. */
