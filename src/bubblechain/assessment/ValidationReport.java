@@ -28,6 +28,14 @@ public final class ValidationReport {
                 .build();
     }
 
+    /** True if the report of a validation counts no failure. */
+    public static boolean allPassed(Report report) {
+        return report.blocks().stream()
+                .filter(Facts.class::isInstance)
+                .flatMap(block -> ((Facts) block).facts().stream())
+                .noneMatch(fact -> fact.key().equals("failed") && !fact.value().equals(Value.count(0)));
+    }
+
     private static long count(List<Validation.Finding> findings, boolean passed) {
         return findings.stream().filter(f -> f.passed() == passed).count();
     }

@@ -1,14 +1,7 @@
 package bubblechain.cli;
 
-import bubblechain.assessment.AssessmentReport;
-import bubblechain.exact.Rational;
-import bubblechain.fixedorder.PerturbativeSeries;
-import bubblechain.fixedorder.SeriesLibrary;
-import bubblechain.kernel.Kernel;
-import bubblechain.kernel.KernelLibrary;
 import bubblechain.report.Report;
 import java.util.List;
-import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -21,31 +14,31 @@ import picocli.CommandLine.Parameters;
                 + " from the published series beside its chain value.")
 final class AssessCommand extends ReportCommand {
     @Parameters(index = "0", paramLabel = "NAME", description = "a built-in quantity, or path of a kernel file")
-    private String name = "";
+    String name = "";
 
     @Option(
             names = "--nf",
             paramLabel = "N",
             defaultValue = "3",
             description = "massless flavours (nl for heavy quarks); default ${DEFAULT-VALUE}")
-    private int nf;
+    int nf;
 
     @Option(
             names = "--loops",
             paramLabel = "L",
             defaultValue = "10",
             description = "terms of the chain shown; default ${DEFAULT-VALUE}")
-    private int loops;
+    int loops;
 
     @Option(
             names = "--range",
             paramLabel = "U",
             defaultValue = "3",
             description = "poles are shown for -U <= u <= U; default ${DEFAULT-VALUE}")
-    private String range = "3";
+    String range = "3";
 
     @Option(names = "--series", paramLabel = "FILE", description = "published series; default: the one the kernel names")
-    private @Nullable String series;
+    @Nullable String series;
 
     @Override
     List<Example> examples() {
@@ -54,11 +47,6 @@ final class AssessCommand extends ReportCommand {
 
     @Override
     Report report() {
-        Kernel kernel = KernelLibrary.load(name);
-        Optional<PerturbativeSeries> published = series == null
-                ? kernel.series().flatMap(SeriesLibrary::builtIn)
-                : Optional.of(SeriesLibrary.find(series));
-        Rational reach = ScaleOptions.rational("--range", range);
-        return AssessmentReport.of(kernel, published, nf, loops, reach);
+        return Answers.assess(this);
     }
 }

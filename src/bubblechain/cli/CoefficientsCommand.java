@@ -1,11 +1,5 @@
 package bubblechain.cli;
 
-import bubblechain.chain.ChainOptions;
-import bubblechain.chain.CoefficientReport;
-import bubblechain.kernel.Kernel;
-import bubblechain.kernel.KernelLibrary;
-import bubblechain.qcd.Coupling;
-import bubblechain.qcd.Normalisation;
 import bubblechain.report.Report;
 import java.util.List;
 import picocli.CommandLine.Command;
@@ -20,32 +14,32 @@ import picocli.CommandLine.Parameters;
                 + " or in closed form.")
 final class CoefficientsCommand extends ReportCommand {
     @Parameters(index = "0", paramLabel = "KERNEL", description = "built-in name, or path of a kernel file")
-    private String name = "";
+    String name = "";
 
     @Option(
             names = "--loops",
             paramLabel = "L",
             defaultValue = "10",
             description = "number of terms, 1 = one loop; default ${DEFAULT-VALUE}")
-    private int loops;
+    int loops;
 
     @Option(
             names = "--digits",
             paramLabel = "P",
             defaultValue = "20",
             description = "significant digits, all of them correct; default ${DEFAULT-VALUE}")
-    private int digits;
+    int digits;
 
     @Option(names = "--exact", description = "closed forms as well")
-    private boolean exact;
+    boolean exact;
 
     @Option(names = "--nf-terms", description = "the nf^n terms of the full series in (alpha/pi)^(n+1) as well")
-    private boolean flavourTerms;
+    boolean flavourTerms;
 
     @Option(
             names = "--anomalous-dimension",
             description = "the anomalous dimension of the kernel's operator instead, d ln O/d ln mu")
-    private boolean anomalousDimension;
+    boolean anomalousDimension;
 
     @Option(
             names = "--coupling",
@@ -53,7 +47,7 @@ final class CoefficientsCommand extends ReportCommand {
             defaultValue = "a",
             description = "expansion parameter: a (beta0 alpha/(4 pi)), alpha, alpha/pi, alpha/4pi;"
                     + " default ${DEFAULT-VALUE}")
-    private String coupling = "a";
+    String coupling = "a";
 
     @Option(
             names = "--normalise",
@@ -61,10 +55,10 @@ final class CoefficientsCommand extends ReportCommand {
             defaultValue = "prefactor",
             description = "prefactor (c_n), full (coefficient in the quantity), first (c_n/c_0);"
                     + " default ${DEFAULT-VALUE}")
-    private String normalise = "prefactor";
+    String normalise = "prefactor";
 
     @Mixin
-    private ScaleOptions scales = new ScaleOptions();
+    ScaleOptions scales = new ScaleOptions();
 
     @Override
     List<Example> examples() {
@@ -77,10 +71,6 @@ final class CoefficientsCommand extends ReportCommand {
 
     @Override
     Report report() {
-        ChainOptions options = scales.options(Coupling.parse(coupling), Normalisation.parse(normalise));
-        Kernel kernel = KernelLibrary.load(name, scales.parameters());
-        return CoefficientReport.of(
-                anomalousDimension ? kernel.anomalousDimensionAsKernel() : kernel, options, loops, digits, exact,
-                flavourTerms);
+        return Answers.coefficients(this);
     }
 }

@@ -1,7 +1,5 @@
 package bubblechain.cli;
 
-import bubblechain.kernel.KernelLibrary;
-import bubblechain.kernel.KernelReport;
 import bubblechain.report.Report;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
@@ -17,10 +15,10 @@ final class KernelsCommand extends ReportCommand {
             arity = "0..1",
             paramLabel = "NAME",
             description = "a built-in name, or path of a kernel file; without it all are listed")
-    private @Nullable String name;
+    @Nullable String name;
 
     @Option(names = "--search", paramLabel = "WORD", defaultValue = "", description = "list only kernels with this word")
-    private String search = "";
+    String search = "";
 
     @Override
     List<Example> examples() {
@@ -30,6 +28,6 @@ final class KernelsCommand extends ReportCommand {
 
     @Override
     Report report() {
-        return name == null ? KernelReport.list(search) : KernelReport.describe(KernelLibrary.load(name));
+        return name == null ? Answers.kernels(search) : Answers.kernel(name);
     }
 }

@@ -1,9 +1,5 @@
 package bubblechain.cli;
 
-import bubblechain.borel.PolesReport;
-import bubblechain.chain.ChainOptions;
-import bubblechain.kernel.Kernel;
-import bubblechain.kernel.KernelLibrary;
 import bubblechain.report.Report;
 import java.util.List;
 import picocli.CommandLine.Command;
@@ -18,38 +14,38 @@ import picocli.CommandLine.Parameters;
                 + " correction, and their share in one coefficient with the exact remainder.")
 final class PolesCommand extends ReportCommand {
     @Parameters(index = "0", paramLabel = "KERNEL", description = "built-in name, or path of a kernel file")
-    private String name = "";
+    String name = "";
 
     @Option(
             names = "--from",
             paramLabel = "U",
             defaultValue = "-3",
             description = "lower end, inclusive; a rational such as -5/2; default ${DEFAULT-VALUE}")
-    private String from = "-3";
+    String from = "-3";
 
     @Option(
             names = "--to",
             paramLabel = "U",
             defaultValue = "3",
             description = "upper end, inclusive; default ${DEFAULT-VALUE}")
-    private String to = "3";
+    String to = "3";
 
     @Option(
             names = "--digits",
             paramLabel = "P",
             defaultValue = "20",
             description = "significant digits of the values; default ${DEFAULT-VALUE}")
-    private int digits;
+    int digits;
 
     @Option(
             names = "--share-of",
             paramLabel = "n",
             defaultValue = "10",
             description = "the coefficient c_n whose make-up is shown; default ${DEFAULT-VALUE}")
-    private int shareOf;
+    int shareOf;
 
     @Mixin
-    private ScaleOptions scales = new ScaleOptions();
+    ScaleOptions scales = new ScaleOptions();
 
     @Override
     List<Example> examples() {
@@ -58,10 +54,6 @@ final class PolesCommand extends ReportCommand {
 
     @Override
     Report report() {
-        ChainOptions options = scales.options();
-        Kernel kernel = KernelLibrary.load(name, scales.parameters());
-        return PolesReport.of(
-                kernel, options, ScaleOptions.rational("--from", from), ScaleOptions.rational("--to", to),
-                digits, shareOf);
+        return Answers.poles(this);
     }
 }

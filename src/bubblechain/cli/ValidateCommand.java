@@ -1,7 +1,5 @@
 package bubblechain.cli;
 
-import bubblechain.assessment.Validation;
-import bubblechain.assessment.ValidationReport;
 import bubblechain.report.Report;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
@@ -18,9 +16,7 @@ final class ValidateCommand extends ReportCommand {
             arity = "0..1",
             paramLabel = "PATH",
             description = "a file, a folder, or a built-in name; without it the whole library")
-    private @Nullable String path;
-
-    private boolean failed;
+    @Nullable String path;
 
     @Override
     List<Example> examples() {
@@ -29,13 +25,11 @@ final class ValidateCommand extends ReportCommand {
 
     @Override
     Report report() {
-        List<Validation.Finding> findings = path == null ? Validation.library() : Validation.of(path);
-        failed = findings.stream().anyMatch(f -> !f.passed());
-        return ValidationReport.of(path == null ? "library" : path, findings);
+        return Answers.validate(path);
     }
 
     @Override
     int status(Report report) {
-        return failed ? ExitStatus.NOT_COMPUTED : ExitStatus.DONE;
+        return Answers.allPassed(report) ? ExitStatus.DONE : ExitStatus.NOT_COMPUTED;
     }
 }

@@ -1,0 +1,158 @@
+package bubblechain.cli;
+
+import bubblechain.assessment.AssessmentReport;
+import bubblechain.assessment.ChainSumRule;
+import bubblechain.assessment.CrossCheck;
+import bubblechain.assessment.CrossCheckReport;
+import bubblechain.assessment.Validation;
+import bubblechain.assessment.ValidationReport;
+import bubblechain.borel.PolesReport;
+import bubblechain.chain.ChainOptions;
+import bubblechain.chain.CoefficientReport;
+import bubblechain.chain.Scheme;
+import bubblechain.exact.DomainException;
+import bubblechain.exact.Rational;
+import bubblechain.fixedorder.PerturbativeSeries;
+import bubblechain.fixedorder.SeriesLibrary;
+import bubblechain.kernel.Kernel;
+import bubblechain.kernel.KernelLibrary;
+import bubblechain.kernel.KernelReport;
+import bubblechain.qcd.Coupling;
+import bubblechain.qcd.Normalisation;
+import bubblechain.report.Report;
+import bubblechain.sumrule.ResidueReport;
+import bubblechain.sumrule.SumRule;
+import bubblechain.sumrule.SumRuleRequest;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalInt;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * What each command asks the library for. It stands apart from the command classes so that those, which are all made at
+ * every start, pull in nothing that another command does not need.
+ */
+final class Answers {
+    private static final int CHAIN_TERMS = 10;
+
+    private Answers() {}
+
+    static Report kernels(String search) {
+        return KernelReport.list(search);
+    }
+
+    static Report kernel(String name) {
+        return KernelReport.describe(KernelLibrary.load(name));
+    }
+
+    static Report coefficients(CoefficientsCommand c) {
+        ChainOptions options = options(c.scales, Coupling.parse(c.coupling), Normalisation.parse(c.normalise));
+        Kernel kernel = KernelLibrary.load(c.name, parameters(c.scales));
+        return CoefficientReport.of(
+                c.anomalousDimension ? kernel.anomalousDimensionAsKernel() : kernel, options, c.loops, c.digits, c.exact,
+                c.flavourTerms);
+    }
+
+    static Report poles(PolesCommand c) {
+        ChainOptions options = options(c.scales, Coupling.A, Normalisation.PREFACTOR);
+        Kernel kernel = KernelLibrary.load(c.name, parameters(c.scales));
+        return PolesReport.of(
+                kernel, options, rational("--from", c.from), rational("--to", c.to), c.digits, c.shareOf);
+    }
+
+    static Report residue(ResidueCommand c) {
+        SumRuleRequest request = c.chain ? chainRequest(c) : seriesRequest(c);
+        return ResidueReport.of(SumRule.evaluate(request));
+    }
+
+    private static SumRuleRequest seriesRequest(ResidueCommand c) {
+        if (c.removeNearer) {
+            throw new DomainException("--remove-nearer needs --chain: only there are the residues of nearer poles exact");
+        }
+        if (SeriesLibrary.builtIn(c.name).isEmpty() && KernelLibrary.contains(c.name)) {
+            throw new DomainException("no published series of '" + c.name + "' is built in; give the path of a series file,"
+                    + " or --chain to probe its bubble chain");
+        }
+        SumRuleRequest.Builder builder = SumRuleRequest.forSeries(SeriesLibrary.find(c.name), c.nf);
+        optionalRational("--power", c.power).ifPresent(builder::power);
+        optionalRational("--exponent-shift", c.exponentShift).ifPresent(builder::exponentShift);
+        optional(c.loops).ifPresent(builder::loops);
+        optional(c.betaLoops).ifPresent(builder::betaLoops);
+        return builder.build();
+    }
+
+    private static SumRuleRequest chainRequest(ResidueCommand c) {
+        if (c.exponentShift != null || c.betaLoops != null) {
+            throw new DomainException("a chain runs at one loop and its exponents are exact; leave out --exponent-shift and"
+                    + " --beta-loops");
+        }
+        return ChainSumRule.request(
+                KernelLibrary.load(c.name), c.nf, optional(c.loops).orElse(CHAIN_TERMS),
+                optionalRational("--power", c.power), c.removeNearer);
+    }
+
+    static Report crosscheck(CrosscheckCommand c) {
+        Kernel kernel = KernelLibrary.load(chosen(c.kernel, c.name, "--kernel"));
+        String series = c.series != null || c.name != null
+                ? chosen(c.series, c.name, "--series")
+                : kernel.series().orElseThrow(() -> new DomainException(
+                        "the kernel " + kernel.name() + " names no series; give --series"));
+        return CrossCheckReport.of(
+                CrossCheck.of(kernel, SeriesLibrary.find(series), c.nf, optionalRational("--power", c.power)));
+    }
+
+    private static String chosen(@Nullable String given, @Nullable String name, String option) {
+        if (given == null && name == null) {
+            throw new DomainException("name a quantity, or give --kernel and --series; " + option + " is missing");
+        }
+        return given != null ? given : String.valueOf(name);
+    }
+
+    static Report assess(AssessCommand c) {
+        Kernel kernel = KernelLibrary.load(c.name);
+        Optional<PerturbativeSeries> published = c.series == null
+                ? kernel.series().flatMap(SeriesLibrary::builtIn)
+                : Optional.of(SeriesLibrary.find(c.series));
+        return AssessmentReport.of(kernel, published, c.nf, c.loops, rational("--range", c.range));
+    }
+
+    static Report validate(@Nullable String path) {
+        List<Validation.Finding> findings = path == null ? Validation.library() : Validation.of(path);
+        return ValidationReport.of(path == null ? "library" : path, findings);
+    }
+
+    /** True if a validation found no failure. */
+    static boolean allPassed(Report report) {
+        return ValidationReport.allPassed(report);
+    }
+
+    private static ChainOptions options(ScaleOptions s, Coupling coupling, Normalisation normalisation) {
+        return new ChainOptions(
+                s.mu, s.operatorMu, coupling, normalisation, Scheme.parse(s.scheme), optional(s.nf),
+                optional(s.couplingNf));
+    }
+
+    private static Map<String, Rational> parameters(ScaleOptions s) {
+        Map<String, Rational> values = new LinkedHashMap<>();
+        s.parameters.forEach((name, value) -> values.put(name, rational("--parameter " + name, value)));
+        return values;
+    }
+
+    private static OptionalInt optional(@Nullable Integer value) {
+        return value == null ? OptionalInt.empty() : OptionalInt.of(value);
+    }
+
+    private static Optional<Rational> optionalRational(String option, @Nullable String text) {
+        return text == null ? Optional.empty() : Optional.of(rational(option, text));
+    }
+
+    private static Rational rational(String option, String text) {
+        try {
+            return Rational.parse(text);
+        } catch (DomainException e) {
+            throw new DomainException(option + ": " + e.getMessage(), e);
+        }
+    }
+}
