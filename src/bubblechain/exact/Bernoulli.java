@@ -18,6 +18,9 @@ public final class Bernoulli {
      * @implNote from the tangent numbers, O(n^2) operations on integers for all numbers up to n; kept
      */
     public static synchronized Rational number(int n) {
+        if (n < 0) {
+            throw new DomainException("Bernoulli numbers B_n begin at n = 0, got n = " + n);
+        }
         if (n == 1) {
             return Rational.of(-1, 2);
         }

@@ -10,8 +10,15 @@ public final class ConstantFunctions {
     /** Largest rational argument of gamma and its relatives, and largest integer exponent, in absolute value. */
     public static final int LARGEST_ARGUMENT = 10_000;
 
-    private static final int LARGEST_ORDER = 1_000;
+    /** Largest order of polygamma and polylog, and largest argument of zeta. */
+    public static final int LARGEST_ORDER = 1_000;
     private static final int GUARD_BITS = 32;
+
+    /** Order times argument of a polygamma: the size of the rational number its recurrence leaves. */
+    private static final int LARGEST_RECURRENCE = 20_000;
+
+    /** Terms of a power of a sum. */
+    private static final int LARGEST_SUM = 2_000;
 
     private interface BallFunction {
         Ball apply(Ball argument, int bits);
@@ -23,10 +30,35 @@ public final class ConstantFunctions {
     public static ExactConstant power(ExactConstant base, ExactConstant exponent) {
         Optional<Rational> q = exponent.asRational();
         if (q.isPresent() && q.get().isInteger()) {
-            return base.power(limited(q.get()).intValueExact());
+            return integerPower(base, limited(q.get()).intValueExact());
         }
         Optional<ExactConstant> closed = q.flatMap(r -> base.rationalPower(limited(r)));
         return closed.orElseGet(() -> base.ln().multiply(exponent).exp());
+    }
+
+    private static ExactConstant integerPower(ExactConstant base, int n) {
+        if (base.asRational().isPresent()) {
+            return ExactFunctions.power(base.asRational().get(), Rational.of(n));
+        }
+        // a sum of t terms to the power n has up to (n+1)(n+2)...(n+t-1)/(t-1)! terms
+        double terms = 1;
+        for (int t = 1; t < base.size() && n > 0; t++) {
+            terms *= (n + t) / (double) t;
+        }
+        if (terms > LARGEST_SUM) {
+            throw new DomainException("the power " + n + " of a sum of " + base.size() + " terms has more than "
+                    + LARGEST_SUM + " terms");
+        }
+        return base.power(n);
+    }
+
+    /** zeta(k). @throws DomainException at the pole k = 1 and beyond |k| = 1000 */
+    public static ExactConstant zeta(int k) {
+        if (Math.abs(k) > LARGEST_ORDER) {
+            throw new DomainException("the argument of zeta lies between -" + LARGEST_ORDER + " and " + LARGEST_ORDER
+                    + ", got " + k);
+        }
+        return ExactFunctions.zeta(k);
     }
 
     /** Gamma(z). @throws DomainException at a pole */
@@ -41,7 +73,13 @@ public final class ConstantFunctions {
         if (n < 0 || n > LARGEST_ORDER) {
             throw new DomainException("the order of a polygamma lies between 0 and " + LARGEST_ORDER + ", got " + n);
         }
-        return z.asRational().map(q -> ExactFunctions.polygamma(n, limited(q))).orElseGet(() -> n == 0
+        Optional<Rational> argument = z.asRational();
+        if (argument.isPresent()
+                && argument.get().abs().multiply(n + 1).compareTo(Rational.of(LARGEST_RECURRENCE)) > 0) {
+            throw new DomainException("the " + n + "-th derivative of psi at " + argument.get()
+                    + " is too long a number; order plus one times argument may reach " + LARGEST_RECURRENCE);
+        }
+        return argument.map(q -> ExactFunctions.polygamma(n, limited(q))).orElseGet(() -> n == 0
                 ? opaque("digamma(" + z + ")", z, BallFunctions::digamma)
                 : opaque("polygamma(" + n + "," + z + ")", z, (x, bits) -> BallFunctions.polygamma(n, x, bits)));
     }
@@ -63,6 +101,9 @@ public final class ConstantFunctions {
         Optional<Rational> x = argument.asRational();
         if (s < 1 || s > LARGEST_ORDER || x.isEmpty() || x.get().abs().compareTo(Rational.HALF) > 0) {
             throw new DomainException("polylog(s, x) needs an integer s >= 1 and a rational x with |x| <= 1/2");
+        }
+        if (x.get().isZero()) {
+            return ExactConstant.ZERO;
         }
         if (s == 1) {
             return ExactFunctions.ln(Rational.ONE.subtract(x.get())).negate();

@@ -28,6 +28,9 @@ public final class ExactConstant {
     public static final ExactConstant PI = of(Monomial.piPower(2), Rational.ONE);
     public static final ExactConstant SQRT_PI = of(Monomial.piPower(1), Rational.ONE);
 
+    private static final Generator LN_PI =
+            Generator.opaque("ln(pi)", bits -> BallFunctions.ln(BallFunctions.pi(bits + 8), bits));
+
     private final Map<Monomial, Rational> terms;
 
     private ExactConstant(Map<Monomial, Rational> terms) {
@@ -187,7 +190,7 @@ public final class ExactConstant {
         }
     }
 
-    /** e^this; a part of the exponent that is not r + s gammaE + sum q ln p gives an opaque factor. */
+    /** e^this; a part of the exponent that is not r + s gammaE + sum q ln p + (k/2) ln(pi) gives an opaque factor. */
     public ExactConstant exp() {
         Rational plain = Rational.ZERO;
         Rational euler = Rational.ZERO;
@@ -201,6 +204,11 @@ public final class ExactConstant {
                 euler = term.getValue();
             } else if (generator != null && generator.isLog()) {
                 result = result.multiply(ExactFunctions.primePower(generator.index(), term.getValue()));
+            } else if (generator != null && generator.equals(LN_PI)) {
+                // pi^q: the half-integer part of q is canonical
+                Rational half = Rational.of(term.getValue().multiply(2).floor(), BigInteger.TWO);
+                result = result.multiply(of(Monomial.piPower(half.multiply(2).intValueExact()), Rational.ONE));
+                rest = rest.add(of(term.getKey(), term.getValue().subtract(half)));
             } else {
                 rest = rest.add(of(term.getKey(), term.getValue()));
             }
@@ -262,8 +270,7 @@ public final class ExactConstant {
                     sum = sum.add(ExactFunctions.ln(Rational.of(root.getKey())).multiply(root.getValue()));
                 }
                 if (monomial.halfPi() != 0) {
-                    ExactConstant lnPi = opaque("ln(pi)", bits -> BallFunctions.ln(BallFunctions.pi(bits + 8), bits));
-                    sum = sum.add(lnPi.multiply(Rational.of(monomial.halfPi(), 2)));
+                    sum = sum.add(of(Monomial.of(LN_PI), Rational.of(monomial.halfPi(), 2)));
                 }
                 return sum;
             }

@@ -12,6 +12,9 @@ public final class ExactFunctions {
     /** Trial division stops here; a remaining factor below its square is prime. */
     private static final int LARGEST_TRIAL_DIVISOR = 100_000;
 
+    /** Bits of a power of a rational; a larger one is refused before it takes the memory. */
+    private static final int LARGEST_POWER_BITS = 2_000_000;
+
     private ExactFunctions() {}
 
     /** zeta(k); closed for even k and for k of at most 0. @throws DomainException at the pole k = 1 */
@@ -46,10 +49,13 @@ public final class ExactFunctions {
         return sum;
     }
 
-    /** x^q for a positive rational x. @throws DomainException if x is not positive and q not an integer */
+    /** x^q for a positive rational x. @throws DomainException if x is negative and q not an integer, or 0^q for q < 0 */
     public static ExactConstant power(Rational x, Rational q) {
         if (q.isInteger()) {
-            return ExactConstant.of(x.power(q.intValueExact()));
+            return ExactConstant.of(integerPower(x, q.numerator()));
+        }
+        if (x.isZero() && q.signum() > 0) {
+            return ExactConstant.ZERO;
         }
         if (x.signum() <= 0) {
             throw new DomainException("a fractional power needs a positive base, got " + x);
@@ -64,10 +70,20 @@ public final class ExactFunctions {
     static ExactConstant primePower(BigInteger p, Rational q) {
         BigInteger whole = q.floor();
         Rational fraction = q.subtract(Rational.of(whole));
-        Rational factor = Rational.of(p).power(whole.intValueExact());
+        Rational factor = integerPower(Rational.of(p), whole);
         return fraction.isZero()
                 ? ExactConstant.of(factor)
                 : ExactConstant.of(Monomial.root(p, fraction), factor);
+    }
+
+    private static Rational integerPower(Rational x, BigInteger n) {
+        int bits = Math.max(x.numerator().bitLength(), x.denominator().bitLength());
+        boolean unit = x.abs().equals(Rational.ONE) || x.isZero();
+        if (!unit && n.abs().multiply(BigInteger.valueOf(bits)).compareTo(BigInteger.valueOf(LARGEST_POWER_BITS)) > 0) {
+            throw new DomainException("the power " + n + " of a number of " + bits + " bits is too large; the limit is "
+                    + LARGEST_POWER_BITS + " bits");
+        }
+        return x.power(n.intValueExact());
     }
 
     private static Map<BigInteger, Integer> factors(Rational x) {
@@ -100,13 +116,8 @@ public final class ExactFunctions {
     public static ExactConstant gamma(Rational z) {
         requireNoPole("gamma", z);
         Rational s = reduced(z);
-        Rational factor = Rational.ONE;
-        for (Rational t = s; t.compareTo(z) < 0; t = t.add(1)) {
-            factor = factor.multiply(t);
-        }
-        for (Rational t = z; t.compareTo(s) < 0; t = t.add(1)) {
-            factor = factor.divide(t);
-        }
+        int steps = z.subtract(s).intValueExact();
+        Rational factor = steps >= 0 ? rising(s, steps) : rising(z, -steps).inverse();
         ExactConstant base = s.equals(Rational.ONE)
                 ? ExactConstant.ONE
                 : s.equals(Rational.HALF)
@@ -126,15 +137,19 @@ public final class ExactFunctions {
         requireNoPole(n == 0 ? "digamma" : "polygamma", z);
         Rational s = reduced(z);
         // psi^(n)(t+1) = psi^(n)(t) + (-1)^n n!/t^{n+1}, DLMF 5.15.5.
-        Rational shift = Rational.ZERO;
-        for (Rational t = s; t.compareTo(z) < 0; t = t.add(1)) {
-            shift = shift.add(t.power(-n - 1));
-        }
-        for (Rational t = z; t.compareTo(s) < 0; t = t.add(1)) {
-            shift = shift.subtract(t.power(-n - 1));
-        }
+        int steps = z.subtract(s).intValueExact();
+        Rational shift = steps >= 0 ? powerSum(s, n + 1, 0, steps) : powerSum(z, n + 1, 0, -steps).negate();
         Rational scale = Rational.of(n % 2 == 0 ? factorial(n) : factorial(n).negate());
         return reducedPolygamma(n, s, scale.negate()).add(ExactConstant.of(shift.multiply(scale)));
+    }
+
+    /** The sum of (s + j)^(-k) for from <= j < to, halves first so that long fractions meet late. */
+    private static Rational powerSum(Rational s, int k, int from, int to) {
+        if (to - from <= 1) {
+            return from == to ? Rational.ZERO : s.add(from).power(-k);
+        }
+        int middle = (from + to) >>> 1;
+        return powerSum(s, k, from, middle).add(powerSum(s, k, middle, to));
     }
 
     private static ExactConstant reducedPolygamma(int n, Rational s, Rational signedFactorial) {
@@ -158,6 +173,9 @@ public final class ExactFunctions {
 
     /** Hurwitz zeta(k, s) for k of at least 2 and s in (0,1]. */
     public static ExactConstant hurwitz(int k, Rational s) {
+        if (k < 2) {
+            throw new DomainException("the Hurwitz zeta function needs an integer k of at least 2, got " + k);
+        }
         // psi^(k-1)(s) = (-1)^k (k-1)! zeta(k, s)
         Rational factor = Rational.of(factorial(k - 1));
         return polygamma(k - 1, s).divide(k % 2 == 0 ? factor : factor.negate());
@@ -195,7 +213,29 @@ public final class ExactFunctions {
 
     /** n! for n of at least 0. */
     public static BigInteger factorial(int n) {
+        if (n < 0) {
+            throw new DomainException("a factorial needs a number of at least 0, got " + n);
+        }
         return product(1, n);
+    }
+
+    /** s (s+1) ... (s+n-1). */
+    private static Rational rising(Rational s, int n) {
+        return Rational.of(
+                rising(s.numerator(), s.denominator(), 0, n), s.denominator().pow(n));
+    }
+
+    /** The product of top + j step for from <= j < to. */
+    private static BigInteger rising(BigInteger top, BigInteger step, int from, int to) {
+        if (to - from <= 8) {
+            BigInteger result = BigInteger.ONE;
+            for (int j = from; j < to; j++) {
+                result = result.multiply(top.add(step.multiply(BigInteger.valueOf(j))));
+            }
+            return result;
+        }
+        int middle = (from + to) >>> 1;
+        return rising(top, step, from, middle).multiply(rising(top, step, middle, to));
     }
 
     private static BigInteger product(int from, int to) {

@@ -111,7 +111,7 @@ public final class Rational implements Comparable<Rational> {
     }
 
     public Rational subtract(long other) {
-        return add(-other);
+        return new Rational(numerator.subtract(denominator.multiply(BigInteger.valueOf(other))), denominator);
     }
 
     public Rational multiply(Rational other) {
