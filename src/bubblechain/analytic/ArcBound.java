@@ -12,9 +12,9 @@ import java.util.TreeSet;
 /**
  * Proved upper bounds of a normal form on circles about the origin, and of the Taylor coefficients they imply.
  *
- * <p>With M = max |h(u)| on |u| = R and p the poles of h with 0 &lt; |p| &lt; R, Cauchy's integral over the circle gives
- * |[u^n] h + sum_p Res(h(u) u^(-n-1), p)| <= M R^(-n): what is left of a coefficient when the parts of the poles inside
- * are taken away. [u^n] is the coefficient of the Laurent series about 0.
+ * <p>With M = max |h(u)| on |u| = R and p the poles of h with 0 &lt; |p| &lt; R, Cauchy's integral over the circle
+ * gives |[u^n] h + sum_p Res(h(u) u^(-n-1), p)| <= M R^(-n): what is left of a coefficient when the parts of the poles
+ * inside are taken away. [u^n] is the coefficient of the Laurent series about 0.
  *
  * <p>The half circle Im u >= 0 is covered by discs (h(conj u) = conj h(u), the coefficients being real), h is enclosed
  * over each disc, and the arcs with the largest bounds are halved until the largest bound is close to a value the
@@ -37,8 +37,8 @@ public final class ArcBound {
      *
      * @param radius    R
      * @param logarithm not below ln max |h(u)| on |u| = R; minus infinity for the zero form
-     * @param attained  ln |h| at some point of the circle, good to about ten digits where terms do not cancel; the bound
-     *                  exceeds the true maximum by at most the difference. Not a bound itself
+     * @param attained  ln |h| at some point of the circle, good to about ten digits where terms do not cancel;
+     *                  not a bound itself. The bound exceeds the true maximum by at most the difference
      * @param arcs      number of arcs of the half circle used
      */
     public record Bound(double radius, double logarithm, double attained, int arcs) {
@@ -108,9 +108,12 @@ public final class ArcBound {
         }
         Arc largest = top(queue);
         if (largest.bound() == Double.POSITIVE_INFINITY) {
-            throw new DomainException("the circle |u| = " + radius + " passes through a singular point of a term, or very"
-                    + " close to one, where the argument of u is about "
-                    + String.format(Locale.ROOT, "%.3f", largest.from()) + " pi; choose a radius between the circles of poles");
+            throw new DomainException(String.format(
+                    Locale.ROOT,
+                    "the circle |u| = %s passes through a singular point of a term, or very close to one, where the"
+                            + " argument of u is about %.3f pi; choose a radius between the circles of poles",
+                    radius,
+                    largest.from()));
         }
         return new Bound(radius, largest.bound(), attained, queue.size());
     }

@@ -4,8 +4,8 @@ import bubblechain.exact.Ball;
 import bubblechain.exact.Rational;
 
 /**
- * The complex numbers w with |w - (re + i im)| <= radius, in double precision. An operation returns a disc that holds the
- * result for every choice of points; what rounding did to the centre is added to the radius.
+ * The complex numbers w with |w - (re + i im)| <= radius, in double precision. An operation returns a disc that holds
+ * the result for every choice of points; what rounding did to the centre is added to the radius.
  *
  * <p>An operation that is not defined for all points, or whose result is out of range, returns {@link #WHOLE}.
  */

@@ -7,12 +7,12 @@ import java.math.BigInteger;
 import java.util.Arrays;
 
 /**
- * The polygamma function psi^(n) over discs: reflection into the right half plane, recurrence away from the origin, there
- * the asymptotic series.
+ * The polygamma function psi^(n) over discs: reflection into the right half plane, recurrence away from the origin,
+ * there the asymptotic series.
  *
- * <p>Reflection, DLMF 5.15.6: psi^(n)(z) = (-1)^n psi^(n)(1-z) - pi d^n cot(pi z)/dz^n. With q = e^(2 pi i s z), s the sign
- * of Im z, pi cot(pi z) = -i pi s (1+q)/(1-q) = -i pi s - 2 i pi s sum_{k>=1} q^k, so that its n-th derivative is
- * -(2 pi i s)^(n+1) q A_n(q)/(1-q)^(n+1), A_n the Eulerian polynomial, DLMF 26.14(ii).
+ * <p>Reflection, DLMF 5.15.6: psi^(n)(z) = (-1)^n psi^(n)(1-z) - pi d^n cot(pi z)/dz^n. With q = e^(2 pi i s z), s the
+ * sign of Im z, pi cot(pi z) = -i pi s (1+q)/(1-q) = -i pi s - 2 i pi s sum_{k>=1} q^k, so that its n-th derivative is
+ * -(2 pi i s)^(n+1) q A_n(q)/(1-q)^(n+1), A_n the Eulerian polynomial, DLMF 26.14.
  */
 final class PolygammaDisc {
     /** Above this order the recurrence takes the place of the reflection. */
@@ -46,7 +46,7 @@ final class PolygammaDisc {
         this.eulerian = n <= LARGEST_ORDER_REFLECTED ? eulerian(n) : new ComplexDisc[0];
     }
 
-    /** DLMF 26.14.8: A(n, k) = (k+1) A(n-1, k) + (n-k) A(n-1, k-1). */
+    /** DLMF 26.14: A(n, k) = (k+1) A(n-1, k) + (n-k) A(n-1, k-1). */
     private static ComplexDisc[] eulerian(int n) {
         BigInteger[] row = {BigInteger.ONE};
         for (int m = 2; m <= n; m++) {

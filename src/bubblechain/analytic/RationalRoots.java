@@ -7,8 +7,8 @@ import java.util.Map;
 import java.util.TreeMap;
 
 /**
- * Rational roots k/q of polynomials over Q with small k and q, by trial modulo a prime and an exact check. Roots beyond the
- * limits are not found: use it where missing one costs accuracy, not correctness.
+ * Rational roots k/q of polynomials over Q with small k and q, by trial modulo a prime and an exact check. Roots beyond
+ * the limits are not found: use it where missing one costs accuracy, not correctness.
  */
 final class RationalRoots {
     private static final int LARGEST_DENOMINATOR = 64;
@@ -85,7 +85,7 @@ final class RationalRoots {
         return value == 0 && residues.length > 1;
     }
 
-    /** Fujiwara's bound 2 max |c_(n-k)|^(1/k) of the roots of a monic polynomial, from the lengths of the coefficients. */
+    /** Fujiwara's bound 2 max |c_(n-k)|^(1/k) of the roots of a monic polynomial; lengths stand for coefficients. */
     private static double rootBound(Polynomial monic) {
         double exponent = Double.NEGATIVE_INFINITY;
         for (int k = 1; k <= monic.degree(); k++) {

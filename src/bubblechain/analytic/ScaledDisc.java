@@ -64,8 +64,8 @@ record ScaledDisc(ComplexDisc mantissa, long exponent) {
     /** The disc times 2^k; what underflows is below the number that widening always adds. */
     private static ComplexDisc shifted(ComplexDisc disc, long k) {
         int shift = (int) Math.max(-LARGEST_SHIFT, Math.min(LARGEST_SHIFT, k));
-        return new ComplexDisc(
-                Math.scalb(disc.re(), shift), Math.scalb(disc.im(), shift), Math.scalb(disc.radius(), shift)).widened(0);
+        double radius = Math.scalb(disc.radius(), shift);
+        return new ComplexDisc(Math.scalb(disc.re(), shift), Math.scalb(disc.im(), shift), radius).widened(0);
     }
 
     private boolean isZero() {

@@ -67,8 +67,8 @@ final class TermDisc {
     }
 
     /**
-     * Gamma(z)^m = (Gamma(z+N)/(z (z+1) ... (z+N-1)))^m. Factors that may vanish on the disc are taken over the disc, the
-     * others at the centre with their logarithmic derivatives.
+     * Gamma(z)^m = (Gamma(z+N)/(z (z+1) ... (z+N-1)))^m. Factors that may vanish on the disc are taken over the disc,
+     * the others at the centre with their logarithmic derivatives.
      */
     private static void multiplyGamma(TermProduct product, GammaPower gamma) {
         ComplexDisc over = gamma.argument().over(product.domain());
@@ -99,7 +99,7 @@ final class TermDisc {
         product.multiplyExponential(logarithm.multiply(gamma.power()), derivative.multiply(gamma.power()));
     }
 
-    /** sin z = (i s/2) e^(-i s z) (1 - e^(2 i s z)) with s the sign of Im z, so that the last factor is of order one. */
+    /** sin z = (i s/2) e^(-i s z) (1 - e^(2 i s z)) with s the sign of Im z; the last factor is of order one. */
     private static void multiplySine(TermProduct product, SinePower sine) {
         ComplexDisc over = sine.argument().over(product.domain());
         ComplexDisc atCenter = sine.argument().over(product.center());

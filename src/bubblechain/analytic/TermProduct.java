@@ -1,9 +1,9 @@
 package bubblechain.analytic;
 
 /**
- * A product of factors over a disc |u - c| <= r, collected as f(u) e^(g(c)) e^(g(u) - g(c)): f by discs over all u, g by
- * its value at c and by its derivative over the disc. |g(u) - g(c)| <= r max |g'| with the derivatives of all factors
- * added before the modulus is taken, so that what cancels between gamma functions cancels here.
+ * A product of factors over a disc |u - c| <= r, collected as f(u) e^(g(c)) e^(g(u) - g(c)): f by discs over all u, g
+ * by its value at c and by its derivative over the disc. |g(u) - g(c)| <= r max |g'| with the derivatives of all
+ * factors added before the modulus is taken, so that what cancels between gamma functions cancels here.
  */
 final class TermProduct {
     /** The disc of u. */

@@ -4,8 +4,8 @@ package bubblechain.analytic;
  * Bounds in double precision: results that are not below (or, where named so, not above) the exact ones.
  *
  * <p>A sum, product, quotient or square root is the exact one rounded to nearest, off by at most a fraction 2^-53 or,
- * when it underflows, by 2^-1075. {@link StrictMath} promises log, exp, expm1, hypot, sin and cos within one unit in the
- * last place, at most a fraction 2^-52, and atan2 within two.
+ * when it underflows, by 2^-1075. {@link StrictMath} promises log, exp, expm1, hypot, sin and cos within one unit in
+ * the last place, at most a fraction 2^-52, and atan2 within two.
  */
 final class Upward {
     /** Largest relative error of one rounding. */
@@ -23,8 +23,8 @@ final class Upward {
     private Upward() {}
 
     /**
-     * A bound of the exact value of an expression that came out as {@code value}: at most 16 roundings in sums, products of
-     * two and quotients of non-negative numbers.
+     * A bound of the exact value of an expression that came out as {@code value}: at most 16 roundings in sums,
+     * products of two and quotients of non-negative numbers.
      */
     static double inflate(double value) {
         return value * MANY_ROUNDINGS + Double.MIN_NORMAL;

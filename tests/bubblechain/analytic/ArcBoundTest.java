@@ -152,8 +152,8 @@ class ArcBoundTest {
     void aCircleThroughAPoleIsRefused() {
         assertThatThrownBy(() -> ArcBound.remainder(ArcValues.form(POTENTIAL), 0.5))
                 .isInstanceOf(DomainException.class)
-                .hasMessage("the circle |u| = 0.5 passes through a singular point of a term, or very close to"
-                        + " one, where the argument of u is about 0.000 pi; choose a radius between the circles of poles");
+                .hasMessage("the circle |u| = 0.5 passes through a singular point of a term, or very close to one,"
+                        + " where the argument of u is about 0.000 pi; choose a radius between the circles of poles");
         assertThatThrownBy(() -> ArcBound.remainder(ArcValues.form("1/(u^2+1)"), 1))
                 .isInstanceOf(DomainException.class)
                 .hasMessageContaining("about 0.500 pi");
@@ -181,7 +181,8 @@ class ArcBoundTest {
         assertThat(ArcBound.radiusBetween(poleMass, Rational.of(3), Rational.of(7, 2))).isEqualTo(3.25);
         assertThat(ArcBound.radiusBetween(poleMass, Rational.ZERO, Rational.HALF)).isEqualTo(0.25);
         NormalForm rational = ArcValues.form("1/((u-1)*(u^2-2)*(u^2+9))");
-        assertThat(ArcBound.radiusBetween(rational, Rational.ZERO, Rational.of(20))).isEqualTo(11.5, Offset.offset(1e-9));
+        assertThat(ArcBound.radiusBetween(rational, Rational.ZERO, Rational.of(20)))
+                .isEqualTo(11.5, Offset.offset(1e-9));
         assertThat(ArcBound.radiusBetween(rational, Rational.ONE, Rational.of(3)))
                 .isEqualTo((Math.sqrt(2) + 3) / 2, Offset.offset(1e-9));
         assertThatThrownBy(() -> ArcBound.radiusBetween(poleMass, Rational.ONE, Rational.ONE))

@@ -23,8 +23,8 @@ class ComplexDiscTest {
     private static ComplexDisc disc(Random source) {
         double re = random(source);
         double im = random(source);
-        double radius = source.nextInt(3) == 0 ? 0 : Math.hypot(re, im) * Math.scalb(source.nextDouble(), -source.nextInt(60));
-        return new ComplexDisc(re, im, radius);
+        double radius = Math.hypot(re, im) * Math.scalb(source.nextDouble(), -source.nextInt(60));
+        return new ComplexDisc(re, im, source.nextInt(3) == 0 ? 0 : radius);
     }
 
     /** A point of the disc, often on its rim. */
@@ -110,7 +110,8 @@ class ComplexDiscTest {
     void logarithmAndExponentialUndoEachOtherOnWholeDiscsSeed14() {
         Random source = new Random(14);
         for (int trial = 0; trial < TRIALS; trial++) {
-            ComplexDisc a = new ComplexDisc(5 * source.nextGaussian(), 5 * source.nextGaussian(), source.nextDouble() / 2);
+            double x = 5 * source.nextGaussian();
+            ComplexDisc a = new ComplexDisc(x, 5 * source.nextGaussian(), source.nextDouble() / 2);
             ComplexDisc p = point(a, source);
             // exp of the log of a holds every point of a, with little to spare for small discs
             ComplexDisc ln = a.ln();

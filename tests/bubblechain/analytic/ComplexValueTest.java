@@ -96,8 +96,8 @@ class ComplexValueTest {
     void aPointOnAPoleIsRefused() {
         assertThatThrownBy(() -> ComplexValue.at(ArcValues.form("gamma(1/2-u)"), 1.5, 0))
                 .isInstanceOf(DomainException.class)
-                .hasMessage("no value in double precision at u = 1.5 + 0.0 i: a term is singular at or next to this point,"
-                        + " or out of range; choose another point");
+                .hasMessage("no value in double precision at u = 1.5 + 0.0 i: a term is singular at or next to this"
+                        + " point, or out of range; choose another point");
         assertThatThrownBy(() -> ComplexValue.at(ArcValues.form("1/(u^2+2)/(u-3)"), 3, 0))
                 .isInstanceOf(DomainException.class);
         assertThatThrownBy(() -> ComplexValue.at(ArcValues.form("polygamma(1,u)"), -2, 0))

@@ -13,7 +13,8 @@ class RationalRootsTest {
     @Test
     void rootsThatWereMultipliedInComeBackWithTheirMultiplicitiesSeed31() {
         Random source = new Random(31);
-        Polynomial rest = Polynomial.of(List.of(Rational.of(2), Rational.of(-1), Rational.ZERO, Rational.ONE)); // u^3-u+2
+        // u^3 - u + 2
+        Polynomial rest = Polynomial.of(List.of(Rational.of(2), Rational.of(-1), Rational.ZERO, Rational.ONE));
         for (int trial = 0; trial < 60; trial++) {
             Map<Rational, Integer> expected = new TreeMap<>();
             Polynomial product = rest.multiply(Rational.of(-5, 7));
