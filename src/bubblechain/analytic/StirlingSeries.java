@@ -9,8 +9,8 @@ import bubblechain.exact.Rational;
  * remainder.
  *
  * <p>ln Gamma(z) = (z - 1/2) ln z - z + ln(2 pi)/2 + sum_{k&lt;K} T_k(z) + R_K(z), T_k = B_2k/(2k (2k-1) z^(2k-1)),
- * with R_K(z) = int_0^infinity (B_2K - B_2K(x - [x]))/(2K (x+z)^2K) dx, DLMF 5.11.1 and the Euler-Maclaurin formula DLMF
- * 2.10.1. The numerator has one sign, and |x + z| >= (x + |z|) cos(arg(z)/2), so that the j-th derivative obeys
+ * with R_K(z) = int_0^infinity (B_2K - B_2K(x - [x]))/(2K (x+z)^2K) dx, DLMF 5.11.1 and the Euler-Maclaurin formula
+ * DLMF 2.10.1. The numerator has one sign, and |x + z| >= (x + |z|) cos(arg(z)/2), so that the j-th derivative obeys
  * |R_K^(j)(z)| <= |R_K^(j)(|z|)| sec^(2K+j)(arg(z)/2). On the positive axis R_K^(j) and R_(K+1)^(j) have opposite
  * signs, hence |R_K^(j)(|z|)| <= |T_K^(j)(|z|)|: the first neglected term. For j = 0, 1 this is DLMF 5.11(ii); the
  * higher derivatives follow by the same argument. Here sec^2(arg(z)/2) = 2 |z|/(|z| + Re z), at most 2.
