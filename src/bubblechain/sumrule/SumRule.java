@@ -36,12 +36,14 @@ public final class SumRule {
     private final int bits;
     private final BallRing ring;
     private final ScaleEvolution<Ball> evolution;
+    private final List<Ball> coefficients;
 
     private SumRule(SumRuleRequest request, int bits) {
         this.request = request;
         this.bits = bits;
         this.ring = BallRing.of(bits, 2);
         this.evolution = evolution(request.beta());
+        this.coefficients = balls(request.coefficients().values());
     }
 
     private ScaleEvolution<Ball> evolution(BetaFunction beta) {
@@ -63,7 +65,7 @@ public final class SumRule {
         for (int bits = FIRST_BITS; bits <= LARGEST_BITS; bits *= 2) {
             SumRule rule = new SumRule(request, bits);
             List<ScanPoint> scan = rule.scan();
-            List<Ball> central = rule.strengths(rule.evolution, balls(request.coefficients().values(), bits));
+            List<Ball> central = rule.strengths(rule.evolution, rule.coefficients);
             boolean accurate = isAccurate(central) && scan.stream().allMatch(point -> isAccurate(point.strengths()));
             if (accurate) {
                 return rule.result(central, scan);
@@ -71,10 +73,6 @@ public final class SumRule {
         }
         throw new PrecisionException("the sum rule for '" + request.name() + "' loses all digits to cancellation at "
                 + LARGEST_BITS + " bits; use fewer loops");
-    }
-
-    private static List<Ball> balls(List<ExactConstant> constants, int bits) {
-        return constants.stream().map(c -> c.toBall(bits)).toList();
     }
 
     /**
@@ -109,13 +107,13 @@ public final class SumRule {
                         || v.radiusAsDouble() <= Math.scalb(largest, -2 * WANTED_BITS));
     }
 
-    private List<Ball> strengths(ScaleEvolution<Ball> along, List<Ball> coefficients) {
-        return along.strengths(along.terms(coefficients));
+    private List<Ball> strengths(ScaleEvolution<Ball> along, List<Ball> series) {
+        return along.strengths(along.terms(series));
     }
 
     private List<ScanPoint> scan() {
-        ScaleLogarithms<Ball> logarithms = ScaleLogarithms.of(
-                ring, balls(request.coefficients().values()), request.beta(), Rational.ZERO);
+        ScaleLogarithms<Ball> logarithms =
+                ScaleLogarithms.of(ring, coefficients, request.beta(), Rational.ZERO);
         ScaleLogarithms<Ball> correctionLogarithms = correctionLogarithms();
         return request.lambdas().stream()
                 .map(lambda -> scanPoint(lambda, logarithms, correctionLogarithms))
@@ -138,7 +136,7 @@ public final class SumRule {
         Ball factor = lambda.toBall(bits);
         Ball logarithm = lambda.ln().toBall(bits);
         Ball rescaled = BallFunctions.power(factor, request.power().negate(), bits);
-        List<Ball> coefficients = logarithms.at(logarithm).stream()
+        List<Ball> moved = logarithms.at(logarithm).stream()
                 .map(a -> a.multiply(rescaled, bits))
                 .toList();
         List<Ball> corrections = correctionLogarithms.at(logarithm);
@@ -149,16 +147,12 @@ public final class SumRule {
                 request.shiftUsed(),
                 corrections.subList(1, corrections.size()),
                 request.loops());
-        return new ScanPoint(lambda, strengths(here, coefficients));
+        return new ScanPoint(lambda, strengths(here, moved));
     }
 
     private SumRuleResult result(List<Ball> central, List<ScanPoint> scan) {
         List<Double> inputs = inputErrors();
-        List<ErrorBudget> budgets = new ArrayList<>();
-        for (int k = 0; k < central.size(); k++) {
-            double beta = k == central.size() - 1 ? betaShift(central.get(k)) : 0;
-            budgets.add(new ErrorBudget(halfBand(scan, k), lastStep(central, k), inputs.get(k), beta));
-        }
+        List<ErrorBudget> budgets = budgets(central, scan, inputs);
         List<Double> sizes = central.stream().map(v -> Math.abs(v.toDouble())).toList();
         List<Double> nullErrors = budgets.stream().map(ErrorBudget::forNullTest).toList();
         int last = central.size() - 1;
@@ -168,7 +162,6 @@ public final class SumRule {
         Ball perStrength = Ball.of(request.beta().beta0(), bits)
                 .divide(BallFunctions.pi(bits), bits)
                 .shift(-2);
-        List<Ball> own = balls(request.coefficients().values());
         return new SumRuleResult(
                 request,
                 central,
@@ -178,17 +171,27 @@ public final class SumRule {
                 inputs.stream().map(e -> e * scale).toList(),
                 scan,
                 budgets.get(last).times(scale),
-                ratios(own, prefactor),
-                times(evolution.truncatedResidues(own), prefactor),
+                ratios(prefactor),
+                times(evolution.truncatedResidues(coefficients), prefactor),
                 NullTest.judge(sizes, nullErrors),
                 Blocking.find(request, evolution.nu(), sizes.get(last), nullErrors.get(last)));
+    }
+
+    /** One budget per order; the shift of the beta function at the last one only. */
+    private List<ErrorBudget> budgets(List<Ball> central, List<ScanPoint> scan, List<Double> inputs) {
+        List<ErrorBudget> budgets = new ArrayList<>();
+        for (int k = 0; k < central.size(); k++) {
+            double beta = k == central.size() - 1 ? betaShift(central.get(k)) : 0;
+            budgets.add(new ErrorBudget(halfBand(scan, k), lastStep(central, k), inputs.get(k), beta));
+        }
+        return budgets;
     }
 
     private List<Ball> times(List<Ball> values, Ball factor) {
         return values.stream().map(v -> v.multiply(factor, bits)).toList();
     }
 
-    private List<Optional<Ball>> ratios(List<Ball> coefficients, Ball prefactor) {
+    private List<Optional<Ball>> ratios(Ball prefactor) {
         List<Optional<Ball>> ratios = new ArrayList<>();
         for (int n = 0; n < coefficients.size(); n++) {
             Ball unit = evolution.asymptotic(n, RATIO_DEPTH);
@@ -237,7 +240,6 @@ public final class SumRule {
         if (highest == 0) {
             return 0;
         }
-        List<Ball> coefficients = balls(request.coefficients().values());
         List<Ball> without = strengths(evolution(request.beta().truncated(highest)), coefficients);
         return without.get(without.size() - 1).midpoint().subtract(last.midpoint()).abs().toDouble();
     }

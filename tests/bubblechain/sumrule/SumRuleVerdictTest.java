@@ -94,6 +94,8 @@ class SumRuleVerdictTest {
         SumRuleResult result = evaluate(SampleSeries.adler(3, 2).obstacle(MINUS_ONE));
         assertThat(result.verdict()).isEqualTo(Verdict.CANNOT_TELL);
         assertThat(result.blockedBy()).extracting(b -> b.obstacle().position()).containsExactly(Rational.of(-1));
+        // the scale band alone would say "present"; the last step does not
+        assertThat(result.unblockedVerdict()).isEqualTo(Verdict.CANNOT_TELL);
         assertThat(result.blockedBy().get(0).reason())
                 .isEqualTo("at equal or smaller |u| and its strength is unknown: the sum need not converge; remove it first");
         // sum-rule.md section 2.4: K_3/K_0 = 0.267, last step 0.124 in units of K_0
@@ -161,6 +163,17 @@ class SumRuleVerdictTest {
 
     private static List<Double> doubles(String text) {
         return Arrays.stream(text.split(";")).map(Double::valueOf).toList();
+    }
+
+    @Test
+    void partsOfTheErrorAreCombinedAsStated() {
+        ErrorBudget budget = new ErrorBudget(3, 2, 4, 12);
+        assertThat(budget.combined()).isEqualTo(13); // sqrt(3^2 + 4^2 + 12^2)
+        assertThat(new ErrorBudget(2, 3, 4, 12).combined()).isEqualTo(13);
+        assertThat(budget.forNullTest()).isEqualTo(4);
+        assertThat(new ErrorBudget(1, 7, 4, 12).forNullTest()).isEqualTo(7);
+        assertThat(new ErrorBudget(9, 7, 4, 12).forNullTest()).isEqualTo(9);
+        assertThat(budget.times(-2)).isEqualTo(new ErrorBudget(6, 4, 8, 24));
     }
 
     @Test
