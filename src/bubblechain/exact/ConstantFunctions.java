@@ -32,6 +32,9 @@ public final class ConstantFunctions {
         if (q.isPresent() && q.get().isInteger()) {
             return integerPower(base, limited(q.get()).intValueExact());
         }
+        if (q.isPresent() && base.asRational().isPresent()) {
+            return ExactFunctions.power(base.asRational().get(), limited(q.get()));
+        }
         Optional<ExactConstant> closed = q.flatMap(r -> base.rationalPower(limited(r)));
         return closed.orElseGet(() -> base.ln().multiply(exponent).exp());
     }

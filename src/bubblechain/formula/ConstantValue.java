@@ -3,7 +3,6 @@ package bubblechain.formula;
 import bubblechain.exact.ConstantFunctions;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
-import bubblechain.exact.ExactFunctions;
 import bubblechain.exact.Rational;
 import java.util.HashMap;
 import java.util.List;
@@ -17,10 +16,14 @@ import java.util.Optional;
 public final class ConstantValue {
     private static final Rational LARGEST_ARGUMENT = Rational.of(10_000);
 
-    private final Map<String, ExactConstant> values;
+    private static final int LARGEST_SUM = 5_000;
 
-    private ConstantValue(Map<String, ExactConstant> values) {
+    private final Map<String, ExactConstant> values;
+    private final int[] steps;
+
+    private ConstantValue(Map<String, ExactConstant> values, int[] steps) {
         this.values = values;
+        this.steps = steps;
     }
 
     /** The value of a constant. @throws FormulaException if a name has no value or a function is out of its range */
@@ -30,7 +33,7 @@ public final class ConstantValue {
 
     /** The value with given numbers for some names. */
     public static ExactConstant of(Formula formula, Map<String, ExactConstant> values) {
-        return new ConstantValue(values).value(formula);
+        return new ConstantValue(values, new int[1]).value(formula);
     }
 
     /** The integer a formula stands for, such as the order of a polygamma or the end of a sum. */
@@ -42,9 +45,27 @@ public final class ConstantValue {
         return value.get().intValueExact();
     }
 
+    /** The order of a polygamma, from 0 to 1000. */
+    public static int polygammaOrder(Formula formula, Map<String, ExactConstant> values) {
+        int n = integer(formula, values, "the order of a polygamma");
+        if (n < 0 || n > ConstantFunctions.LARGEST_ORDER) {
+            throw FormulaException.at(
+                    formula.span(), "the order of a polygamma lies between 0 and " + ConstantFunctions.LARGEST_ORDER);
+        }
+        return n;
+    }
+
     private ExactConstant value(Formula formula) {
+        if (++steps[0] > FormulaLimits.STEPS) {
+            throw FormulaException.at(formula.span(), "the sums of this formula have too many terms in all");
+        }
         try {
-            return unchecked(formula);
+            ExactConstant value = unchecked(formula);
+            if (value.size() > LARGEST_SUM) {
+                throw FormulaException.at(
+                        formula.span(), "a constant of " + value.size() + " terms; the limit is " + LARGEST_SUM);
+            }
+            return value;
         } catch (FormulaException alreadyPlaced) {
             throw alreadyPlaced;
         } catch (ArithmeticException | DomainException e) {
@@ -72,10 +93,18 @@ public final class ConstantValue {
         return switch (b.operator()) {
             case ADD -> value(b.left()).add(value(b.right()));
             case SUBTRACT -> value(b.left()).subtract(value(b.right()));
-            case MULTIPLY -> value(b.left()).multiply(value(b.right()));
+            case MULTIPLY -> product(value(b.left()), value(b.right()), b);
             case DIVIDE -> value(b.left()).multiply(value(b.right()).inverse());
             case POWER -> ConstantFunctions.power(value(b.left()), value(b.right()));
         };
+    }
+
+    private static ExactConstant product(ExactConstant left, ExactConstant right, Formula place) {
+        if ((long) left.size() * right.size() > (long) LARGEST_SUM * LARGEST_SUM / 10) {
+            throw FormulaException.at(
+                    place.span(), "a product of sums of " + left.size() + " and " + right.size() + " terms");
+        }
+        return left.multiply(right);
     }
 
     private ExactConstant named(Formula.Name n) {
@@ -99,7 +128,7 @@ public final class ConstantValue {
         Map<String, ExactConstant> inner = new HashMap<>(values);
         for (int k = from; k <= to; k++) {
             inner.put(s.index(), ExactConstant.of(k));
-            total = total.add(of(s.body(), inner));
+            total = total.add(new ConstantValue(inner, steps).value(s.body()));
         }
         return total;
     }
@@ -108,9 +137,9 @@ public final class ConstantValue {
         List<Formula> arguments = c.arguments();
         ExactConstant last = value(arguments.get(arguments.size() - 1));
         return switch (c.function()) {
-            case ZETA -> ExactFunctions.zeta(integer(arguments.get(0), values, "the argument of zeta"));
+            case ZETA -> ConstantFunctions.zeta(integer(arguments.get(0), values, "the argument of zeta"));
             case POLYLOG -> ConstantFunctions.polylog(integer(arguments.get(0), values, "the order of a polylog"), last);
-            case POLYGAMMA -> ConstantFunctions.polygamma(integer(arguments.get(0), values, "the order of a polygamma"), last);
+            case POLYGAMMA -> ConstantFunctions.polygamma(polygammaOrder(arguments.get(0), values), last);
             case GAMMA -> ConstantFunctions.gamma(last);
             case DIGAMMA -> ConstantFunctions.polygamma(0, last);
             case LN -> last.ln();

@@ -9,14 +9,16 @@ import java.util.Map;
  * {@link FormulaLimits#NODES}, so that a short file cannot stand for an enormous formula.
  */
 public final class Definitions {
-    public static final Definitions NONE = new Definitions(Map.of(), Map.of());
+    public static final Definitions NONE = new Definitions(Map.of(), Map.of(), Map.of());
 
     private final Map<String, Formula> values;
     private final Map<String, Long> sizes;
+    private final Map<String, Integer> heights;
 
-    private Definitions(Map<String, Formula> values, Map<String, Long> sizes) {
+    private Definitions(Map<String, Formula> values, Map<String, Long> sizes, Map<String, Integer> heights) {
         this.values = values;
         this.sizes = sizes;
+        this.heights = heights;
     }
 
     /**
@@ -27,14 +29,17 @@ public final class Definitions {
     public Definitions with(String name, Formula formula) {
         Map<String, Long> moreSizes = new HashMap<>(sizes);
         moreSizes.put(name, checkedSize(formula));
+        Map<String, Integer> moreHeights = new HashMap<>(heights);
+        moreHeights.put(name, Substitution.requireShallow(formula, heights));
         Map<String, Formula> more = new LinkedHashMap<>(values);
         more.put(name, Substitution.apply(formula, values));
-        return new Definitions(more, moreSizes);
+        return new Definitions(more, moreSizes, moreHeights);
     }
 
     /** A formula with all definitions written out. @throws FormulaException if that is too large */
     public Formula resolve(Formula formula) {
         checkedSize(formula);
+        Substitution.requireShallow(formula, heights);
         return Substitution.apply(formula, values);
     }
 

@@ -1,6 +1,7 @@
 package bubblechain.formula;
 
 import bubblechain.exact.Rational;
+import java.util.Objects;
 
 /** Cuts a formula into numbers, names and operators, one token ahead. */
 final class FormulaLexer {
@@ -15,6 +16,7 @@ final class FormulaLexer {
     private Kind kind = Kind.END;
     private int start;
     private int end;
+    private int lastEnd;
 
     FormulaLexer(String source) {
         this.source = source;
@@ -27,6 +29,7 @@ final class FormulaLexer {
     }
 
     void next() {
+        lastEnd = end;
         start = end;
         while (start < source.length() && Character.isWhitespace(source.charAt(start))) {
             start++;
@@ -50,9 +53,8 @@ final class FormulaLexer {
             end++;
         } else {
             int point = source.codePointAt(start);
-            String shown = point < 0x80 && point >= 0x20
-                    ? "'" + c + "'"
-                    : String.format("U+%04X (%s)", point, Character.getName(point));
+            String name = Objects.requireNonNullElse(Character.getName(point), "unassigned");
+            String shown = point < 0x7f && point >= 0x20 ? "'" + c + "'" : String.format("U+%04X (%s)", point, name);
             throw FormulaException.at(
                     new Span(source, start, start + 1), "the character " + shown + " has no meaning in a formula");
         }
@@ -125,6 +127,11 @@ final class FormulaLexer {
 
     String text() {
         return source.substring(start, end);
+    }
+
+    /** From a token to the one last passed. */
+    Span from(Span first) {
+        return new Span(source, first.start(), Math.max(lastEnd, first.end()));
     }
 
     Span span() {

@@ -3,6 +3,7 @@ package bubblechain.formula;
 import bubblechain.exact.Rational;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 
 /**
  * Reads a formula by precedence climbing. From loose to tight: {@code + -}, then {@code * /}, then a leading sign, then
@@ -21,32 +22,35 @@ final class FormulaParser {
         if (!lexer.atEnd()) {
             throw unexpected("an operator or the end of the formula");
         }
+        Substitution.requireShallow(formula, Map.of());
         return formula;
     }
 
     private Formula sum() {
+        Span start = lexer.span();
         Formula left = product();
         while (lexer.isOperator("+") || lexer.isOperator("-")) {
             Formula.Operator operator =
                     lexer.isOperator("+") ? Formula.Operator.ADD : Formula.Operator.SUBTRACT;
             lexer.next();
-            left = binary(operator, left, product());
+            left = binary(start, operator, left, product());
         }
         return left;
     }
 
     private Formula product() {
+        Span start = lexer.span();
         Formula left = signed();
         while (true) {
             if (lexer.isOperator("*") || lexer.isOperator("/")) {
                 Formula.Operator operator =
                         lexer.isOperator("*") ? Formula.Operator.MULTIPLY : Formula.Operator.DIVIDE;
                 lexer.next();
-                left = binary(operator, left, signed());
+                left = binary(start, operator, left, signed());
             } else if (lexer.startsOperand()) {
                 throw FormulaException.at(
-                        left.span().to(lexer.span()),
-                        "two factors without an operator; write " + shortText(left.span()) + "*"
+                        start.to(lexer.span()),
+                        "two factors without an operator; write " + shortText(lexer.from(start)) + "*"
                                 + shortText(lexer.span()));
             } else {
                 return left;
@@ -67,12 +71,13 @@ final class FormulaParser {
             enter();
             Formula operand = signed();
             depth--;
-            return negative ? new Formula.Negation(operand, sign.to(operand.span())) : operand;
+            return negative ? new Formula.Negation(operand, lexer.from(sign)) : operand;
         }
         return power();
     }
 
     private Formula power() {
+        Span start = lexer.span();
         Formula base = atom();
         if (!lexer.isOperator("^")) {
             return base;
@@ -81,7 +86,7 @@ final class FormulaParser {
         enter();
         Formula exponent = signed();
         depth--;
-        return binary(Formula.Operator.POWER, base, exponent);
+        return binary(start, Formula.Operator.POWER, base, exponent);
     }
 
     private Formula atom() {
@@ -156,7 +161,7 @@ final class FormulaParser {
         String index = lexer.text();
         Span indexSpan = lexer.span();
         lexer.next();
-        if (Function.named(index).isPresent() || Constants.isConstant(index)) {
+        if (!Constants.isFreeName(index)) {
             throw FormulaException.at(indexSpan, "'" + index + "' cannot be a summation index");
         }
         enter();
@@ -181,8 +186,8 @@ final class FormulaParser {
         return span;
     }
 
-    private static Formula binary(Formula.Operator operator, Formula left, Formula right) {
-        return new Formula.Binary(operator, left, right, left.span().to(right.span()));
+    private Formula binary(Span start, Formula.Operator operator, Formula left, Formula right) {
+        return new Formula.Binary(operator, left, right, lexer.from(start));
     }
 
     private void enter() {

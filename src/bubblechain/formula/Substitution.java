@@ -1,5 +1,7 @@
 package bubblechain.formula;
 
+import java.util.ArrayDeque;
+import java.util.Deque;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
@@ -29,12 +31,29 @@ final class Substitution {
             return new Formula.Call(c.function(), arguments, c.span());
         }
         if (formula instanceof Formula.FiniteSum s) {
-            Map<String, Formula> inner = new HashMap<>(values);
-            inner.remove(s.index());
-            return new Formula.FiniteSum(
-                    s.index(), apply(s.from(), values), apply(s.to(), values), apply(s.body(), inner), s.span());
+            return applyToSum(s, values);
         }
         return formula;
+    }
+
+    /** The index hides an outer name, and is renamed if a formula that enters the body means another thing by it. */
+    private static Formula applyToSum(Formula.FiniteSum s, Map<String, Formula> values) {
+        Map<String, Formula> inner = new HashMap<>(values);
+        inner.remove(s.index());
+        Set<String> used = new HashSet<>();
+        collectNames(s.body(), Set.of(), used);
+        inner.keySet().retainAll(used);
+        Set<String> entering = new HashSet<>();
+        inner.values().forEach(value -> collectNames(value, Set.of(), entering));
+        String index = s.index();
+        if (entering.contains(index)) {
+            while (entering.contains(index) || used.contains(index) || values.containsKey(index)) {
+                index += "_";
+            }
+            inner.put(s.index(), new Formula.Name(index, s.span()));
+        }
+        return new Formula.FiniteSum(
+                index, apply(s.from(), values), apply(s.to(), values), apply(s.body(), inner), s.span());
     }
 
     static void collectNames(Formula formula, Set<String> bound, Set<String> found) {
@@ -54,6 +73,44 @@ final class Substitution {
             inner.add(s.index());
             collectNames(s.body(), inner, found);
         }
+    }
+
+    private record Level(Formula formula, int depth) {}
+
+    /**
+     * Refuses a tree so deep that walking it would exhaust the stack; names count with the height given for them.
+     *
+     * @return the height of the tree
+     */
+    static int requireShallow(Formula formula, Map<String, Integer> heights) {
+        int height = 0;
+        Deque<Level> open = new ArrayDeque<>(List.of(new Level(formula, 1)));
+        while (!open.isEmpty()) {
+            Level level = open.pop();
+            int below = level.formula() instanceof Formula.Name n ? heights.getOrDefault(n.name(), 1) - 1 : 0;
+            height = Math.max(height, level.depth() + below);
+            children(level.formula()).forEach(child -> open.push(new Level(child, level.depth() + 1)));
+        }
+        if (height > FormulaLimits.HEIGHT) {
+            throw FormulaException.at(
+                    formula.span(),
+                    "too long a chain of operations (" + height + " levels; the limit is " + FormulaLimits.HEIGHT
+                            + "); group the terms with parentheses or use sum(k, 1, n, ...)");
+        }
+        return height;
+    }
+
+    private static List<Formula> children(Formula formula) {
+        if (formula instanceof Formula.Negation n) {
+            return List.of(n.operand());
+        } else if (formula instanceof Formula.Binary b) {
+            return List.of(b.left(), b.right());
+        } else if (formula instanceof Formula.Call c) {
+            return c.arguments();
+        } else if (formula instanceof Formula.FiniteSum s) {
+            return List.of(s.from(), s.to(), s.body());
+        }
+        return List.of();
     }
 
     /** Number of nodes after every name with a known size is written out; saturates. */
