@@ -171,6 +171,19 @@ def chain_rows():
     return rows
 
 
+def other_chain_rows():
+    """K_k = c_k p^k/(2^k k!) of chains whose nearest singularity is another one: no limit."""
+    weights = kernels.taylor(kernels.adler, mpf(1) / 2, 512, 13)
+    rows = [("chain-adler", p, "", "1", k, w / 3 * (mpf(p) / 2) ** k) for p in (2, 4) for k, w in enumerate(weights)]
+    on_shell = kernels.taylor(kernels.pole_mass_on_shell, mpf(1) / 4, 512, 14)
+    tilde = kernels.borel_weights(kernels.taylor(kernels.gamma_m_half, mpf(5) / 4, 512, 14))
+    half = 4 * mp.exp(mpf(5) / 6)
+    for k in range(13):
+        rest = on_shell[k + 1] - tilde[k + 1] - half * mpf(2) ** k
+        rows.append(("chain-pole-mass-beyond-half", 3, "", "1", k, rest * (mpf(3) / 2) ** k))
+    return rows
+
+
 def null_rows():
     beta = beta_function(4)
     a = [(beta[0] / 2) ** n for n in range(1, 16)]
@@ -217,7 +230,9 @@ HEADER = """# Truncated sum rule for the strength K of (1-2u/p)^(-1-b), f(R) = R
 # K_k = (2/p) Gamma(1+b) sum_{j<=k} S_j p^j/Gamma(1+b+j), S_j from the recursion written in tests/referee/sum_rule.py. 45 digits.
 # lambda: the series is rewritten exactly with R' = lambda R and divided by lambda^p. k: index of the last term (k+1 loops).
 # chain-pole-mass: c_n of the pole mass, mu = scale, one-loop running, without CF/beta0: K_k = c_k/(2^k k!) at lambda 1;
-# chain-pole-mass-limit: the value for k to infinity, 4 exp(5/6). null-test: a_n = (beta0/2)^n, nl = 4, beta_0..beta_4, 0 beyond.
+# chain-pole-mass-limit: the value for k to infinity, 4 exp(5/6). chain-pole-mass-beyond-half: the same at p = 3 after the pole
+# at u = 1/2 is taken out; chain-adler: c_n/3 of the Adler function. Both have no limit: a nearer singularity wins.
+# null-test: a_n = (beta0/2)^n, nl = 4, beta_0..beta_4, 0 beyond.
 # constructed-*: S = (1, 7/10, -3/10, 0, ...), nl = 4, beta_0..beta_2, 0 beyond: -strength K; -coefficient a_k with k = n;
 # -ratio a_81 over the asymptotic formula of K = 1 with corrections l <= 12 (tends to K).
 # qcd-pole-mass-N: N = beta0 K/(4 pi) of M/mbar(mbar), R = mbar, alpha_s^(nl), beta_0..beta_4; c_1..c_3 exact,
@@ -229,7 +244,7 @@ HEADER = """# Truncated sum rule for the strength K of (1-2u/p)^(-1-b), f(R) = R
 
 def main(path):
     mp.dps = 120
-    rows = chain_rows() + null_rows() + constructed_rows() + qcd_rows()
+    rows = chain_rows() + other_chain_rows() + null_rows() + constructed_rows() + qcd_rows()
     source = "computed with mpmath; tests/referee/sum_rule.py"
     with open(path, "w") as out:
         out.write(HEADER + "case,p,nl,lambda,k,value,source\n")
