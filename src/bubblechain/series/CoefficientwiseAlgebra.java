@@ -361,7 +361,9 @@ public final class CoefficientwiseAlgebra<C> implements SeriesAlgebra<LaurentSer
 
     /** sum_k taylor_k y^k by Horner's rule, for y without constant term. */
     private LaurentSeries<C> compose(List<C> taylor, LaurentSeries<C> y) {
-        LaurentSeries<C> result = constantSeries(taylor.get(taylor.size() - 1));
+        // y is unknown from x^end on, which matters when no term of it is known
+        LaurentSeries<C> unknown = new LaurentSeries<>(y.end(), List.of());
+        LaurentSeries<C> result = add(constantSeries(taylor.get(taylor.size() - 1)), unknown);
         for (int k = taylor.size() - 2; k >= 0; k--) {
             result = add(multiply(result, y), constantSeries(taylor.get(k)));
         }
