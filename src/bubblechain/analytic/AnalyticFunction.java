@@ -11,7 +11,6 @@ import bubblechain.series.CoefficientRing;
 import bubblechain.series.CoefficientwiseAlgebra;
 import bubblechain.series.ExactRing;
 import bubblechain.series.LaurentSeries;
-import java.util.Map;
 import java.util.Optional;
 import java.util.function.IntFunction;
 import org.jspecify.annotations.Nullable;
@@ -110,9 +109,8 @@ public final class AnalyticFunction {
     }
 
     private <C> Optional<LaurentSeries<C>> attempt(CoefficientwiseAlgebra<C> algebra, Rational point) {
-        LaurentSeries<C> u = algebra.linear(ExactConstant.of(point), ExactConstant.ONE);
         try {
-            LaurentSeries<C> series = SeriesInterpretation.of(formula, algebra, Map.of(variable, u));
+            LaurentSeries<C> series = SeriesInterpretation.about(point, formula, algebra, variable);
             return Optional.of(slope.isZero() ? series : algebra.multiply(series, exponential(algebra, point)));
         } catch (PrecisionException tooShort) {
             return Optional.empty();

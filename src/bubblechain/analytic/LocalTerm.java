@@ -3,6 +3,7 @@ package bubblechain.analytic;
 import bubblechain.analytic.TermKey.GammaFactor;
 import bubblechain.analytic.TermKey.PolygammaFactor;
 import bubblechain.analytic.TermKey.SineFactor;
+import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.ExactFunctions;
 import bubblechain.exact.Rational;
@@ -18,6 +19,9 @@ import java.util.Map;
  * settled here, in exact arithmetic, before any approximate number enters.
  */
 final class LocalTerm {
+    /** Recurrence steps, times the power or order, from an argument down to (0,1]. */
+    private static final int LARGEST_DISTANCE = 10_000;
+
     private final Rational point;
     private final TermKey key;
     private final List<Polynomial> above = new ArrayList<>();
@@ -62,7 +66,7 @@ final class LocalTerm {
     private void addGamma(GammaFactor gamma, int power) {
         Rational z = argument(gamma.shift(), gamma.slope());
         Rational s = z.subtract(Rational.of(z.ceiling())).add(1);
-        int steps = z.subtract(s).intValueExact();
+        int steps = steps(z, s, Math.abs(power));
         for (int j = 0; j < steps; j++) {
             addFactor(s.add(j), gamma.slope(), power);
         }
@@ -71,6 +75,16 @@ final class LocalTerm {
         }
         constant = constant.multiply(ExactFunctions.gamma(s).power(power));
         gammas.add(new GammaPower(s, gamma.slope(), power));
+    }
+
+    /** z - s, refused if so many factors or terms would arise that the expansion never ends. */
+    private int steps(Rational z, Rational s, int each) {
+        Rational difference = z.subtract(s);
+        if (difference.abs().multiply(each).compareTo(Rational.of(LARGEST_DISTANCE)) > 0) {
+            throw new DomainException("the point u = " + point + " is too far out: an argument of " + z
+                    + " needs more than " + LARGEST_DISTANCE + " steps down to (0,1]");
+        }
+        return difference.intValueExact();
     }
 
     /** The factor (value + slope x)^power. */
@@ -130,8 +144,8 @@ final class LocalTerm {
     private <S> S polygamma(SeriesAlgebra<S> algebra, PolygammaFactor factor) {
         Rational z = argument(factor.shift(), factor.slope());
         Rational s = z.subtract(Rational.of(z.ceiling())).add(1);
-        int steps = z.subtract(s).intValueExact();
         int n = factor.n();
+        int steps = steps(z, s, n + 1);
         BigInteger factorial = ExactFunctions.factorial(n);
         Rational scale = Rational.of(n % 2 == 0 ? factorial : factorial.negate());
         S sum = algebra.polygammaTail(n, s, factor.slope());

@@ -78,14 +78,13 @@ public final class NormalForm {
         }
         Rational shift = reduced(constant);
         int steps = steps(constant, shift);
-        RationalFunction factor = RationalFunction.ONE;
-        for (int j = 0; j < steps; j++) {
-            factor = factor.multiply(RationalFunction.of(Polynomial.linear(shift.add(j), slope)));
+        Polynomial product = Polynomial.ONE;
+        for (int j = 0; j < Math.abs(steps); j++) {
+            Rational first = steps > 0 ? shift : shift.add(steps);
+            product = product.multiply(Polynomial.linear(first.add(j), slope));
         }
-        for (int j = 1; j <= -steps; j++) {
-            factor = factor.multiply(
-                    RationalFunction.of(Polynomial.linear(shift.subtract(j), slope)).inverse());
-        }
+        RationalFunction factor =
+                steps >= 0 ? RationalFunction.of(product) : RationalFunction.of(Polynomial.ONE, product);
         Map<GammaFactor, Integer> gammas = Map.of(new GammaFactor(slope, shift), 1);
         return of(new TermKey(ExactConstant.ONE, ExactConstant.ZERO, gammas, Map.of(), Map.of()), factor);
     }
@@ -99,6 +98,10 @@ public final class NormalForm {
         int steps = steps(constant, shift);
         BigInteger factorial = ExactFunctions.factorial(n);
         Rational sign = Rational.of(n % 2 == 0 ? factorial : factorial.negate());
+        if ((long) Math.abs(steps) * (n + 1) > Polynomial.LARGEST_DEGREE) {
+            throw new DomainException("the constant " + constant + " in the argument of a polygamma function of order " + n
+                    + " is too large");
+        }
         RationalFunction rest = RationalFunction.ZERO;
         for (int j = 0; j < steps; j++) {
             rest = rest.add(RationalFunction.of(Polynomial.linear(shift.add(j), slope)).power(-n - 1).multiply(sign));

@@ -143,7 +143,7 @@ final class NormalFormCompiler {
             case GAMMA -> NormalForm.gamma(rational(linear.constant(), last), rational(linear.slope(), last));
             case DIGAMMA -> NormalForm.polygamma(0, rational(linear.constant(), last), rational(linear.slope(), last));
             case POLYGAMMA -> NormalForm.polygamma(
-                    polygammaOrder(c), rational(linear.constant(), last), rational(linear.slope(), last));
+                    ConstantValue.polygammaOrder(c.arguments().get(0), indices), rational(linear.constant(), last), rational(linear.slope(), last));
             case EXP -> NormalForm.exponential(linear.constant(), linear.slope());
             case SIN -> sine(linear.constant(), linear.slope(), last);
             case COS -> sine(
@@ -151,16 +151,6 @@ final class NormalFormCompiler {
             case LN, SQRT, ZETA, POLYLOG -> throw new InadmissibleFormulaException(
                     c.span(), c.function().text() + " of an expression with u has no exact list of singularities");
         };
-    }
-
-    private int polygammaOrder(Formula.Call c) {
-        Formula order = c.arguments().get(0);
-        int n = ConstantValue.integer(order, indices, "the order of a polygamma");
-        if (n < 0 || n > FormulaLimits.SUM_TERMS) {
-            throw FormulaException.at(
-                    order.span(), "the order of a polygamma lies between 0 and " + FormulaLimits.SUM_TERMS);
-        }
-        return n;
     }
 
     private static NormalForm sine(ExactConstant constant, ExactConstant slope, Formula place) {

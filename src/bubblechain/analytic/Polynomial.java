@@ -1,6 +1,7 @@
 package bubblechain.analytic;
 
 import bubblechain.exact.Ball;
+import bubblechain.exact.DomainException;
 import bubblechain.exact.Rational;
 import java.util.ArrayList;
 import java.util.List;
@@ -9,6 +10,9 @@ import java.util.List;
 public final class Polynomial {
     public static final Polynomial ZERO = new Polynomial(List.of());
     public static final Polynomial ONE = constant(Rational.ONE);
+
+    /** Degrees beyond this are refused. */
+    public static final int LARGEST_DEGREE = 1_000;
 
     private final List<Rational> coefficients;
 
@@ -76,10 +80,12 @@ public final class Polynomial {
         return of(coefficients.stream().map(c -> c.multiply(factor)).toList());
     }
 
+    /** @throws DomainException if the degree of the product is above {@link #LARGEST_DEGREE} */
     public Polynomial multiply(Polynomial other) {
         if (isZero() || other.isZero()) {
             return ZERO;
         }
+        requireDegree((long) degree() + other.degree());
         List<Rational> product = new ArrayList<>();
         for (int k = 0; k <= degree() + other.degree(); k++) {
             Rational sum = Rational.ZERO;
@@ -91,7 +97,14 @@ public final class Polynomial {
         return of(product);
     }
 
+    private static void requireDegree(long degree) {
+        if (degree > LARGEST_DEGREE) {
+            throw new DomainException("a polynomial of degree " + degree + " in u; the limit is " + LARGEST_DEGREE);
+        }
+    }
+
     public Polynomial power(int exponent) {
+        requireDegree((long) Math.max(degree(), 0) * exponent);
         Polynomial result = ONE;
         for (int k = 0; k < exponent; k++) {
             result = result.multiply(this);
@@ -120,14 +133,7 @@ public final class Polynomial {
 
     /** The monic greatest common divisor; zero if both are zero. */
     public Polynomial gcd(Polynomial other) {
-        Polynomial a = this;
-        Polynomial b = other;
-        while (!b.isZero()) {
-            Polynomial remainder = a.divideAndRemainder(b)[1].monic();
-            a = b;
-            b = remainder;
-        }
-        return a.monic();
+        return PolynomialGcd.of(this, other);
     }
 
     /** This divided by its leading coefficient. */

@@ -24,11 +24,14 @@ import java.util.Optional;
 public final class SeriesInterpretation<S> {
     private final SeriesAlgebra<S> algebra;
     private final Map<String, S> variables;
+    private final Map<String, Rational> points;
     private final Map<String, ExactConstant> indices = new HashMap<>();
+    private int steps;
 
-    private SeriesInterpretation(SeriesAlgebra<S> algebra, Map<String, S> variables) {
+    private SeriesInterpretation(SeriesAlgebra<S> algebra, Map<String, S> variables, Map<String, Rational> points) {
         this.algebra = algebra;
         this.variables = variables;
+        this.points = points;
     }
 
     /**
@@ -38,10 +41,24 @@ public final class SeriesInterpretation<S> {
      * @throws FormulaException if a sub-expression has no expansion here, with the place
      */
     public static <S> S of(Formula formula, SeriesAlgebra<S> algebra, Map<String, S> variables) {
-        return new SeriesInterpretation<>(algebra, variables).value(formula);
+        return new SeriesInterpretation<>(algebra, variables, Map.of()).value(formula);
+    }
+
+    /**
+     * The series of a formula in powers of {@code variable - point}; arguments linear in the variable are exact, so that
+     * gamma(u - 4/3) has its pole at u = 1/3 in every algebra.
+     *
+     * @throws FormulaException if a sub-expression has no expansion here, with the place
+     */
+    public static <S> S about(Rational point, Formula formula, SeriesAlgebra<S> algebra, String variable) {
+        S series = algebra.linear(ExactConstant.of(point), ExactConstant.ONE);
+        return new SeriesInterpretation<>(algebra, Map.of(variable, series), Map.of(variable, point)).value(formula);
     }
 
     private S value(Formula formula) {
+        if (++steps > FormulaLimits.STEPS) {
+            throw FormulaException.at(formula.span(), "the sums of this formula have too many terms in all");
+        }
         try {
             return unchecked(formula);
         } catch (FormulaException placed) {
@@ -72,7 +89,7 @@ public final class SeriesInterpretation<S> {
             case ADD -> algebra.add(value(b.left()), value(b.right()));
             case SUBTRACT -> algebra.add(value(b.left()), algebra.negate(value(b.right())));
             case MULTIPLY -> algebra.multiply(value(b.left()), value(b.right()));
-            case DIVIDE -> algebra.multiply(value(b.left()), algebra.inverse(value(b.right())));
+            case DIVIDE -> algebra.multiply(value(b.left()), algebra.inverse(exactIfLinear(b.right())));
             case POWER -> power(b);
         };
     }
@@ -91,10 +108,31 @@ public final class SeriesInterpretation<S> {
                     throw FormulaException.at(
                             b.right().span(), "an exponent of more than " + FormulaLimits.EXPONENT + " in size");
                 }
-                return algebra.power(value(b.left()), q.get().intValueExact());
+                return algebra.power(exactIfLinear(b.left()), q.get().intValueExact());
             }
         }
-        return algebra.exp(algebra.multiply(value(b.right()), algebra.ln(value(b.left()))));
+        return algebra.exp(algebra.multiply(value(b.right()), algebra.ln(exactIfLinear(b.left()))));
+    }
+
+    /** The value, formed exactly if the formula is linear in the variables. */
+    private S exactIfLinear(Formula formula) {
+        Optional<LinearForm> form = LinearForm.of(formula, variables.keySet(), indices);
+        if (form.isEmpty()) {
+            return value(formula);
+        }
+        ExactConstant constant = form.get().constant();
+        Map<String, ExactConstant> slopes = form.get().slopes();
+        if (slopes.size() == 1 && points.keySet().containsAll(slopes.keySet())) {
+            String variable = slopes.keySet().iterator().next();
+            ExactConstant slope = slopes.get(variable);
+            return algebra.linear(constant.add(slope.multiply(points.get(variable))), slope);
+        }
+        S sum = algebra.constant(constant);
+        for (Map.Entry<String, ExactConstant> term : slopes.entrySet()) {
+            S slope = algebra.constant(term.getValue());
+            sum = algebra.add(sum, algebra.multiply(slope, variables.get(term.getKey())));
+        }
+        return sum;
     }
 
     private S sum(Formula.FiniteSum s) {
@@ -118,12 +156,12 @@ public final class SeriesInterpretation<S> {
     }
 
     private S call(Formula.Call c) {
-        S argument = value(c.arguments().get(c.arguments().size() - 1));
+        S argument = exactIfLinear(c.arguments().get(c.arguments().size() - 1));
         return switch (c.function()) {
             case GAMMA -> algebra.gamma(argument);
             case DIGAMMA -> algebra.polygamma(0, argument);
             case POLYGAMMA -> algebra.polygamma(
-                    ConstantValue.integer(c.arguments().get(0), indices, "the order of a polygamma"), argument);
+                    ConstantValue.polygammaOrder(c.arguments().get(0), indices), argument);
             case LN -> algebra.ln(argument);
             case SQRT -> algebra.exp(algebra.multiply(algebra.ln(argument), Rational.HALF));
             case EXP -> algebra.exp(argument);

@@ -1,0 +1,142 @@
+package bubblechain.analytic;
+
+import bubblechain.analytic.RealRoots.Interval;
+import bubblechain.analytic.TermKey.GammaFactor;
+import bubblechain.exact.ExactConstant;
+import bubblechain.exact.Rational;
+import bubblechain.series.FixedSeries;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.TreeMap;
+
+/**
+ * A term of a normal form with its rational function split into u^valuation, a constant, factors (1 - u/root)^power with
+ * rational roots, and what is left.
+ *
+ * @param key       the transcendental part
+ * @param valuation power of u
+ * @param constant  value of the rest of the rational function at u = 0
+ * @param roots     powers of (1 - u/root)
+ * @param above     the numerator without rational roots, 1 at u = 0
+ * @param below     the denominator without rational roots, 1 at u = 0
+ */
+record FactoredTerm(
+        TermKey key,
+        int valuation,
+        Rational constant,
+        Map<Rational, Integer> roots,
+        Polynomial above,
+        Polynomial below) {
+    /** Poles of each gamma function looked at for the nearest one that does not cancel. */
+    private static final int POLES_SEARCHED = 24;
+
+    static FactoredTerm of(TermKey key, RationalFunction factor) {
+        Map<Rational, Integer> roots = new HashMap<>();
+        int valuation = factor.numerator().valuation() - factor.denominator().valuation();
+        Polynomial above = split(factor.numerator().dividedByPower(factor.numerator().valuation()), 1, roots);
+        Polynomial below = split(factor.denominator().dividedByPower(factor.denominator().valuation()), -1, roots);
+        Rational constant = above.coefficient(0).divide(below.coefficient(0));
+        return new FactoredTerm(
+                key, valuation, constant, Map.copyOf(roots), above.multiply(above.coefficient(0).inverse()),
+                below.multiply(below.coefficient(0).inverse()));
+    }
+
+    /** Takes the rational roots out; the rest keeps the value at u = 0. */
+    private static Polynomial split(Polynomial polynomial, int sign, Map<Rational, Integer> roots) {
+        Polynomial rest = polynomial;
+        List<Polynomial> factors = RealRoots.squarefreeFactors(polynomial);
+        for (int k = 0; k < factors.size(); k++) {
+            for (Interval interval : RealRoots.of(factors.get(k))) {
+                if (interval.isPoint()) {
+                    Rational root = interval.lower();
+                    roots.merge(root, sign * (k + 1), Integer::sum);
+                    Polynomial linear = Polynomial.linear(Rational.ONE, root.inverse().negate());
+                    rest = rest.divideExactly(linear.power(k + 1));
+                }
+            }
+        }
+        return rest;
+    }
+
+    /** The exponential and the gammas alone, which terms can share. */
+    TermKey functions() {
+        return new TermKey(ExactConstant.ONE, key.slope(), key.gammas(), Map.of(), Map.of());
+    }
+
+    /** A radius within which the term has no singular point but u = 0; empty if it has none at all. */
+    Optional<Rational> radius() {
+        Map<Rational, Integer> powers = new TreeMap<>(roots);
+        key.gammas().forEach((gamma, power) -> {
+            for (int j = 0; j < POLES_SEARCHED; j++) {
+                powers.merge(pole(gamma, j), -power, Integer::sum);
+            }
+        });
+        Optional<Rational> nearest = powers.entrySet().stream()
+                .filter(e -> e.getValue() < 0)
+                .map(e -> e.getKey().abs())
+                .min(Rational::compareTo);
+        for (TermKey.PolygammaFactor p : key.polygammas().keySet()) {
+            nearest = smaller(nearest, p.shift().divide(p.slope()).abs());
+        }
+        for (Interval interval : RealRoots.of(below)) {
+            Rational size = interval.lower().abs().compareTo(interval.upper().abs()) < 0
+                    ? interval.lower().abs()
+                    : interval.upper().abs();
+            nearest = smaller(nearest, powerOfTwoBelow(size.toDouble()));
+        }
+        for (ComplexRoots.Pair pair : ComplexRoots.of(below.gcd(below.derivative()).isConstant()
+                ? below
+                : below.divideExactly(below.gcd(below.derivative())))) {
+            nearest = smaller(nearest, powerOfTwoBelow(Math.hypot(pair.re(), pair.im())));
+        }
+        return nearest;
+    }
+
+    private static Optional<Rational> smaller(Optional<Rational> first, Rational second) {
+        return first.isPresent() && first.get().compareTo(second) < 0 ? first : Optional.of(second);
+    }
+
+    /** A number with small numerator and denominator; only the scale of the variable hangs on it. */
+    private static Rational powerOfTwoBelow(double size) {
+        int exponent = Math.getExponent(Math.max(size * 0.999, 1e-6));
+        return Rational.TWO.power(exponent);
+    }
+
+    static Rational pole(GammaFactor gamma, int j) {
+        return gamma.shift().add(j).divide(gamma.slope()).negate();
+    }
+
+    /**
+     * A series in v times the rational function of this term and the given further factors, u^valuation taken as
+     * u^(shift + valuation)/u^shift.
+     */
+    FixedSeries applyTo(FixedSeries series, Map<Rational, Integer> further, Rational radius, int shift) {
+        Map<Rational, Integer> powers = new HashMap<>(roots);
+        further.forEach((root, power) -> powers.merge(root, power, Integer::sum));
+        FixedSeries result = series;
+        if (above.degree() > 0) {
+            result = result.times(scaled(above, radius));
+        }
+        result = LinearFactors.apply(result, powers, radius);
+        if (below.degree() > 0) {
+            result = result.over(scaled(below, radius));
+        }
+        Rational weight = constant.multiply(radius.power(valuation + shift));
+        if (!weight.equals(Rational.ONE)) {
+            result = result.times(List.of(weight));
+        }
+        return valuation + shift == 0 ? result : result.shifted(valuation + shift);
+    }
+
+    private static List<Rational> scaled(Polynomial polynomial, Rational radius) {
+        List<Rational> result = new java.util.ArrayList<>();
+        Rational power = Rational.ONE;
+        for (Rational c : polynomial.coefficients()) {
+            result.add(c.multiply(power));
+            power = power.multiply(radius);
+        }
+        return result;
+    }
+}

@@ -1,0 +1,176 @@
+package bubblechain.analytic;
+
+import bubblechain.analytic.TermKey.PolygammaFactor;
+import bubblechain.exact.Ball;
+import bubblechain.exact.ConstantFunctions;
+import bubblechain.exact.ExactConstant;
+import bubblechain.exact.Rational;
+import bubblechain.series.FixedSeries;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * The Taylor coefficients of a normal form about u = 0 on the fixed-point route, with one exponential for every distinct
+ * product of gamma functions and exponentials.
+ *
+ * <p>The variable is v = u/rho, rho the distance of the nearest singular point, so that the coefficients stay of order
+ * one. Of every gamma function the poles nearest to the origin are taken out as linear factors; what is left is
+ * exponentiated, and its coefficients fall so fast that most of the products are short. The linear factors cost one short
+ * pass over the digits for four of them.
+ *
+ * @param radius       rho
+ * @param coefficients balls for the coefficients of v^0, v^1, ... of u^(shift) times the function
+ * @param shift        the order of the pole at u = 0
+ */
+public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift) {
+    public FixedExpansion {
+        coefficients = List.copyOf(coefficients);
+    }
+
+    /**
+     * The expansion, if this route can take the form.
+     *
+     * @param end  the first power of u that is not needed
+     * @param bits absolute precision of the coefficients in v, before the constants of the terms
+     * @return empty if the form has no singular point to set the scale, or a number leaves the fixed-point range
+     */
+    public static Optional<FixedExpansion> of(NormalForm form, int end, int bits) {
+        List<FactoredTerm> terms = new ArrayList<>();
+        form.terms().forEach((key, factor) -> terms.add(FactoredTerm.of(key, factor)));
+        Optional<Rational> radius = radius(terms);
+        if (radius.isEmpty()) {
+            return Optional.empty();
+        }
+        int shift = Math.max(0, terms.stream().mapToInt(t -> -t.valuation()).max().orElse(0));
+        try {
+            Computation computation = new Computation(radius.get(), end + shift, shift, FixedSeries.limbsFor(bits));
+            return Optional.of(new FixedExpansion(radius.get(), computation.sum(terms), shift));
+        } catch (ArithmeticException outOfRange) {
+            return Optional.empty();
+        }
+    }
+
+    /** The distance within which no term of the form has a singular point but u = 0; empty if there is none at all. */
+    public static Optional<Rational> radius(NormalForm form) {
+        List<FactoredTerm> terms = new ArrayList<>();
+        form.terms().forEach((key, factor) -> terms.add(FactoredTerm.of(key, factor)));
+        return radius(terms);
+    }
+
+    private static Optional<Rational> radius(List<FactoredTerm> terms) {
+        return terms.stream().flatMap(t -> t.radius().stream()).min(Rational::compareTo);
+    }
+
+    /** The work state of one expansion. */
+    private static final class Computation {
+        private final Rational radius;
+        private final int length;
+        private final int shift;
+        private final int limbs;
+        private final int bits;
+        private final GammaProducts gammas;
+
+        Computation(Rational radius, int length, int shift, int limbs) {
+            this.radius = radius;
+            this.length = length;
+            this.shift = shift;
+            this.limbs = limbs;
+            this.bits = FixedSeries.bits(limbs);
+            this.gammas = new GammaProducts(radius, length, limbs);
+        }
+
+        /** Terms with the same gammas and exponential share them; within a group, those with the same constant are added. */
+        List<Ball> sum(List<FactoredTerm> terms) {
+            Map<TermKey, Map<ExactConstant, List<FactoredTerm>>> groups = new LinkedHashMap<>();
+            for (FactoredTerm term : terms) {
+                groups.computeIfAbsent(term.functions(), k -> new LinkedHashMap<>())
+                        .computeIfAbsent(term.key().constant(), k -> new ArrayList<>())
+                        .add(term);
+            }
+            List<Ball> total = new ArrayList<>();
+            for (Map.Entry<TermKey, Map<ExactConstant, List<FactoredTerm>>> group : groups.entrySet()) {
+                GammaProducts.Product product = gammas.of(group.getKey());
+                group.getValue().forEach((constant, members) -> {
+                    Ball weight = constant.multiply(product.constant()).toBall(bits);
+                    addScaled(total, members(members, product), weight);
+                });
+            }
+            return total;
+        }
+
+        private void addScaled(List<Ball> total, FixedSeries series, Ball weight) {
+            for (int k = 0; k < length; k++) {
+                Ball value = series.coefficient(k).multiply(weight, bits);
+                if (total.size() <= k) {
+                    total.add(value);
+                } else {
+                    total.set(k, total.get(k).add(value, bits));
+                }
+            }
+        }
+
+        /** The sum of terms with one product of gammas and one constant, that constant left out. */
+        private FixedSeries members(List<FactoredTerm> members, GammaProducts.Product product) {
+            boolean elementary = members.stream()
+                    .allMatch(t -> t.key().polygammas().isEmpty() && t.key().sines().isEmpty());
+            if (elementary) {
+                return members.stream()
+                        .map(t -> t.applyTo(product.series(), product.removed(), radius, shift))
+                        .reduce(FixedSeries::add)
+                        .orElseThrow();
+            }
+            // the linear factors taken out of the gammas are common to all: they are put back last
+            FixedSeries sum = members.stream()
+                    .map(t -> t.applyTo(transcendental(t), Map.of(), radius, shift))
+                    .reduce(FixedSeries::add)
+                    .orElseThrow();
+            return LinearFactors.apply(sum.multiply(product.series()), product.removed(), radius);
+        }
+
+        private FixedSeries transcendental(FactoredTerm term) {
+            FixedSeries result = FixedSeries.one(length, limbs);
+            boolean first = true;
+            for (Map.Entry<PolygammaFactor, Integer> factor : term.key().polygammas().entrySet()) {
+                FixedSeries series = gammas.polygamma(factor.getKey());
+                for (int k = 0; k < factor.getValue(); k++) {
+                    result = first ? series : result.multiply(series);
+                    first = false;
+                }
+            }
+            for (Map.Entry<TermKey.SineFactor, Integer> factor : term.key().sines().entrySet()) {
+                for (int k = 0; k < factor.getValue(); k++) {
+                    result = result.multiply(sine(factor.getKey()));
+                }
+            }
+            return result;
+        }
+
+        /** sin(c + b rho v) = sum_k sin(c + k pi/2) (b rho)^k v^k/k!. */
+        private FixedSeries sine(TermKey.SineFactor factor) {
+            Ball[] values = new Ball[4];
+            ExactConstant quarter = ExactConstant.PI.multiply(Rational.HALF);
+            ExactConstant angle = factor.constant();
+            for (int k = 0; k < values.length; k++) {
+                values[k] = ConstantFunctions.sine(angle, Rational.ZERO).toBall(bits + 32);
+                angle = angle.add(quarter);
+            }
+            FixedValues list = new FixedValues(length, limbs);
+            Ball power = Ball.ONE;
+            Rational step = factor.slope().multiply(radius);
+            for (int k = 0; k < length; k++) {
+                list.set(k, values[k % values.length].multiply(power, bits + 32));
+                power = power.multiply(step.divide(k + 1L), bits + 32);
+            }
+            return list.series();
+        }
+    }
+
+    /** The ball of the coefficient of u^n times rho^n. */
+    public Ball scaled(int n) {
+        Ball value = coefficients.get(n + shift);
+        return shift == 0 ? value : value.multiply(radius.power(-shift), Math.max(64, value.accuracyBits() + 64));
+    }
+}
