@@ -31,59 +31,81 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
     }
 
     /**
-     * The expansion, if this route can take the form.
+     * Orders up to which a precision is needed.
      *
      * @param end  the first power of u that is not needed
      * @param bits absolute precision of the coefficients in v, before the constants of the terms
+     */
+    public record Stage(int end, int bits) {}
+
+    /** The expansion at one precision. */
+    public static Optional<FixedExpansion> of(NormalForm form, int end, int bits) {
+        return of(form, List.of(new Stage(end, bits)));
+    }
+
+    /**
+     * The expansion, if this route can take the form.
+     *
+     * @param stages falling precision for growing orders
      * @return empty if the form has no singular point to set the scale, or a number leaves the fixed-point range
      */
-    public static Optional<FixedExpansion> of(NormalForm form, int end, int bits) {
-        List<FactoredTerm> terms = new ArrayList<>();
-        form.terms().forEach((key, factor) -> terms.add(FactoredTerm.of(key, factor)));
+    public static Optional<FixedExpansion> of(NormalForm form, List<Stage> stages) {
+        List<FactoredTerm> terms = factored(form);
         Optional<Rational> radius = radius(terms);
         if (radius.isEmpty()) {
             return Optional.empty();
         }
         int shift = Math.max(0, terms.stream().mapToInt(t -> -t.valuation()).max().orElse(0));
+        int last = stages.get(stages.size() - 1).end() + shift;
+        GammaProducts gammas = new GammaProducts(
+                radius.get(), last, FixedSeries.limbsFor(stages.get(0).bits()));
+        List<Ball> coefficients = new ArrayList<>();
         try {
-            Computation computation = new Computation(radius.get(), end + shift, shift, FixedSeries.limbsFor(bits));
-            return Optional.of(new FixedExpansion(radius.get(), computation.sum(terms), shift));
+            for (Stage stage : stages) {
+                GammaProducts.Stage size =
+                        new GammaProducts.Stage(stage.end() + shift, FixedSeries.limbsFor(stage.bits()));
+                List<Ball> all = new Computation(radius.get(), shift, size, gammas).sum(terms, coefficients.size());
+                coefficients.addAll(all);
+            }
         } catch (ArithmeticException outOfRange) {
             return Optional.empty();
         }
+        return Optional.of(new FixedExpansion(radius.get(), coefficients, shift));
+    }
+
+    private static List<FactoredTerm> factored(NormalForm form) {
+        List<FactoredTerm> terms = new ArrayList<>();
+        form.terms().forEach((key, factor) -> terms.add(FactoredTerm.of(key, factor)));
+        return terms;
     }
 
     /** The distance within which no term of the form has a singular point but u = 0; empty if there is none at all. */
     public static Optional<Rational> radius(NormalForm form) {
-        List<FactoredTerm> terms = new ArrayList<>();
-        form.terms().forEach((key, factor) -> terms.add(FactoredTerm.of(key, factor)));
-        return radius(terms);
+        return radius(factored(form));
     }
 
     private static Optional<Rational> radius(List<FactoredTerm> terms) {
         return terms.stream().flatMap(t -> t.radius().stream()).min(Rational::compareTo);
     }
 
-    /** The work state of one expansion. */
+    /** The work state of one stage. */
     private static final class Computation {
         private final Rational radius;
-        private final int length;
         private final int shift;
-        private final int limbs;
+        private final GammaProducts.Stage stage;
         private final int bits;
         private final GammaProducts gammas;
 
-        Computation(Rational radius, int length, int shift, int limbs) {
+        Computation(Rational radius, int shift, GammaProducts.Stage stage, GammaProducts gammas) {
             this.radius = radius;
-            this.length = length;
             this.shift = shift;
-            this.limbs = limbs;
-            this.bits = FixedSeries.bits(limbs);
-            this.gammas = new GammaProducts(radius, length, limbs);
+            this.stage = stage;
+            this.bits = FixedSeries.bits(stage.limbs());
+            this.gammas = gammas;
         }
 
         /** Terms with the same gammas and exponential share them; within a group, those with the same constant are added. */
-        List<Ball> sum(List<FactoredTerm> terms) {
+        List<Ball> sum(List<FactoredTerm> terms, int from) {
             Map<TermKey, Map<ExactConstant, List<FactoredTerm>>> groups = new LinkedHashMap<>();
             for (FactoredTerm term : terms) {
                 groups.computeIfAbsent(term.functions(), k -> new LinkedHashMap<>())
@@ -92,22 +114,23 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
             }
             List<Ball> total = new ArrayList<>();
             for (Map.Entry<TermKey, Map<ExactConstant, List<FactoredTerm>>> group : groups.entrySet()) {
-                GammaProducts.Product product = gammas.of(group.getKey());
+                GammaProducts.Product product = gammas.of(group.getKey(), stage);
                 group.getValue().forEach((constant, members) -> {
                     Ball weight = constant.multiply(product.constant()).toBall(bits);
-                    addScaled(total, members(members, product), weight);
+                    addScaled(total, members(members, product), weight, from);
                 });
             }
             return total;
         }
 
-        private void addScaled(List<Ball> total, FixedSeries series, Ball weight) {
-            for (int k = 0; k < length; k++) {
+        private void addScaled(List<Ball> total, FixedSeries series, Ball weight, int from) {
+            boolean first = total.isEmpty();
+            for (int k = from; k < stage.length(); k++) {
                 Ball value = series.coefficient(k).multiply(weight, bits);
-                if (total.size() <= k) {
+                if (first) {
                     total.add(value);
                 } else {
-                    total.set(k, total.get(k).add(value, bits));
+                    total.set(k - from, total.get(k - from).add(value, bits));
                 }
             }
         }
@@ -131,10 +154,10 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
         }
 
         private FixedSeries transcendental(FactoredTerm term) {
-            FixedSeries result = FixedSeries.one(length, limbs);
+            FixedSeries result = FixedSeries.one(stage.length(), stage.limbs());
             boolean first = true;
             for (Map.Entry<PolygammaFactor, Integer> factor : term.key().polygammas().entrySet()) {
-                FixedSeries series = gammas.polygamma(factor.getKey());
+                FixedSeries series = gammas.polygamma(factor.getKey(), stage);
                 for (int k = 0; k < factor.getValue(); k++) {
                     result = first ? series : result.multiply(series);
                     first = false;
@@ -157,10 +180,10 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
                 values[k] = ConstantFunctions.sine(angle, Rational.ZERO).toBall(bits + 32);
                 angle = angle.add(quarter);
             }
-            FixedValues list = new FixedValues(length, limbs);
+            FixedValues list = new FixedValues(stage.length(), stage.limbs());
             Ball power = Ball.ONE;
             Rational step = factor.slope().multiply(radius);
-            for (int k = 0; k < length; k++) {
+            for (int k = 0; k < stage.length(); k++) {
                 list.set(k, values[k % values.length].multiply(power, bits + 32));
                 power = power.multiply(step.divide(k + 1L), bits + 32);
             }

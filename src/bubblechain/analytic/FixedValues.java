@@ -1,7 +1,6 @@
 package bubblechain.analytic;
 
 import bubblechain.exact.Ball;
-import bubblechain.exact.Rational;
 import bubblechain.series.FixedSeries;
 import java.math.BigInteger;
 import java.util.ArrayList;
@@ -21,9 +20,8 @@ final class FixedValues {
     }
 
     void set(int k, Ball ball) {
-        Rational midpoint = ball.midpoint();
         int bits = FixedSeries.bits(limbs);
-        values.set(k, midpoint.numerator().shiftLeft(bits).divide(midpoint.denominator()));
+        values.set(k, ball.scaledMidpoint(bits));
         errors[k] = ball.radius().scale(bits).toDouble() + 1;
     }
 

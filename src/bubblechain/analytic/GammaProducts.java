@@ -9,7 +9,8 @@ import bubblechain.exact.ExactFunctions;
 import bubblechain.exact.Rational;
 import bubblechain.series.BallRing;
 import bubblechain.series.FixedSeries;
-import java.math.BigInteger;
+import bubblechain.series.PowerSums;
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.Map;
 
@@ -29,6 +30,7 @@ final class GammaProducts {
     private final int bits;
     private final int removal;
     private final BallRing ring;
+    private final Map<TermKey, Known> products = new HashMap<>();
 
     GammaProducts(Rational radius, int length, int limbs) {
         this.radius = radius;
@@ -56,7 +58,21 @@ final class GammaProducts {
      */
     record Product(FixedSeries series, Map<Rational, Integer> removed, ExactConstant constant) {}
 
-    Product of(TermKey key) {
+    /** What is kept of a product between the stages of a computation. */
+    private record Known(FixedSeries slopes, Product product) {}
+
+    /** The product to some order and precision; a second call may go further with fewer limbs. */
+    Product of(TermKey key, Stage stage) {
+        Known known = products.computeIfAbsent(key, this::first);
+        FixedSeries slopes = known.slopes().truncated(stage.length(), stage.limbs());
+        FixedSeries before = known.product().series();
+        FixedSeries series = slopes.expOfIntegral(before.truncated(before.length(), stage.limbs()));
+        Product product = new Product(series, known.product().removed(), known.product().constant());
+        products.put(key, new Known(known.slopes(), product));
+        return product;
+    }
+
+    private Known first(TermKey key) {
         Map<Rational, Integer> removed = new HashMap<>();
         ExactConstant constant = ExactConstant.ONE;
         ExactConstant first = key.slope();
@@ -70,8 +86,8 @@ final class GammaProducts {
             first = first.add(ExactFunctions.digamma(gamma.shift()).multiply(gamma.slope().multiply(power)));
         }
         removed.values().removeIf(power -> power == 0);
-        FixedSeries series = logarithmicDerivative(key, removed, first).expOfIntegral();
-        return new Product(series, removed, constant);
+        FixedSeries slopes = logarithmicDerivative(key, removed, first);
+        return new Known(slopes, new Product(FixedSeries.one(1, limbs), removed, constant));
     }
 
     private int polesRemoved(GammaFactor gamma) {
@@ -87,8 +103,15 @@ final class GammaProducts {
         int largest = key.gammas().isEmpty() ? 1 : largestOrder(key);
         Ball[] sums = zetaSums(key, largest);
         sums[1] = first.multiply(radius).toBall(bits);
-        // a removed factor (1 - u/root)^power was in the product, so its -power (rho/root)^k goes
-        removed.forEach((root, power) -> addPowers(sums, radius.divide(root), power, largest));
+        PowerSums powers = PowerSums.of(length, limbs);
+        removed.forEach((root, power) -> {
+            Rational ratio = radius.divide(root);
+            if (PowerSums.fits(ratio)) {
+                powers.add(ratio, power, largest);
+            } else {
+                addPowers(sums, ratio, power, largest);
+            }
+        });
         for (int k = 1; k < length; k++) {
             if (k <= largest) {
                 values.set(k, sums[k]);
@@ -96,7 +119,8 @@ final class GammaProducts {
                 values.setZero(k, 1);
             }
         }
-        return values.series();
+        // a removed factor (1 - u/root)^power was in the product, so its -power (rho/root)^k goes
+        return values.series().add(powers.series());
     }
 
     /** Beyond this order k l_k is below 2^-8 units of the last place, by |k l_k| <= sum |m| x^k (1 + (s+J)/(k-1)). */
@@ -121,7 +145,7 @@ final class GammaProducts {
     /** sum m (-b rho)^k zeta(k, s) for k = 2 .. largest. */
     private Ball[] zetaSums(TermKey key, int largest) {
         Ball[] sums = new Ball[Math.max(largest, 1) + 1];
-        java.util.Arrays.fill(sums, Ball.ZERO);
+        Arrays.fill(sums, Ball.ZERO);
         for (Map.Entry<GammaFactor, Integer> entry : key.gammas().entrySet()) {
             Rational step = entry.getKey().slope().multiply(radius).negate();
             Ball power = Ball.of(step.multiply(entry.getValue()), bits);
@@ -133,19 +157,20 @@ final class GammaProducts {
         return sums;
     }
 
+    /** The same sums for a ratio that is not a quotient of small integers. */
     private void addPowers(Ball[] sums, Rational ratio, int weight, int largest) {
-        BigInteger p = ratio.numerator();
-        BigInteger q = ratio.denominator();
-        BigInteger power = BigInteger.ONE.shiftLeft(bits).multiply(BigInteger.valueOf(weight));
-        for (int k = 1; k <= largest && power.signum() != 0; k++) {
-            // truncation: the error stays below one unit, since |ratio| < 1 or only a few powers are taken
-            power = power.multiply(p).divide(q);
-            sums[k] = sums[k].add(Ball.ofDyadic(power, -bits), bits);
+        Ball power = Ball.of(Rational.of(weight), bits);
+        for (int k = 1; k <= largest; k++) {
+            power = power.multiply(ratio, bits);
+            sums[k] = sums[k].add(power, bits);
         }
     }
 
+    /** How far one stage of a computation goes: orders below length, so many limbs. */
+    record Stage(int length, int limbs) {}
+
     /** psi^(n)(s + b rho v) = sum_k (-1)^(n+k+1) (n+k)!/k! zeta(n+k+1, s) (b rho)^k v^k. */
-    FixedSeries polygamma(PolygammaFactor factor) {
+    FixedSeries polygamma(PolygammaFactor factor, Stage stage) {
         FixedValues values = new FixedValues(length, limbs);
         int n = factor.n();
         Rational step = factor.slope().multiply(radius);
@@ -160,6 +185,6 @@ final class GammaProducts {
                     : ring.hurwitz(m + 1, factor.shift()).multiply(weight, bits);
             values.set(k, m == 0 || m % 2 == 1 ? value : value.negate());
         }
-        return values.series();
+        return values.series().truncated(stage.length(), stage.limbs());
     }
 }

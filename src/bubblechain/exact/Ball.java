@@ -285,6 +285,11 @@ public final class Ball {
         return mid().toRational();
     }
 
+    /** The largest integer not above midpoint 2^bits; the radius is not part of it. */
+    public BigInteger scaledMidpoint(int bits) {
+        return mantissa.shiftLeft(exponent + bits);
+    }
+
     /** The lower end, exact. */
     public Rational lower() {
         return low().toRational();

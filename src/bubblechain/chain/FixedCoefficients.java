@@ -1,0 +1,211 @@
+package bubblechain.chain;
+
+import bubblechain.analytic.AnalyticFunction;
+import bubblechain.analytic.ArcBound;
+import bubblechain.analytic.FixedExpansion;
+import bubblechain.analytic.NormalForm;
+import bubblechain.exact.Ball;
+import bubblechain.exact.DomainException;
+import bubblechain.exact.ExactConstant;
+import bubblechain.exact.Magnitude;
+import bubblechain.exact.Rational;
+import bubblechain.kernel.Kernel;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * Coefficients as balls on the fixed-point route. With T(rho v) = sum x_n v^n and
+ * y_n = (gamma_n/2) rho^n/n!,
+ *
+ * <p>c_n rho^n/n! = x_n - (1/rho) [v^(n+1)] e^(L rho v) sum_k y_k v^k, L = L_c - L_o.
+ *
+ * <p>The anomalous part falls like 1/n!; beyond the order where a Cauchy bound puts it below the last place it is not
+ * computed.
+ */
+final class FixedCoefficients {
+    private static final double LN2 = Math.log(2);
+    private static final Rational INSIDE = Rational.of(15, 16);
+    private static final int GUARD_BITS = 16;
+    private static final int STAGES = 5;
+
+    private final int bits;
+
+    FixedCoefficients(int bits) {
+        this.bits = bits;
+    }
+
+    /** Empty if this route cannot take the kernel. */
+    Optional<List<Ball>> coefficients(Kernel kernel, int loops, Scales scales) {
+        if (kernel.transform().isEmpty()) {
+            return scales.couplingLog().isZero()
+                    ? kernel.anomalousDimension()
+                            .flatMap(AnalyticFunction::normalForm)
+                            .flatMap(form -> FixedExpansion.of(form, loops, bits))
+                            .map(expansion -> unscaled(expansion, loops))
+                    : Optional.empty();
+        }
+        Optional<NormalForm> form = kernel.transform().get()
+                .timesExponential(scales.couplingLog())
+                .normalForm();
+        Optional<FixedExpansion> transform = form.flatMap(f -> FixedExpansion.of(f, loops, bits));
+        if (transform.isEmpty()) {
+            return Optional.empty();
+        }
+        List<Ball> scaled = new ArrayList<>();
+        for (int n = 0; n < loops; n++) {
+            scaled.add(transform.get().scaled(n));
+        }
+        if (kernel.anomalousDimension().isPresent()) {
+            Optional<List<Ball>> subtraction = subtraction(
+                    kernel.anomalousDimension().get(), loops, scales.subtractionLog(), transform.get().radius());
+            if (subtraction.isEmpty()) {
+                return Optional.empty();
+            }
+            for (int n = 0; n < loops; n++) {
+                scaled.set(n, scaled.get(n).add(subtraction.get().get(n), bits));
+            }
+        }
+        return Optional.of(weighted(scaled, transform.get().radius()));
+    }
+
+    /** c_n = n! rho^(-n) times the scaled coefficients. */
+    private List<Ball> weighted(List<Ball> scaled, Rational radius) {
+        List<Ball> result = new ArrayList<>();
+        Ball weight = Ball.ONE;
+        for (int n = 0; n < scaled.size(); n++) {
+            if (n > 0) {
+                weight = weight.multiply(Rational.of(n).divide(radius), bits);
+            }
+            result.add(scaled.get(n).multiply(weight, bits));
+        }
+        return result;
+    }
+
+    private List<Ball> unscaled(FixedExpansion expansion, int loops) {
+        List<Ball> result = new ArrayList<>();
+        Rational step = expansion.radius().inverse();
+        Ball weight = Ball.ONE;
+        for (int n = 0; n < loops; n++) {
+            result.add(expansion.scaled(n).multiply(weight, bits));
+            weight = weight.multiply(step, bits);
+        }
+        return result;
+    }
+
+    /** -(1/rho) [v^(n+1)] e^(L rho v) sum y_k v^k for n = 0 .. loops-1. */
+    private Optional<List<Ball>> subtraction(
+            AnalyticFunction gamma, int loops, ExactConstant log, Rational radius) {
+        Optional<NormalForm> form = gamma.normalForm();
+        if (form.isEmpty()) {
+            return Optional.empty();
+        }
+        Optional<Tail> tail = tail(form.get(), loops + 1, radius);
+        if (tail.isEmpty()) {
+            return Optional.empty();
+        }
+        int last = tail.get().last();
+        Rational own = FixedExpansion.radius(form.get()).orElse(radius);
+        Optional<FixedExpansion> expansion =
+                FixedExpansion.of(form.get(), stages(last, radius.toDouble() / own.toDouble()));
+        if (expansion.isEmpty()) {
+            return Optional.empty();
+        }
+        List<Ball> y = new ArrayList<>();
+        Ball weight = Ball.ONE.shift(-1);
+        Rational ratio = radius.divide(expansion.get().radius());
+        for (int k = 0; k < last; k++) {
+            if (k > 0) {
+                weight = weight.multiply(ratio.divide(k), bits);
+            }
+            y.add(expansion.get().scaled(k).multiply(weight, bits));
+        }
+        Rational factor = radius.inverse().negate();
+        List<Ball> product = log.isZero() ? y : timesExponential(y, log.multiply(radius), loops + 1);
+        List<Ball> result = new ArrayList<>();
+        for (int n = 0; n < loops; n++) {
+            Ball value = n + 1 < product.size() ? product.get(n + 1) : Ball.ZERO;
+            result.add(value.addError(tail.get().size()).multiply(factor, bits));
+        }
+        return Optional.of(result);
+    }
+
+    /** y_k is worth bits + log2(ratio^k/k!) bits: a few stages of falling precision. */
+    private List<FixedExpansion.Stage> stages(int last, double ratio) {
+        List<FixedExpansion.Stage> stages = new ArrayList<>();
+        double worth = bits;
+        int from = 0;
+        for (int part = STAGES; part >= 1; part--) {
+            double start = worth;
+            while (from < last && (part == 1 || worth > (double) bits * (part - 1) / STAGES)) {
+                from++;
+                worth += (Math.log(ratio) - Math.log(from)) / LN2;
+            }
+            if (stages.isEmpty() || from > stages.get(stages.size() - 1).end()) {
+                stages.add(new FixedExpansion.Stage(from, (int) Math.max(start, 0) + GUARD_BITS + from));
+            }
+        }
+        return stages;
+    }
+
+    /** [v^n] e^(l v) sum y_k v^k. */
+    private List<Ball> timesExponential(List<Ball> y, ExactConstant log, int count) {
+        Ball step = log.toBall(bits + GUARD_BITS);
+        List<Ball> powers = new ArrayList<>();
+        powers.add(Ball.ONE);
+        for (int j = 1; j < count; j++) {
+            powers.add(powers.get(j - 1).multiply(step, bits).divide(Rational.of(j), bits));
+        }
+        List<Ball> result = new ArrayList<>();
+        for (int n = 0; n < count; n++) {
+            Ball sum = Ball.ZERO;
+            for (int k = 0; k < Math.min(y.size(), n + 1); k++) {
+                sum = sum.add(y.get(k).multiply(powers.get(n - k), bits), bits);
+            }
+            result.add(sum);
+        }
+        return result;
+    }
+
+    /**
+     * Where the anomalous part may be cut.
+     *
+     * @param last first order that is left out
+     * @param size not below what any of the coefficients loses by it
+     */
+    private record Tail(int last, Magnitude size) {}
+
+    /**
+     * |y_k| &lt;= M (rho/R)^k/k!/2 for |gamma| &lt;= M on |a| = R; the sum over k &gt;= K is at most twice its first term once
+     * K exceeds 2 rho/R. With the exponential in front the loss is at most e^|l| times that.
+     */
+    private Optional<Tail> tail(NormalForm form, int count, Rational radius) {
+        Optional<Rational> own = FixedExpansion.radius(form);
+        if (own.isEmpty()) {
+            return Optional.empty();
+        }
+        double ratioOnly = radius.toDouble() / own.get().toDouble();
+        double falls = 0;
+        for (int k = 1; k < count; k++) {
+            falls += Math.log(ratioOnly) - Math.log(k);
+        }
+        if (falls > -bits * LN2) {
+            return Optional.of(new Tail(count, Magnitude.ZERO));
+        }
+        ArcBound.Bound bound;
+        try {
+            bound = ArcBound.remainder(form, own.get().multiply(INSIDE).toDouble());
+        } catch (DomainException noCircle) {
+            return Optional.of(new Tail(count, Magnitude.ZERO));
+        }
+        double ratio = radius.toDouble() / bound.radius();
+        double logarithm = bound.logarithm();
+        for (int k = 1; k < count; k++) {
+            logarithm += Math.log(ratio) - Math.log(k);
+            if (k > 2 * ratio && logarithm < -(bits + GUARD_BITS) * LN2) {
+                return Optional.of(new Tail(k + 1, Magnitude.powerOfTwo(-(long) bits)));
+            }
+        }
+        return Optional.of(new Tail(count, Magnitude.ZERO));
+    }
+}

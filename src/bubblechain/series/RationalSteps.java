@@ -1,0 +1,92 @@
+package bubblechain.series;
+
+import bubblechain.exact.Rational;
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+
+/** Products and quotients of fixed-point series with polynomials over Q: in small integers where they fit, else in big ones. */
+final class RationalSteps {
+    private RationalSteps() {}
+
+    static FixedSeries times(FixedSeries series, List<Rational> polynomial) {
+        Integers p = Integers.of(polynomial);
+        if (p.isSmall() && FixedSeries.fits(p.small(), p.divisor.longValueExact())) {
+            return series.timesSmallPolynomial(p.small(), p.divisor.intValueExact());
+        }
+        List<BigInteger> values = integers(series);
+        List<BigInteger> result = new ArrayList<>();
+        double[] errors = new double[series.length()];
+        for (int n = 0; n < series.length(); n++) {
+            BigInteger sum = BigInteger.ZERO;
+            double bound = 0;
+            for (int i = 0; i < p.numerators.size() && i <= n; i++) {
+                sum = sum.add(p.numerators.get(i).multiply(values.get(n - i)));
+                bound += upper(p.numerators.get(i), p.divisor) * series.error(n - i);
+            }
+            result.add(sum.divide(p.divisor));
+            errors[n] = (bound + 1) * (1 + 0x1p-30);
+        }
+        return FixedSeries.of(result, errors, series.limbs());
+    }
+
+    static FixedSeries over(FixedSeries series, List<Rational> polynomial) {
+        Rational leading = polynomial.get(0);
+        Integers p = Integers.of(polynomial.stream().map(c -> c.divide(leading)).toList());
+        FixedSeries scaled = leading.equals(Rational.ONE) ? series : times(series, List.of(leading.inverse()));
+        if (p.isSmall() && FixedSeries.fits(p.small(), p.small()[0])) {
+            return scaled.overSmallPolynomial(p.small());
+        }
+        List<BigInteger> values = integers(scaled);
+        List<BigInteger> result = new ArrayList<>();
+        double[] errors = new double[series.length()];
+        BigInteger divisor = p.numerators.get(0);
+        for (int n = 0; n < series.length(); n++) {
+            BigInteger sum = values.get(n).multiply(divisor);
+            double bound = scaled.error(n);
+            for (int i = 1; i < p.numerators.size() && i <= n; i++) {
+                sum = sum.subtract(p.numerators.get(i).multiply(result.get(n - i)));
+                bound += upper(p.numerators.get(i), divisor) * errors[n - i];
+            }
+            result.add(sum.divide(divisor));
+            errors[n] = (bound + 1) * (1 + 0x1p-30);
+        }
+        return FixedSeries.of(result, errors, series.limbs());
+    }
+
+    private static List<BigInteger> integers(FixedSeries series) {
+        List<BigInteger> values = new ArrayList<>();
+        for (int k = 0; k < series.length(); k++) {
+            values.add(series.integer(k));
+        }
+        return values;
+    }
+
+    /** Not below |numerator/divisor|. */
+    private static double upper(BigInteger numerator, BigInteger divisor) {
+        return Math.abs(Rational.of(numerator, divisor).toDouble()) * (1 + 0x1p-40) + Double.MIN_VALUE;
+    }
+
+    /** A polynomial over Q as integers over one positive divisor. */
+    private record Integers(List<BigInteger> numerators, BigInteger divisor) {
+        static Integers of(List<Rational> polynomial) {
+            BigInteger common = BigInteger.ONE;
+            for (Rational c : polynomial) {
+                common = common.multiply(c.denominator()).divide(common.gcd(c.denominator()));
+            }
+            List<BigInteger> numerators = new ArrayList<>();
+            for (Rational c : polynomial) {
+                numerators.add(c.numerator().multiply(common.divide(c.denominator())));
+            }
+            return new Integers(numerators, common);
+        }
+
+        boolean isSmall() {
+            return divisor.bitLength() < 30 && numerators.stream().allMatch(n -> n.bitLength() < 30);
+        }
+
+        long[] small() {
+            return numerators.stream().mapToLong(BigInteger::longValueExact).toArray();
+        }
+    }
+}
