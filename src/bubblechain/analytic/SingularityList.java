@@ -160,15 +160,4 @@ public final class SingularityList {
     public List<ComplexRoots.Pair> complexRoots() {
         return ComplexRoots.of(radical);
     }
-
-    /**
-     * The singular points nearest to the origin: the smallest |u| at which some term is singular, poles at u = 0 left
-     * aside; empty if there is none with |u| up to {@code limit}.
-     */
-    public Optional<Rational> nearest(Rational limit) {
-        return poles(limit.negate(), limit).stream()
-                .map(p -> p.point().abs())
-                .filter(d -> d.signum() > 0)
-                .min(Rational::compareTo);
-    }
 }
