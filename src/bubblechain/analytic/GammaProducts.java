@@ -46,7 +46,7 @@ final class GammaProducts {
      * optimum for products of two to four gammas.
      */
     private static int removalRadius(int limbs) {
-        return Math.max(4, Math.min(64, limbs / 2));
+        return Math.max(4, Math.min(48, limbs / 3));
     }
 
     /**

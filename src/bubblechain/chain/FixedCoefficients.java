@@ -28,6 +28,10 @@ final class FixedCoefficients {
     private static final Rational INSIDE = Rational.of(15, 16);
     private static final int GUARD_BITS = 16;
     private static final int STAGES = 5;
+    /** Below this precision, or so few terms, shortening the anomalous part costs more than it saves. */
+    private static final int STAGED_BITS = 1_200;
+
+    private static final int CUT_TERMS = 150;
 
     private final int bits;
 
@@ -135,9 +139,10 @@ final class FixedCoefficients {
         List<FixedExpansion.Stage> stages = new ArrayList<>();
         double worth = bits;
         int from = 0;
-        for (int part = STAGES; part >= 1; part--) {
+        int parts = bits < STAGED_BITS ? 1 : STAGES;
+        for (int part = parts; part >= 1; part--) {
             double start = worth;
-            while (from < last && (part == 1 || worth > (double) bits * (part - 1) / STAGES)) {
+            while (from < last && (part == 1 || worth > (double) bits * (part - 1) / parts)) {
                 from++;
                 worth += (Math.log(ratio) - Math.log(from)) / LN2;
             }
@@ -189,7 +194,7 @@ final class FixedCoefficients {
         for (int k = 1; k < count; k++) {
             falls += Math.log(ratioOnly) - Math.log(k);
         }
-        if (falls > -bits * LN2) {
+        if (count < CUT_TERMS || falls > -bits * LN2) {
             return Optional.of(new Tail(count, Magnitude.ZERO));
         }
         ArcBound.Bound bound;
