@@ -89,8 +89,7 @@ def pole_mass():
 
 
 def scalar(function):
-    half_dimension = lambda x: kernels.gamma_m(x)
-    return subtracted(function, half_dimension)
+    return subtracted(function, kernels.gamma_m)
 
 
 MAKERS = {
