@@ -23,7 +23,13 @@ public final class Chain {
     public static final int LARGEST_DIGITS = 10_000;
 
     private static final double BITS_PER_DIGIT = 3.3219280948873626;
-    private static final int FIRST_GUARD_BITS = 48;
+    /** Guard bits of the first attempt: bounds of the fixed-point route lose about 60 bits on the way. */
+    private static final int FIRST_GUARD_BITS = 80;
+
+    /** Jobs up to this size take the ball route, which starts sooner. */
+    private static final int SMALL_LOOPS = 20;
+
+    private static final int SMALL_BITS = 320;
     private static final int LARGEST_GUARD_BITS = 2_048;
 
     private final Kernel kernel;
@@ -73,7 +79,12 @@ public final class Chain {
     /** Balls for c_0 .. c_(loops-1) at a working precision in bits. */
     public List<Ball> balls(int loops, int bits) {
         requireRange("the number of loops", loops, LARGEST_LOOPS);
-        return new BallCoefficients(bits).coefficients(kernel, loops, scales);
+        boolean small = loops <= SMALL_LOOPS && bits <= SMALL_BITS;
+        return small
+                ? new BallCoefficients(bits).coefficients(kernel, loops, scales)
+                : new FixedCoefficients(bits)
+                        .coefficients(kernel, loops, scales)
+                        .orElseGet(() -> new BallCoefficients(bits).coefficients(kernel, loops, scales));
     }
 
     /**
