@@ -18,6 +18,13 @@ public record CertifiedNumber(String text, boolean isZero, boolean isDecimal) {
     private static final double DIGITS_PER_BIT = 0.30102999566398120;
     private static final int LAST_BITS_FACTOR = 8;
 
+    /** From a ball, if its digits are certain or it is exactly zero. */
+    static Optional<CertifiedNumber> ifDecided(Ball ball, int digits) {
+        return ball.isZero()
+                ? Optional.of(new CertifiedNumber("0", true, true))
+                : ball.toDecimal(digits).map(text -> new CertifiedNumber(text, false, true));
+    }
+
     /** From a ball alone. @throws PrecisionException if its digits are not certain and zero is excluded */
     static CertifiedNumber of(Ball ball, int digits) {
         if (ball.isZero()) {

@@ -6,6 +6,7 @@ import bubblechain.exact.ExactConstant;
 import bubblechain.kernel.Kernel;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * The bubble chain of a kernel: its coefficients c_n in f = prefactor x sum_{n>=0} c_n a^(n+1),
@@ -104,31 +105,35 @@ public final class Chain {
     public List<CertifiedNumber> certified(int loops, int digits, Rendering rendering) {
         requireRange("the number of digits", digits, LARGEST_DIGITS);
         int needed = (int) Math.ceil(digits * BITS_PER_DIGIT) + 2 * (32 - Integer.numberOfLeadingZeros(loops));
+        boolean exactReaches = loops <= LARGEST_EXACT_LOOPS;
         for (int guard = FIRST_GUARD_BITS; ; guard *= 2) {
             int bits = needed + guard;
             List<Ball> balls = rendering.applyToBalls(balls(loops, bits), bits);
-            boolean last = 2 * guard > LARGEST_GUARD_BITS;
-            boolean exactReaches = loops <= LARGEST_EXACT_LOOPS;
-            boolean stuck = guard >= 4 * FIRST_GUARD_BITS && exactReaches;
-            if (last || stuck || balls.stream().allMatch(b -> b.toDecimal(digits).isPresent())) {
-                return numbers(balls, digits, rendering, bits);
+            List<Optional<CertifiedNumber>> numbers =
+                    balls.stream().map(b -> CertifiedNumber.ifDecided(b, digits)).toList();
+            if (numbers.stream().allMatch(Optional::isPresent)) {
+                return numbers.stream().flatMap(Optional::stream).toList();
+            }
+            if (2 * guard > LARGEST_GUARD_BITS || exactReaches && guard >= 2 * FIRST_GUARD_BITS) {
+                return settled(balls, numbers, digits, rendering, bits);
             }
         }
     }
 
-    private List<CertifiedNumber> numbers(List<Ball> balls, int digits, Rendering rendering, int bits) {
-        boolean allSettled = balls.stream().allMatch(b -> b.toDecimal(digits).isPresent());
-        List<ExactConstant> exact = allSettled || balls.size() > LARGEST_EXACT_LOOPS
-                ? List.of()
-                : rendering.applyToExact(exact(balls.size()));
-        List<CertifiedNumber> numbers = new ArrayList<>();
+    /** The numbers that balls could not decide, by the exact route where it reaches. */
+    private List<CertifiedNumber> settled(
+            List<Ball> balls, List<Optional<CertifiedNumber>> numbers, int digits, Rendering rendering, int bits) {
+        List<ExactConstant> exact =
+                balls.size() <= LARGEST_EXACT_LOOPS ? rendering.applyToExact(exact(balls.size())) : List.of();
+        List<CertifiedNumber> result = new ArrayList<>();
         for (int n = 0; n < balls.size(); n++) {
-            numbers.add(
-                    exact.isEmpty()
-                            ? CertifiedNumber.of(balls.get(n), digits)
-                            : CertifiedNumber.of(exact.get(n), balls.get(n), digits, bits));
+            Ball ball = balls.get(n);
+            int index = n;
+            result.add(numbers.get(n).orElseGet(() -> exact.isEmpty()
+                    ? CertifiedNumber.of(ball, digits)
+                    : CertifiedNumber.of(exact.get(index), ball, digits, bits)));
         }
-        return numbers;
+        return result;
     }
 
     static void requireRange(String what, int value, int largest) {

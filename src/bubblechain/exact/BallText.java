@@ -54,49 +54,53 @@ final class BallText {
         if (ball.containsZero()) {
             return Optional.empty();
         }
-        // rounding is monotonic: if the ends agree, so does every point between them
-        Decimal low = nearest(ball.low(), digits);
-        Decimal high = ball.isExact() ? low : nearest(ball.high(), digits);
-        return low.equals(high) ? Optional.of(format(low, digits)) : Optional.empty();
+        // the end nearer to zero is rounded; the other end must lie in the same rounding interval
+        boolean negative = ball.isNegative();
+        Dyadic near = (negative ? ball.high() : ball.low()).abs();
+        Dyadic far = (negative ? ball.low() : ball.high()).abs();
+        return nearest(near, far, digits)
+                .map(d -> format(negative ? new Decimal(d.digits.negate(), d.exponent) : d, digits));
     }
 
-    /** Rounds a non-zero number to a number of significant digits, ties to even. */
-    private static Decimal nearest(Dyadic value, int digits) {
-        Dyadic size = value.abs();
+    /** The positive numbers between two ends rounded to significant digits, ties to even, if all round to the same. */
+    private static Optional<Decimal> nearest(Dyadic near, Dyadic far, int digits) {
         BigInteger top = BigInteger.TEN.pow(digits);
         BigInteger bottom = BigInteger.TEN.pow(digits - 1);
-        long exponent = (long) Math.floor((size.top() - 0.5) * LOG10_OF_2); // a guess, put right below
+        long exponent = (long) Math.floor((near.top() - 0.5) * LOG10_OF_2); // a guess, put right below
         while (true) {
-            BigInteger divisor = divisor(size, exponent - digits + 1);
-            BigInteger[] parts = dividend(size, exponent - digits + 1).divideAndRemainder(divisor);
+            long place = exponent - digits + 1;
+            Dyadic width = far.subtract(near);
+            int common = Math.toIntExact(Math.min(0, Math.min(near.exponent(), width.exponent())));
+            BigInteger divisor = (place > 0 ? BigInteger.TEN.pow(Math.toIntExact(place)) : BigInteger.ONE).shiftLeft(-common);
+            BigInteger scale = place < 0 ? BigInteger.TEN.pow(Math.toIntExact(-place)) : BigInteger.ONE;
+            BigInteger[] parts = integer(near, common).multiply(scale).divideAndRemainder(divisor);
             BigInteger whole = parts[0];
             if (whole.compareTo(top) >= 0) {
                 exponent++;
             } else if (whole.compareTo(bottom) < 0) {
                 exponent--;
             } else {
-                int half = parts[1].shiftLeft(1).compareTo(divisor);
+                BigInteger doubled = parts[1].shiftLeft(1);
+                int half = doubled.compareTo(divisor);
                 boolean up = half > 0 || half == 0 && whole.testBit(0);
+                if (width.signum() != 0) {
+                    BigInteger doubledFar = doubled.add(integer(width, common).multiply(scale).shiftLeft(1));
+                    BigInteger limit = up ? divisor.multiply(BigInteger.valueOf(3)) : divisor;
+                    boolean tie = half == 0;
+                    if (tie || doubledFar.compareTo(limit) >= 0) {
+                        return Optional.empty();
+                    }
+                }
                 BigInteger rounded = up ? whole.add(BigInteger.ONE) : whole;
                 boolean carry = rounded.equals(top);
-                BigInteger result = carry ? bottom : rounded;
-                return new Decimal(value.signum() < 0 ? result.negate() : result, carry ? exponent + 1 : exponent);
+                return Optional.of(new Decimal(carry ? bottom : rounded, carry ? exponent + 1 : exponent));
             }
         }
     }
 
-    /** Numerator of value / 10^place. */
-    private static BigInteger dividend(Dyadic value, long place) {
-        BigInteger shifted = value.exponent() > 0
-                ? value.mantissa().shiftLeft(Math.toIntExact(value.exponent()))
-                : value.mantissa();
-        return place < 0 ? shifted.multiply(BigInteger.TEN.pow(Math.toIntExact(-place))) : shifted;
-    }
-
-    /** Denominator of value / 10^place. */
-    private static BigInteger divisor(Dyadic value, long place) {
-        BigInteger power = place > 0 ? BigInteger.TEN.pow(Math.toIntExact(place)) : BigInteger.ONE;
-        return value.exponent() < 0 ? power.shiftLeft(Math.toIntExact(-value.exponent())) : power;
+    /** value 2^-lower for lower at most the exponent. */
+    private static BigInteger integer(Dyadic value, int lower) {
+        return value.mantissa().shiftLeft(Math.toIntExact(value.exponent() - lower));
     }
 
     private static String format(Decimal decimal, int digits) {
@@ -147,7 +151,8 @@ final class BallText {
     /** Two digits of the radius, rounded up after adding what the midpoint lost in rounding: encloses the ball. */
     private static String withRadius(Ball ball) {
         Rational radius = ball.radius().toRational();
-        long place = nearest(ball.radius().toDyadic(), 2).exponent - 1;
+        Dyadic size = ball.radius().toDyadic();
+        long place = nearest(size, size, 2).orElseThrow().exponent - 1;
         Rational unit = Rational.of(10).power(Math.toIntExact(place));
         BigInteger middle = ball.midpoint().divide(unit).add(Rational.HALF).floor();
         Rational lost = ball.midpoint().subtract(unit.multiply(Rational.of(middle))).abs();
