@@ -2,6 +2,7 @@ package bubblechain.analytic;
 
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
+import bubblechain.exact.PrecisionException;
 import bubblechain.exact.Rational;
 import bubblechain.formula.ConstantValue;
 import bubblechain.formula.Formula;
@@ -61,8 +62,8 @@ public final class SeriesInterpretation<S> {
         }
         try {
             return unchecked(formula);
-        } catch (FormulaException placed) {
-            throw placed;
+        } catch (FormulaException | PrecisionException alreadyToldOrTooShort) {
+            throw alreadyToldOrTooShort;
         } catch (ArithmeticException | DomainException e) {
             throw FormulaException.at(formula.span(), String.valueOf(e.getMessage()));
         }

@@ -35,8 +35,13 @@ final class CheckEntries {
                 }
                 yield new KernelCheck.Coefficient(n, KernelFile.constant(entry, "value"), source);
             }
-            case "laurent" -> new KernelCheck.Laurent(
-                    entry.rational("u"), entry.integer("power"), KernelFile.constant(entry, "value"), source);
+            case "laurent" -> {
+                int power = entry.integer("power");
+                if (power > -1) {
+                    throw entry.error("power", "a checked Laurent coefficient belongs to a negative power, got " + power);
+                }
+                yield new KernelCheck.Laurent(entry.rational("u"), power, KernelFile.constant(entry, "value"), source);
+            }
             case "absent" -> new KernelCheck.Absent(entry.rational("u"), source);
             case "same-as" -> new KernelCheck.SameAs(entry.text("kernel"), source);
             default -> throw entry.error(

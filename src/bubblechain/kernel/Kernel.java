@@ -20,6 +20,7 @@ import java.util.Optional;
  * @param transform    T(u) at mu = scale, with every singularity of B(u); empty if the quantity is an anomalous
  *                     dimension, whose Borel transform is entire
  * @param anomalousDimension gamma(a) in d ln O/d ln mu = prefactor x a gamma(a); the quantity itself if there is no T(u)
+ * @param definingEquation what the anomalous dimension is, such as "d ln(M/mbar(mu))/d ln mu = CF/beta0 * a * gamma(a)"
  * @param heavyQuark   true if the scale is the mass of a quark heavier than those in the bubbles, so that the coupling may
  *                     count that quark too
  * @param series       name of the QCD series it mimics
@@ -39,6 +40,7 @@ public record Kernel(
         KernelForm form,
         Optional<AnalyticFunction> transform,
         Optional<AnalyticFunction> anomalousDimension,
+        Optional<String> definingEquation,
         boolean heavyQuark,
         Optional<String> series,
         List<SingularityNote> singularities,
@@ -66,9 +68,15 @@ public record Kernel(
         if (anomalousDimension.isEmpty()) {
             throw new KernelException("the kernel " + name + " has no anomalous dimension");
         }
+        if (isAnomalousDimension()) {
+            return this;
+        }
+        String derivative = definingEquation
+                .map(equation -> equation.substring(0, equation.indexOf('=')).strip())
+                .orElse("d ln O/d ln mu (O: " + quantity + ")");
         return new Kernel(
-                name, "Anomalous dimension of: " + title, "d ln O/d ln mu of O = " + quantity, "mu", theory, prefactor,
-                Rational.ZERO, form, Optional.empty(), anomalousDimension, false, Optional.empty(), List.of(), sources,
+                name, "Anomalous dimension of: " + title, derivative, "mu", theory, prefactor, Rational.ZERO, form,
+                Optional.empty(), anomalousDimension, definingEquation, false, Optional.empty(), List.of(), sources,
                 List.of(), List.of());
     }
 

@@ -17,6 +17,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeSet;
 
 /**
  * Reads a kernel from TOML.
@@ -84,12 +85,21 @@ final class KernelFile {
         Theory theory = top.optionalText("theory").isPresent() ? oneOf("theory", Theory::parse) : Theory.QCD;
         KernelFunctions functions = form == KernelForm.BOREL ? borel() : dDimensional();
         Kernel kernel = new Kernel(
-                name(), parameters.titled(top.text("title")), top.text("quantity"),
+                name(), parameters.titled(top.text("title")), parameters.titled(top.text("quantity")),
                 top.text("scale"), theory, prefactor(), top.rational("mass_dimension"), form, functions.transform(),
-                functions.anomalousDimension(), flag("heavy_quark"), top.optionalText("series"), singularities(),
+                functions.anomalousDimension(), definingEquation(), flag("heavy_quark"), top.optionalText("series"), singularities(),
                 top.texts("sources"), top.texts("cautions"), new CheckEntries(top).read());
         requireFinite(kernel, form == KernelForm.BOREL ? "T" : "G");
         return kernel;
+    }
+
+    private Optional<String> definingEquation() {
+        Optional<String> equation = top.optionalText("defining_equation");
+        if (equation.isPresent() && equation.get().indexOf('=') < 1) {
+            throw top.error("defining_equation", "the defining equation has the form \"d ln O/d ln mu = CF/beta0 * a *"
+                    + " anomalous_dimension(a)\", got \"" + equation.get() + "\"");
+        }
+        return equation;
     }
 
     private String name() {
@@ -175,9 +185,12 @@ final class KernelFile {
     private void requireNames(String key, Formula formula, Set<String> variables) {
         for (String name : formula.names()) {
             if (!variables.contains(name) && !Constants.isConstant(name)) {
-                throw top.error(key, "the name '" + name + "' in '" + key + "' has no meaning; variables are "
-                        + String.join(", ", new java.util.TreeSet<>(variables))
-                        + ", other names are set in [definitions] or [parameters]");
+                String variable = variables.size() == 1 ? "the variable is " : "the variables are ";
+                throw top.rethrown(key, FormulaException.at(
+                        NamePlace.of(name, formula).orElse(formula.span()),
+                        "the name '" + name + "' has no meaning; " + variable
+                                + String.join(" and ", new TreeSet<>(variables))
+                                + ", other names are set in [definitions] or [parameters]"));
             }
         }
     }

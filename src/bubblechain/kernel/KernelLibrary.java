@@ -53,7 +53,7 @@ public final class KernelLibrary {
 
     private static TomlSection open(String nameOrPath) {
         if (nameOrPath.endsWith(ENDING) || nameOrPath.contains("/") || nameOrPath.contains("\\")) {
-            return TomlFile.read(Path.of(nameOrPath));
+            return TomlFile.read(TomlFile.path(nameOrPath));
         }
         SortedMap<String, String> resources = resources();
         String resource = resources.get(nameOrPath);

@@ -56,6 +56,9 @@ public final class KernelReport {
         if (kernel.anomalousDimension().isPresent()) {
             facts = facts.with("anomalous_dimension", "gamma(a)", formula(kernel.anomalousDimension().get()));
         }
+        if (kernel.definingEquation().isPresent()) {
+            facts = facts.with("defining_equation", "defined by", Value.text(kernel.definingEquation().get()));
+        }
         if (kernel.series().isPresent()) {
             facts = facts.with("series", "mimics the series", Value.text(kernel.series().get()));
         }
@@ -63,12 +66,20 @@ public final class KernelReport {
                 .request("kernel", kernel.name())
                 .normalisation(kernel.quantity() + " = " + kernel.prefactor().words()
                         + " sum_{n>=0} c_n a^(n+1), a = beta0 " + kernel.theory().coupling() + "(" + kernel.scale()
-                        + ")/(4 pi); B(u) = T(u) minus the subtraction")
+                        + ")/(4 pi)" + transformInWords(kernel))
                 .add(facts)
                 .add(singularities(kernel));
         kernel.sources().forEach(report::source);
         kernel.cautions().forEach(report::caution);
         return report.build();
+    }
+
+    private static String transformInWords(Kernel kernel) {
+        if (kernel.isAnomalousDimension()) {
+            return ", gamma(a) = sum_{n>=0} c_n a^n";
+        }
+        return "; B(u) = sum_{n>=0} c_n u^n/n! = T(u)"
+                + (kernel.anomalousDimension().isPresent() ? " minus the subtraction that gamma(a) implies" : "");
     }
 
     private static Value formula(AnalyticFunction function) {

@@ -22,8 +22,9 @@ final class SubtractionCheck {
                     + " at u = 0, leading coefficient " + shown(principal.coefficients().get(0))
                     + "; one subtraction takes away a simple pole only");
         }
-        ExactConstant residue =
-                principal.length() == 0 ? ExactConstant.ZERO : principal.coefficients().get(principal.length() - 1);
+        ExactConstant residue = principal.length() == 0 || principal.lowest() > -1
+                ? ExactConstant.ZERO
+                : principal.coefficients().get(-1 - principal.lowest());
         Optional<ExactConstant> half = kernel.anomalousDimension()
                 .map(gamma -> gamma.valueAt(Rational.ZERO).divide(Rational.TWO));
         ExactConstant left = residue.subtract(half.orElse(ExactConstant.ZERO));

@@ -6,6 +6,7 @@ import java.nio.ByteBuffer;
 import java.nio.charset.CharacterCodingException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
+import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import org.tomlj.Toml;
 import org.tomlj.TomlParseError;
@@ -30,6 +31,15 @@ public final class TomlFile {
             return read(stream, path.toString());
         } catch (IOException e) {
             throw new TomlException("cannot read the file " + path + "; check that it exists and is readable", e);
+        }
+    }
+
+    /** The path of a file. @throws TomlException if no file can have this name */
+    public static Path path(String name) {
+        try {
+            return Path.of(name);
+        } catch (InvalidPathException e) {
+            throw new TomlException("'" + name + "' cannot be the name of a file", e);
         }
     }
 
@@ -65,13 +75,36 @@ public final class TomlFile {
         int depth = 0;
         for (int k = 0; k < text.length(); k++) {
             char c = text.charAt(k);
-            depth += c == '[' || c == '{' ? 1 : c == ']' || c == '}' ? -1 : 0;
-            if (c == '\n') {
-                depth = Math.min(depth, DEEPEST_NESTING);
+            if (c == '#' || c == '"' || c == '\'') {
+                k = endOfWords(text, k);
+            } else if (c == '[' || c == '{') {
+                depth++;
+            } else if (c == ']' || c == '}') {
+                depth--;
             }
             if (depth > DEEPEST_NESTING) {
                 throw new TomlException(file + ": brackets nested deeper than " + DEEPEST_NESTING + " levels");
             }
         }
+    }
+
+    /** The last character of the comment or string that begins here; brackets in it are no structure. */
+    private static int endOfWords(String text, int start) {
+        char quote = text.charAt(start);
+        boolean comment = quote == '#';
+        String fence = String.valueOf(quote).repeat(3);
+        boolean fenced = !comment && text.startsWith(fence, start);
+        for (int k = start + (fenced ? 3 : 1); k < text.length(); k++) {
+            char c = text.charAt(k);
+            if (c == '\n' && !fenced) {
+                return k; // of a comment, or of a string that the parser will complain about
+            }
+            if (c == '\\' && quote == '"') {
+                k++;
+            } else if (!comment && c == quote && (!fenced || text.startsWith(fence, k))) {
+                return fenced ? k + 2 : k;
+            }
+        }
+        return text.length();
     }
 }
