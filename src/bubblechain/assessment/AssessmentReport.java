@@ -2,10 +2,12 @@ package bubblechain.assessment;
 
 import bubblechain.borel.BorelPlane;
 import bubblechain.borel.BorelPole;
+import bubblechain.borel.PoleShares;
 import bubblechain.borel.PolesReport;
 import bubblechain.chain.ChainOptions;
 import bubblechain.chain.CoefficientReport;
 import bubblechain.chain.Scales;
+import bubblechain.exact.DomainException;
 import bubblechain.exact.Rational;
 import bubblechain.fixedorder.PerturbativeSeries;
 import bubblechain.kernel.Kernel;
@@ -23,6 +25,9 @@ import java.util.Optional;
  * the leading one, and how far the two agree.
  */
 public final class AssessmentReport {
+    /** Most terms of the chain that are shown. */
+    public static final int LARGEST_LOOPS = PoleShares.LARGEST_INDEX;
+
     private static final int DIGITS = 12;
     private static final int POLE_DIGITS = 10;
 
@@ -35,16 +40,23 @@ public final class AssessmentReport {
      * @param range  poles are shown for -range &lt;= u &lt;= range
      */
     public static Report of(Kernel kernel, Optional<PerturbativeSeries> series, int nf, int loops, Rational range) {
+        if (range.signum() <= 0) {
+            throw new DomainException("--range must be positive, got " + range);
+        }
+        if (loops < 1 || loops > LARGEST_LOOPS) {
+            throw new DomainException("the number of loops lies between 1 and " + LARGEST_LOOPS + ", got " + loops);
+        }
+        ChainOptions options = ChainOptions.DEFAULT.withFlavours(nf);
         Report.Builder report = Report.builder("assess")
                 .request("kernel", kernel.name())
-                .request("series", series.map(PerturbativeSeries::name).orElse("none"))
+                .request("series", series.map(PerturbativeSeries::name).orElse(none(kernel)))
                 .request("nf", Integer.toString(nf))
                 .request("loops", Integer.toString(loops))
                 .request("range", range.toString());
-        report.normalisation(ChainOptions.DEFAULT.words(kernel));
+        report.normalisation(options.words(kernel));
         report.add(defaults(kernel, series, nf));
-        add(report, CoefficientReport.of(kernel, ChainOptions.DEFAULT, loops, DIGITS, false, false), "chain_coefficients");
-        addPoles(report, kernel, range, loops);
+        add(report, CoefficientReport.of(kernel, options, loops, DIGITS, false, false), "chain_coefficients");
+        addPoles(report, kernel, options, range, loops);
         kernel.sources().forEach(report::source);
         kernel.cautions().forEach(report::caution);
         report.caution(CoefficientReport.MODEL_CAUTION);
@@ -68,25 +80,30 @@ public final class AssessmentReport {
                 .orElse(facts);
     }
 
-    private static void addPoles(Report.Builder report, Kernel kernel, Rational range, int loops) {
+    private static void addPoles(
+            Report.Builder report, Kernel kernel, ChainOptions options, Rational range, int loops) {
         add(
                 report,
-                PolesReport.of(kernel, ChainOptions.DEFAULT, range.negate(), range, POLE_DIGITS, loops - 1),
+                PolesReport.of(kernel, options, range.negate(), range, POLE_DIGITS, loops - 1),
                 "poles");
         BorelPlane plane = BorelPlane.of(kernel, Scales.NATURAL);
         Facts leading = Facts.titled("leading", "Nearest singularities");
         Optional<BorelPole> infrared = plane.leadingInfrared();
         Optional<BorelPole> ultraviolet = plane.leadingUltraviolet();
         leading = leading.with(
-                "ir", "infrared", Value.text(infrared.map(p -> words(p, kernel)).orElse("none")));
+                "ir", "infrared", Value.text(infrared.map(p -> words(p, kernel)).orElse(none(kernel))));
         leading = leading.with(
-                "uv", "ultraviolet", Value.text(ultraviolet.map(p -> words(p, kernel)).orElse("none")));
+                "uv", "ultraviolet", Value.text(ultraviolet.map(p -> words(p, kernel)).orElse(none(kernel))));
         report.add(leading);
+    }
+
+    private static String none(Kernel kernel) {
+        return kernel.isAnomalousDimension() ? "none" : "none with |u| up to " + BorelPlane.SEARCH_LIMIT;
     }
 
     private static String words(BorelPole pole, Kernel kernel) {
         String kind = pole.pole().order() == 1 ? "simple pole" : "pole of order " + pole.pole().order();
-        return "u = " + pole.u() + ", " + kind + ", power correction " + pole.power(kernel.scale());
+        return "u = " + pole.u() + ", " + kind + ", power correction: " + pole.power(kernel.scale());
     }
 
     private static void addSeries(Report.Builder report, CrossCheck check) {

@@ -18,6 +18,7 @@ import bubblechain.sumrule.SumRuleRequest;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 /**
  * The sum rule on the first terms of a chain, with every other pole of the chain stated with its exact strength; nearer
@@ -57,10 +58,10 @@ public final class ChainSumRule {
         if (removeNearer) {
             coefficients = ChainPole.remove(coefficients, laurentTerms(poles, u));
         }
-        ChainOptions options = ChainOptions.DEFAULT;
+        ChainOptions options = ChainOptions.DEFAULT.withFlavours(nf);
         SumRuleRequest.Builder builder = SumRuleRequest.forChain(kernel.name(), coefficients, nf, p)
                 .prefactor(kernel.prefactor().value(kernel.theory(), nf))
-                .inWords("bubble chain: " + options.words(kernel));
+                .inWords("bubble chain: " + options.words(kernel) + (removeNearer ? removedInWords(poles, u) : ""));
         plane.poleAt(u).ifPresent(pole -> builder.exponentShift(Rational.of(pole.pole().order() - 1L)));
         for (BorelPole pole : poles) {
             if (!pole.u().equals(u)) {
@@ -68,6 +69,16 @@ public final class ChainSumRule {
             }
         }
         return builder.build();
+    }
+
+    private static String removedInWords(List<BorelPole> poles, Rational u) {
+        String removed = poles.stream()
+                .filter(pole -> isNearer(pole, u))
+                .map(pole -> pole.u().toString())
+                .collect(Collectors.joining(", "));
+        return removed.isEmpty()
+                ? "; no pole is nearer than u = " + u
+                : "; the parts of the nearer poles at u = " + removed + " are taken out of c_n exactly";
     }
 
     private static Rational nearest(BorelPlane plane) {

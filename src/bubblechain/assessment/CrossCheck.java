@@ -14,6 +14,7 @@ import bubblechain.fixedorder.PerturbativeSeries;
 import bubblechain.kernel.Kernel;
 import bubblechain.qcd.Coupling;
 import bubblechain.qcd.Normalisation;
+import bubblechain.qcd.Theory;
 import bubblechain.sumrule.SumRule;
 import bubblechain.sumrule.SumRuleRequest;
 import bubblechain.sumrule.SumRuleResult;
@@ -87,6 +88,10 @@ public record CrossCheck(
      */
     public static CrossCheck of(Kernel kernel, PerturbativeSeries series, int nf, Optional<Rational> power) {
         Rational p = power.orElse(series.power());
+        if (kernel.theory() != Theory.QCD) {
+            throw new DomainException("the kernel " + kernel.name() + " belongs to " + kernel.theory() + ", the series "
+                    + series.name() + " to QCD; there is nothing to compare");
+        }
         if (kernel.isAnomalousDimension()) {
             throw new DomainException("the kernel " + kernel.name()
                     + " is an anomalous dimension: its Borel transform has no singularity to compare");

@@ -8,6 +8,7 @@ import bubblechain.chain.Scales;
 import bubblechain.exact.Ball;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
+import bubblechain.exact.PrecisionException;
 import bubblechain.fixedorder.PerturbativeSeries;
 import bubblechain.fixedorder.SeriesLibrary;
 import bubblechain.kernel.Kernel;
@@ -53,7 +54,7 @@ public final class Validation {
      * @throws DomainException if there is no such file or name
      */
     public static List<Finding> of(String nameOrPath) {
-        Path path = Path.of(nameOrPath);
+        Path path = TomlFile.path(nameOrPath);
         if (Files.isDirectory(path)) {
             return folder(path);
         }
@@ -94,7 +95,7 @@ public final class Validation {
         try {
             isKernel = TomlFile.read(Path.of(path)).keys().contains("form");
         } catch (DomainException e) {
-            return List.of(new Finding(path, "TOML", false, String.valueOf(e.getMessage())));
+            return List.of(failure(path, "TOML", e));
         }
         return isKernel ? kernel(path) : series(path);
     }
@@ -107,8 +108,8 @@ public final class Validation {
             }
             return List.of(new Finding(
                     nameOrPath, "series", true, series.loops() + " coefficients, polynomials in nf"));
-        } catch (DomainException e) {
-            return List.of(new Finding(nameOrPath, "series", false, String.valueOf(e.getMessage())));
+        } catch (DomainException | PrecisionException e) {
+            return List.of(failure(nameOrPath, "series", e));
         }
     }
 
@@ -125,10 +126,16 @@ public final class Validation {
                 findings.add(new Finding(
                         nameOrPath, "declared singularity at u = " + note.u(), present, present ? "a pole" : "no pole there"));
             }
-        } catch (DomainException e) {
-            findings.add(new Finding(nameOrPath, "kernel", false, String.valueOf(e.getMessage())));
+        } catch (DomainException | PrecisionException e) {
+            findings.add(failure(nameOrPath, "kernel", e));
         }
         return findings;
+    }
+
+    /** The first line of the reason; the underlined formula below it needs lines of its own. */
+    private static Finding failure(String file, String check, RuntimeException reason) {
+        String detail = String.valueOf(reason.getMessage()).lines().findFirst().orElse("");
+        return new Finding(file, check, false, detail);
     }
 
     private static Finding finding(String file, Kernel kernel, KernelCheck check) {

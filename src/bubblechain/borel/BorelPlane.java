@@ -3,6 +3,7 @@ package bubblechain.borel;
 import bubblechain.analytic.AlgebraicPole;
 import bubblechain.analytic.AnalyticFunction;
 import bubblechain.analytic.ComplexRoots;
+import bubblechain.analytic.InadmissibleFormulaException;
 import bubblechain.analytic.NormalForm;
 import bubblechain.analytic.Pole;
 import bubblechain.analytic.SingularityList;
@@ -10,6 +11,7 @@ import bubblechain.chain.Scales;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
+import bubblechain.formula.FormulaException;
 import bubblechain.kernel.Kernel;
 import java.util.ArrayList;
 import java.util.List;
@@ -21,7 +23,11 @@ import java.util.Optional;
  */
 public final class BorelPlane {
     /** Radius up to which the nearest singularity is looked for. */
-    private static final Rational SEARCH_LIMIT = Rational.of(12);
+    public static final int SEARCH_LIMIT = 12;
+
+    /** Increasing radii, so that a dense sequence of poles is not listed in full to find the first. */
+    private static final List<Rational> SEARCH_LIMITS =
+            List.of(Rational.of(1, 4), Rational.ONE, Rational.of(3), Rational.of(SEARCH_LIMIT));
 
     private final Kernel kernel;
     private final NormalForm form;
@@ -36,13 +42,17 @@ public final class BorelPlane {
     /**
      * The Borel plane of a kernel.
      *
-     * @throws bubblechain.analytic.InadmissibleFormulaException if its singularities cannot be listed exactly
+     * @throws FormulaException if its singularities cannot be listed exactly, with the place in T(u)
      */
     public static BorelPlane of(Kernel kernel, Scales scales) {
         Optional<AnalyticFunction> transform =
                 kernel.transform().map(t -> t.timesExponential(scales.couplingLog()));
-        return new BorelPlane(
-                kernel, transform.map(AnalyticFunction::requireNormalForm).orElse(NormalForm.ZERO));
+        try {
+            return new BorelPlane(
+                    kernel, transform.map(AnalyticFunction::requireNormalForm).orElse(NormalForm.ZERO));
+        } catch (InadmissibleFormulaException e) {
+            throw e.in("the poles of the kernel " + kernel.name() + " cannot be listed, its coefficients can; T(u), ");
+        }
     }
 
     public Kernel kernel() {
@@ -98,15 +108,22 @@ public final class BorelPlane {
         return regular;
     }
 
-    /** The pole with u &gt; 0 nearest to the origin. */
+    /** The pole with u &gt; 0 nearest to the origin, if there is one up to {@link #SEARCH_LIMIT}. */
     public Optional<BorelPole> leadingInfrared() {
-        return poles(Rational.ZERO, SEARCH_LIMIT).stream().findFirst();
+        return SEARCH_LIMITS.stream()
+                .map(limit -> poles(Rational.ZERO, limit))
+                .filter(found -> !found.isEmpty())
+                .map(found -> found.get(0))
+                .findFirst();
     }
 
-    /** The pole with u &lt; 0 nearest to the origin. */
+    /** The pole with u &lt; 0 nearest to the origin, if there is one up to {@link #SEARCH_LIMIT}. */
     public Optional<BorelPole> leadingUltraviolet() {
-        List<BorelPole> found = poles(SEARCH_LIMIT.negate(), Rational.ZERO);
-        return found.isEmpty() ? Optional.empty() : Optional.of(found.get(found.size() - 1));
+        return SEARCH_LIMITS.stream()
+                .map(limit -> poles(limit.negate(), Rational.ZERO))
+                .filter(found -> !found.isEmpty())
+                .map(found -> found.get(found.size() - 1))
+                .findFirst();
     }
 
     private static void requireRange(Rational from, Rational to) {

@@ -37,7 +37,10 @@ public record BorelPole(Pole pole, Optional<SingularityNote> note) {
         }
         Rational exponent = u().multiply(2);
         String hard = scale.startsWith("1/") ? "Lambda*" + scale.substring(2) : "Lambda/" + scale;
-        return exponent.equals(Rational.ONE) ? hard : "(" + hard + ")^" + exponent;
+        if (exponent.equals(Rational.ONE)) {
+            return hard;
+        }
+        return "(" + hard + ")^" + (exponent.isInteger() ? exponent.toString() : "(" + exponent + ")");
     }
 
     /** K, the strength of K (1 - u/u0)^(-1) for a simple pole: K = -R/u0. */

@@ -2,9 +2,11 @@ package bubblechain.borel;
 
 import bubblechain.analytic.AlgebraicPole;
 import bubblechain.analytic.ComplexRoots;
+import bubblechain.chain.CertifiedNumber;
+import bubblechain.chain.Chain;
 import bubblechain.chain.ChainOptions;
 import bubblechain.chain.CoefficientReport;
-import bubblechain.exact.Ball;
+import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import bubblechain.kernel.Kernel;
@@ -21,7 +23,11 @@ import java.util.Optional;
 
 /** Shows the poles of a kernel in a range of u. */
 public final class PolesReport {
-    private static final double BITS_PER_DIGIT = 3.33;
+    /** Largest number of digits of a Laurent coefficient. */
+    public static final int LARGEST_DIGITS = Chain.LARGEST_DIGITS;
+
+    /** Digits of the position of an irrational pole. */
+    private static final int POSITION_DIGITS = 12;
 
     private PolesReport() {}
 
@@ -32,6 +38,9 @@ public final class PolesReport {
      * @param shareOf n of the coefficient whose make-up is shown
      */
     public static Report of(Kernel kernel, ChainOptions options, Rational from, Rational to, int digits, int shareOf) {
+        if (digits < 1 || digits > LARGEST_DIGITS) {
+            throw new DomainException("the number of digits lies between 1 and " + LARGEST_DIGITS + ", got " + digits);
+        }
         BorelPlane plane = BorelPlane.of(kernel, options.scales(kernel));
         List<BorelPole> poles = plane.poles(from, to);
         Report.Builder report = Report.builder("poles");
@@ -61,7 +70,7 @@ public final class PolesReport {
         List<Column> columns = List.of(
                 Column.of("u", "u0"), Column.of("order", "order"), Column.of("status", "status"),
                 Column.of("kind", "kind"), Column.of("power", "p"),
-                Column.of("power_correction", "power correction"), Column.of("operator", "operator"),
+                Column.of("power_correction", "relative power correction"), Column.of("operator", "operator"),
                 Column.of("laurent", "Laurent coefficients"));
         List<List<Value>> rows = new ArrayList<>();
         for (BorelPole pole : poles) {
@@ -83,14 +92,12 @@ public final class PolesReport {
         List<Column> columns =
                 List.of(Column.of("power", "power"), Column.of("exact", "exact"), Column.of("value", "value"));
         List<List<Value>> rows = new ArrayList<>();
-        int bits = (int) (digits * BITS_PER_DIGIT) + 40;
-        List<Ball> balls = pole.pole().balls(bits);
         for (int k = pole.pole().order(); k >= 1; k--) {
             ExactConstant exact = pole.pole().coefficient(-k);
             rows.add(List.of(
                     Value.count(-k),
                     exact.isClosedForm() ? Value.exact(exact.toString()) : Value.absent(),
-                    CertainDigits.of(balls.get(pole.pole().order() - k), digits)));
+                    CoefficientReport.value(CertifiedNumber.of(exact, digits))));
         }
         return new Table("laurent", "", columns, rows);
     }
@@ -111,14 +118,15 @@ public final class PolesReport {
             List<List<Value>> rows = new ArrayList<>();
             for (AlgebraicPole pole : algebraic) {
                 rows.add(List.of(
+                        RootInterval.of(pole, POSITION_DIGITS).decimal(POSITION_DIGITS),
                         Value.text(pole.polynomial() + " = 0"), Value.exact(pole.lower().toString()),
                         Value.exact(pole.upper().toString()), Value.count(pole.order()),
                         Value.text(pole.status().text()), CertainDigits.of(pole.leading(), digits)));
             }
             report.add(new Table(
-                    "algebraic_poles", "Poles at irrational points (isolating intervals)",
+                    "algebraic_poles", "Poles at irrational points, with isolating intervals",
                     List.of(
-                            Column.of("equation", "root of"), Column.of("lower", "above"), Column.of("upper", "below"),
+                            Column.of("u", "u0"), Column.of("equation", "root of"), Column.of("lower", "above"), Column.of("upper", "below"),
                             Column.of("order", "order"), Column.of("status", "status"),
                             Column.of("leading", "leading coefficient")),
                     rows));

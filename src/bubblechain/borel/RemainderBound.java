@@ -29,6 +29,9 @@ public record RemainderBound(double radius, Magnitude size) {
     private static final MathContext THREE_UP = new MathContext(3, RoundingMode.UP);
     private static final Rational BEYOND = Rational.of(2);
     private static final int ARCS = 64;
+    private static final int ROOT_DIGITS = 15;
+    /** Where in the gap the circle may lie: the higher the order, the nearer to the outer end the best one. */
+    private static final double[] PARTS_OF_GAP = {0.5, 0.75, 0.875, 0.96875};
 
     /**
      * The bound for c_n.
@@ -45,25 +48,42 @@ public record RemainderBound(double radius, Magnitude size) {
             return Optional.empty();
         }
         Rational limit = from.abs().compareTo(to.abs()) > 0 ? from.abs() : to.abs();
-        double radius = radius(form, plane, limit.add(BEYOND), from, to);
-        ArcBound.Bound arc;
+        Magnitude rest = entire.upperBound();
+        Gap gap = gap(form, plane, limit.add(BEYOND), from, to);
+        for (int k = 0; k < listed.size(); k++) {
+            if (listed.get(k).u().abs().toDouble() > gap.inner()) {
+                rest = rest.add(shares.get(k).upperBound());
+            }
+        }
+        Optional<RemainderBound> best = Optional.empty();
+        for (double part : PARTS_OF_GAP) {
+            Optional<RemainderBound> found = onCircle(form, gap.radius(part), n, rest);
+            if (best.isEmpty() || found.isPresent() && found.get().size.compareTo(best.get().size) < 0) {
+                best = found;
+            }
+        }
+        return best;
+    }
+
+    private static Optional<RemainderBound> onCircle(NormalForm form, double radius, int n, Magnitude rest) {
         try {
-            arc = ArcBound.maximum(form, radius, ARCS);
+            Magnitude arc = ArcBound.maximum(form, radius, ARCS).coefficientBound(n);
+            return Optional.of(
+                    new RemainderBound(radius, arc.multiply(Magnitude.of(ExactFunctions.factorial(n))).add(rest)));
         } catch (DomainException noCircle) {
             return Optional.empty();
         }
-        Magnitude factorial = Magnitude.of(ExactFunctions.factorial(n));
-        Magnitude size = arc.coefficientBound(n).multiply(factorial).add(entire.upperBound());
-        for (int k = 0; k < listed.size(); k++) {
-            if (listed.get(k).u().abs().toDouble() > radius) {
-                size = size.add(shares.get(k).upperBound());
-            }
-        }
-        return Optional.of(new RemainderBound(radius, size));
     }
 
-    /** The middle of the last gap between circles of singular points below the nearest pole that is not listed. */
-    private static double radius(NormalForm form, BorelPlane plane, Rational limit, Rational from, Rational to) {
+    /** Radii between two neighbouring circles of singular points. */
+    private record Gap(double inner, double outer) {
+        double radius(double part) {
+            return inner + part * (outer - inner);
+        }
+    }
+
+    /** The last gap between circles of singular points below the nearest pole that is not listed. */
+    private static Gap gap(NormalForm form, BorelPlane plane, Rational limit, Rational from, Rational to) {
         double missing = limit.toDouble();
         for (BorelPole pole : plane.poles(limit.negate(), limit)) {
             if (pole.u().compareTo(from) < 0 || pole.u().compareTo(to) > 0) {
@@ -72,7 +92,7 @@ public record RemainderBound(double radius, Magnitude size) {
         }
         SingularityList singularities = SingularityList.of(form);
         for (AlgebraicPole pole : singularities.algebraicPoles(limit.negate(), limit)) {
-            missing = Math.min(missing, Math.min(pole.lower().abs().toDouble(), pole.upper().abs().toDouble()));
+            missing = Math.min(missing, RootInterval.of(pole, ROOT_DIGITS).distance());
         }
         for (ComplexRoots.Pair pair : singularities.complexRoots()) {
             missing = Math.min(missing, Math.hypot(pair.re(), pair.im()));
@@ -80,7 +100,7 @@ public record RemainderBound(double radius, Magnitude size) {
         SortedSet<Double> circles = new TreeSet<>();
         circles.add(0.0);
         singularities.candidates(limit.negate(), limit).forEach(u -> circles.add(u.abs().toDouble()));
-        return (circles.headSet(missing).last() + missing) / 2;
+        return new Gap(circles.headSet(missing).last(), missing);
     }
 
     /** The bound in three digits, rounded up. */

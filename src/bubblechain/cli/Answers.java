@@ -28,6 +28,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.TreeMap;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -50,21 +51,33 @@ final class Answers {
     static Report coefficients(CoefficientsCommand c) {
         ChainOptions options = options(c.scales, Coupling.parse(c.coupling), Normalisation.parse(c.normalise));
         Kernel kernel = KernelLibrary.load(c.name, parameters(c.scales));
-        return CoefficientReport.of(
+        Report report = CoefficientReport.of(
                 c.anomalousDimension ? kernel.anomalousDimensionAsKernel() : kernel, options, c.loops, c.digits, c.exact,
                 c.flavourTerms);
+        return asked(report, c.scales.parameters);
     }
 
     static Report poles(PolesCommand c) {
         ChainOptions options = options(c.scales, Coupling.A, Normalisation.PREFACTOR);
         Kernel kernel = KernelLibrary.load(c.name, parameters(c.scales));
-        return PolesReport.of(
+        Report report = PolesReport.of(
                 kernel, options, rational("--from", c.from), rational("--to", c.to), c.digits, c.shareOf);
+        return asked(report, c.scales.parameters);
     }
 
     static Report residue(ResidueCommand c) {
         SumRuleRequest request = c.chain ? chainRequest(c) : seriesRequest(c);
-        return ResidueReport.of(SumRule.evaluate(request));
+        return asked(
+                ResidueReport.of(SumRule.evaluate(request)),
+                Map.of("chain", c.chain ? "yes" : "no", "remove_nearer", c.removeNearer ? "yes" : "no"));
+    }
+
+    /** A report with more entries in its request. */
+    private static Report asked(Report report, Map<String, String> more) {
+        Map<String, String> request = new LinkedHashMap<>(report.request());
+        new TreeMap<>(more).forEach(request::put);
+        return new Report(
+                report.command(), request, report.normalisation(), report.blocks(), report.sources(), report.cautions());
     }
 
     private static SumRuleRequest seriesRequest(ResidueCommand c) {

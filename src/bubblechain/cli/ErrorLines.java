@@ -73,7 +73,7 @@ final class ErrorLines {
             }
             return "unexpected argument '" + word + "'";
         }
-        String message = String.valueOf(failure.getMessage());
+        String message = String.valueOf(failure.getMessage()).replace("option option", "option");
         return message.substring(0, 1).toLowerCase(Locale.ROOT) + message.substring(1);
     }
 
