@@ -97,7 +97,7 @@ class ArchitectureTest {
 
     @Test
     void onlyReadersOfFilesUseToml() {
-        checkLibrary("org.tomlj..", "toml", "kernel", "fixedorder");
+        checkLibrary("org.tomlj..", "toml");
     }
 
     @Test

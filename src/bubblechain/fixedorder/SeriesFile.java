@@ -9,12 +9,9 @@ import bubblechain.formula.Definitions;
 import bubblechain.formula.Formula;
 import bubblechain.formula.FormulaException;
 import bubblechain.qcd.Coupling;
-import java.io.IOException;
-import java.io.InputStream;
-import java.nio.ByteBuffer;
-import java.nio.charset.CharacterCodingException;
-import java.nio.charset.StandardCharsets;
-import java.nio.file.Files;
+import bubblechain.toml.TomlException;
+import bubblechain.toml.TomlFile;
+import bubblechain.toml.TomlSection;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.HashSet;
@@ -23,10 +20,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Function;
-import org.tomlj.Toml;
-import org.tomlj.TomlParseError;
-import org.tomlj.TomlParseResult;
-import org.tomlj.TomlPosition;
 
 /**
  * Reads a series file: TOML with every number written as a string, so that it stays exact.
@@ -39,9 +32,6 @@ import org.tomlj.TomlPosition;
  * {@code u}, {@code kind}, {@code operator}, {@code exponent_shift} (a formula or "unknown"), {@code corrections}.
  */
 public final class SeriesFile {
-    /** Largest size of a file in bytes. */
-    public static final int LARGEST_SIZE = 1_000_000;
-
     private static final List<String> TOP_KEYS = List.of(
             "name", "title", "quantity", "scale", "coupling", "coupling_flavours", "flavours", "flavours_from",
             "flavours_to", "prefactor", "power", "sources", "cautions", "definitions", "coefficient", "singularity");
@@ -60,39 +50,14 @@ public final class SeriesFile {
         this.definitions = top.optionalTable("definitions").map(SeriesFile::definitions).orElse(Definitions.NONE);
     }
 
-    /** Reads a file. @throws SeriesException if it cannot be read, is too large, or is not a series */
+    /** Reads a file. @throws TomlException if it cannot be read, is too large, or is not a series */
     public static PerturbativeSeries read(Path path) {
-        try (InputStream stream = Files.newInputStream(path)) {
-            return read(stream, path.toString());
-        } catch (IOException e) {
-            throw new SeriesException("cannot read the series file " + path + "; check that it exists and is readable", e);
-        }
+        return new SeriesFile(TomlFile.read(path)).series();
     }
 
-    /** Reads a stream; {@code file} names it in messages. The stream is left open. */
-    static PerturbativeSeries read(InputStream stream, String file) throws IOException {
-        byte[] bytes = stream.readNBytes(LARGEST_SIZE + 1);
-        if (bytes.length > LARGEST_SIZE) {
-            throw new SeriesException(file + ": larger than the limit of " + LARGEST_SIZE + " bytes for a series file");
-        }
-        try {
-            return parse(StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString(), file);
-        } catch (CharacterCodingException e) {
-            throw new SeriesException(file + ": not a text in UTF-8", e);
-        }
-    }
-
-    /** Reads a text; {@code file} names it in messages. @throws SeriesException with file, line and column */
+    /** Reads a text; {@code file} names it in messages. @throws TomlException with file, line and column */
     public static PerturbativeSeries parse(String text, String file) {
-        TomlParseResult result = Toml.parse(text);
-        if (result.hasErrors()) {
-            TomlParseError first = result.errors().get(0);
-            TomlPosition position = first.position();
-            throw new SeriesException(file + ", line " + position.line() + ", column " + position.column() + ": "
-                    + String.valueOf(first.getMessage()).lines().findFirst().orElse("not TOML"));
-        }
-        TomlSection top = new TomlSection(file, "at the top of a series file", result, TomlPosition.positionAt(1, 1));
-        return new SeriesFile(top).series();
+        return new SeriesFile(TomlFile.parse(text, file)).series();
     }
 
     private static Definitions definitions(TomlSection section) {
@@ -124,7 +89,7 @@ public final class SeriesFile {
                     heavyFlavours(), flavours,
                     formula(top, "prefactor", top.optionalText("prefactor").orElse("1")),
                     top.rational("power"), coefficients, singularities(), top.texts("sources"), top.texts("cautions"));
-        } catch (SeriesException placed) {
+        } catch (TomlException placed) {
             throw placed;
         } catch (DomainException e) {
             throw top.rethrown("power", String.valueOf(e.getMessage()), e);
@@ -136,7 +101,7 @@ public final class SeriesFile {
         int to = top.integer("flavours_to");
         try {
             return new FlavourRange(from, to, top.text("flavours"));
-        } catch (SeriesException placed) {
+        } catch (TomlException placed) {
             throw placed;
         } catch (DomainException e) {
             throw top.rethrown("flavours_to", String.valueOf(e.getMessage()), e);

@@ -36,7 +36,7 @@ public final class SeriesLibrary {
      * The built-in series of this name, or the series in the file of this path.
      *
      * @throws DomainException if there is neither; the message names the nearest built-in ones
-     * @throws SeriesException if the file is not a series
+     * @throws bubblechain.toml.TomlException if the file is not a series
      */
     public static PerturbativeSeries find(String nameOrPath) {
         Optional<PerturbativeSeries> found = builtIn(nameOrPath);

@@ -5,6 +5,7 @@ import bubblechain.exact.BallFunctions;
 import bubblechain.exact.Rational;
 import bubblechain.qcd.BetaFunction;
 import bubblechain.report.Block;
+import bubblechain.report.CertainDigits;
 import bubblechain.report.Facts;
 import bubblechain.report.Note;
 import bubblechain.report.Report;
@@ -144,7 +145,7 @@ public final class ResidueReport {
     private Value order(Ball value, Ball strength, int n) {
         double k = Math.abs(strength.toDouble());
         double error = result.inputErrors().get(n - 1);
-        return CertainDigits.value(value, k == 0 ? error : error / k * Math.abs(value.toDouble()));
+        return CertainDigits.withError(value, k == 0 ? error : error / k * Math.abs(value.toDouble()));
     }
 
     private Facts value() {
@@ -162,7 +163,7 @@ public final class ResidueReport {
     private static Value withError(Ball value, ErrorBudget budget) {
         double error = budget.combined();
         return Value.group(Facts.titled("", "")
-                .with("value", "value", CertainDigits.value(value, error))
+                .with("value", "value", CertainDigits.withError(value, error))
                 .with("error", "error", CertainDigits.error(error)));
     }
 
@@ -219,8 +220,8 @@ public final class ResidueReport {
             Ball k = point.strengths().get(result.loops() - 1).multiply(prefactor, BITS);
             table.row(
                     Value.exact(point.lambda().toString()),
-                    CertainDigits.value(k, error),
-                    CertainDigits.value(normalisation(k), error * result.normalisationPerStrength()));
+                    CertainDigits.withError(k, error),
+                    CertainDigits.withError(normalisation(k), error * result.normalisationPerStrength()));
         }
         return table.build();
     }

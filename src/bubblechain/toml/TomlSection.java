@@ -42,7 +42,9 @@ public final class TomlSection {
         for (String key : table.keySet()) {
             if (!known.contains(key)) {
                 List<String> nearest = NearestNames.of(key, known);
-                String hint = nearest.isEmpty() ? "allowed are " + String.join(", ", known) : "did you mean " + nearest.get(0) + "?";
+                String hint = nearest.isEmpty()
+                        ? "allowed are " + String.join(", ", known)
+                        : "did you mean " + nearest.get(0) + "?";
                 throw error(key, "unknown key '" + key + "' " + section + "; " + hint);
             }
         }

@@ -7,6 +7,8 @@ import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import bubblechain.qcd.Coupling;
+import bubblechain.toml.TomlException;
+import bubblechain.toml.TomlFile;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -79,7 +81,7 @@ class SeriesFileTest {
     @CsvSource(delimiter = '|', quoteCharacter = '`', value = {
         "power = \"4\" | power = 4 | mine.toml, line 11, column 1: numbers are written as strings so that they stay exact: power = \"4\"",
         "power = \"4\" | power = 4.5 | numbers are written as strings so that they stay exact: power = \"4.5\"",
-        "power = \"4\" | powr = \"4\" | mine.toml, line 11, column 1: unknown key 'powr' at the top of a series file; did you mean power?",
+        "power = \"4\" | powr = \"4\" | mine.toml, line 11, column 1: unknown key 'powr' at the top of the file; did you mean power?",
         "power = \"4\" | power = \"four\" | mine.toml, line 11, column 1: 'four' is not a rational number such as 3, -3/4 or 1.25",
         "power = \"4\" | power = \"0\" | line 11, column 1: series 'mine' has power 0; give p = 2 u0 of its leading singularity",
         "errors = [\"0.5\", \"0.1*nf\"] | errors = [0.5] | line 20, column 1: numbers are written as strings",
@@ -97,13 +99,13 @@ class SeriesFileTest {
         "half = \"nf/2\" | half = \"nl/2\" | mine.toml, line 15, column 1, in 'half': line 1, column 1: the name 'nl' has no value here",
         "half + zeta(3) | 2nf | mine.toml, line 19, column 1, in 'value': line 1, column 1: two factors without an operator",
         "half + zeta(3) | whole | the name 'whole' has no value here",
-        "title = \"My series\" | # | the key 'title' is missing at the top of a series file",
+        "title = \"My series\" | # | the key 'title' is missing at the top of the file",
         "title = \"My series\" | title = | mine.toml, line 2, column 8",
     })
     void mistakesAreNamedWithTheirPlace(String good, String bad, String message) {
         assertThat(GOOD).contains(good);
         assertThatThrownBy(() -> parse(GOOD.replace(good, bad)))
-                .isInstanceOf(SeriesException.class)
+                .isInstanceOf(TomlException.class)
                 .hasMessageContaining(message);
     }
 
@@ -111,17 +113,17 @@ class SeriesFileTest {
     void aSeriesNeedsACoefficient() {
         String none = GOOD.substring(0, GOOD.indexOf("[[coefficient]]"));
         assertThatThrownBy(() -> parse(none))
-                .isInstanceOf(SeriesException.class)
+                .isInstanceOf(TomlException.class)
                 .hasMessageContaining("there is no [[coefficient]]; give at least one");
     }
 
     @Test
     void aListOfTablesIsNotReplacedByOneTable() {
         assertThatThrownBy(() -> parse(GOOD.replace("[[coefficient]]", "[coefficient]")))
-                .isInstanceOf(SeriesException.class)
+                .isInstanceOf(TomlException.class)
                 .hasMessageContaining("'coefficient' must be a list of tables: [[coefficient]]");
         assertThatThrownBy(() -> parse("definitions = \"x\"\n" + GOOD.replace("[definitions]\nhalf = \"nf/2\"", "")))
-                .isInstanceOf(SeriesException.class)
+                .isInstanceOf(TomlException.class)
                 .hasMessageContaining("'definitions' must be a table: [definitions]");
     }
 
@@ -143,17 +145,17 @@ class SeriesFileTest {
     @Test
     void hugeAndMissingAndBinaryFilesAreRefused(@TempDir Path folder) throws IOException {
         Path huge = folder.resolve("huge.toml");
-        Files.write(huge, ("#" + " ".repeat(SeriesFile.LARGEST_SIZE)).getBytes(StandardCharsets.UTF_8));
+        Files.write(huge, ("#" + " ".repeat(TomlFile.LARGEST_SIZE)).getBytes(StandardCharsets.UTF_8));
         assertThatThrownBy(() -> SeriesFile.read(huge))
-                .isInstanceOf(SeriesException.class)
+                .isInstanceOf(TomlException.class)
                 .hasMessageContaining("larger than the limit of 1000000 bytes");
         assertThatThrownBy(() -> SeriesFile.read(folder.resolve("none.toml")))
-                .isInstanceOf(SeriesException.class)
+                .isInstanceOf(TomlException.class)
                 .hasMessageContaining("check that it exists and is readable");
         Path binary = folder.resolve("binary.toml");
         Files.write(binary, new byte[] {(byte) 0xff, (byte) 0xfe});
         assertThatThrownBy(() -> SeriesFile.read(binary))
-                .isInstanceOf(SeriesException.class)
+                .isInstanceOf(TomlException.class)
                 .hasMessageContaining("not a text in UTF-8");
     }
 

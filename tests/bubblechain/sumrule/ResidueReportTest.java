@@ -7,6 +7,7 @@ import bubblechain.exact.Rational;
 import bubblechain.fixedorder.SeriesLibrary;
 import bubblechain.fixedorder.Singularity;
 import bubblechain.report.Block;
+import bubblechain.report.CertainDigits;
 import bubblechain.report.Column;
 import bubblechain.report.Fact;
 import bubblechain.report.Facts;
@@ -121,7 +122,7 @@ class ResidueReportTest {
         "2/3000, 0.0000001, 0.00066667", "-7/3, 0.05, -2.333", "0, 0, 0",
     })
     void valuesEndWhereTheirErrorBegins(String value, double error, String printed) {
-        assertThat(CertainDigits.value(Ball.of(Rational.parse(value), 200), error)).isEqualTo(Value.numeral(printed));
+        assertThat(CertainDigits.withError(Ball.of(Rational.parse(value), 200), error)).isEqualTo(Value.numeral(printed));
     }
 
     @ParameterizedTest
