@@ -8,10 +8,6 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
-import org.tomlj.Toml;
-import org.tomlj.TomlParseError;
-import org.tomlj.TomlParseResult;
-import org.tomlj.TomlPosition;
 
 /** Opens a TOML file or resource of limited size. */
 public final class TomlFile {
@@ -60,15 +56,8 @@ public final class TomlFile {
     /** The top of a text; {@code file} names it in messages. */
     public static TomlSection parse(String text, String file) {
         refuseDeepNesting(text, file);
-        TomlParseResult result = Toml.parse(text);
-        if (result.hasErrors()) {
-            TomlParseError first = result.errors().get(0);
-            TomlPosition position = first.position();
-            String reason = String.valueOf(first.getMessage()).lines().findFirst().orElse("malformed");
-            throw new TomlException(file + ", line " + position.line() + ", column " + position.column()
-                    + ": not TOML: " + reason);
-        }
-        return new TomlSection(file, "at the top of the file", result, TomlPosition.positionAt(1, 1));
+        Node.Table top = PlainReader.read(text).orElseGet(() -> GeneralReader.read(text, file));
+        return new TomlSection(file, "at the top of the file", top);
     }
 
     private static void refuseDeepNesting(String text, String file) {

@@ -6,26 +6,21 @@ import bubblechain.formula.Formula;
 import bubblechain.formula.FormulaException;
 import bubblechain.report.NearestNames;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import org.jspecify.annotations.Nullable;
-import org.tomlj.TomlArray;
-import org.tomlj.TomlPosition;
-import org.tomlj.TomlTable;
 
 /** A table of a file whose entries are texts; every complaint names file, line and column. */
 public final class TomlSection {
     private final String file;
     private final String section;
-    private final TomlTable table;
-    private final TomlPosition start;
+    private final Node.Table table;
 
-    TomlSection(String file, String section, TomlTable table, TomlPosition start) {
+    TomlSection(String file, String section, Node.Table table) {
         this.file = file;
         this.section = section;
         this.table = table;
-        this.start = start;
     }
 
     /** The name of the file, as messages show it. */
@@ -34,12 +29,12 @@ public final class TomlSection {
     }
 
     public Set<String> keys() {
-        return table.keySet();
+        return Collections.unmodifiableSet(table.entries().keySet());
     }
 
     /** Refuses any key that is not one of {@code known}, naming the nearest of them. */
     public void requireKnown(List<String> known) {
-        for (String key : table.keySet()) {
+        for (String key : table.entries().keySet()) {
             if (!known.contains(key)) {
                 List<String> nearest = NearestNames.of(key, known);
                 String hint = nearest.isEmpty()
@@ -52,84 +47,86 @@ public final class TomlSection {
 
     /** A complaint about a key of this table, with its place. */
     public TomlException error(String key, String reason) {
-        @Nullable TomlPosition position = table.inputPositionOf(List.of(key));
-        return at(position == null ? start : position, reason);
+        return at(nodeOf(key), reason);
     }
 
-    private TomlException at(TomlPosition position, String reason) {
-        return new TomlException(place(position) + ": " + reason);
+    private Node nodeOf(String key) {
+        return table.entries().getOrDefault(key, table);
     }
 
-    private String place(TomlPosition position) {
-        return file + ", line " + position.line() + ", column " + position.column();
+    private TomlException at(Node node, String reason) {
+        return new TomlException(place(node) + ": " + reason);
+    }
+
+    private String place(Node node) {
+        return file + ", line " + node.line() + ", column " + node.column();
     }
 
     /** The text of a key. @throws TomlException if it is missing or not a string */
     public String text(String key) {
-        return optionalText(key).orElseThrow(() -> at(start, "the key '" + key + "' is missing " + section));
+        return optionalText(key).orElseThrow(() -> at(table, "the key '" + key + "' is missing " + section));
     }
 
     public Optional<String> optionalText(String key) {
-        @Nullable Object value = table.get(List.of(key));
-        return value == null ? Optional.empty() : Optional.of(asText(key, value));
+        return value(key).map(node -> asText(key, node));
     }
 
-    private String asText(String key, Object value) {
-        if (value instanceof String text) {
-            return text;
+    private Optional<Node> value(String key) {
+        return Optional.ofNullable(table.entries().get(key));
+    }
+
+    private String asText(String key, Node value) {
+        if (value instanceof Node.Text text) {
+            return text.text();
         }
-        if (value instanceof Long || value instanceof Double) {
-            throw error(key, "numbers are written as strings so that they stay exact: " + key + " = \"" + value + "\"");
+        if (value instanceof Node.Other other && other.number()) {
+            throw error(key, "numbers are written as strings so that they stay exact: " + key + " = \"" + other.text() + "\"");
         }
         throw error(key, "'" + key + "' must be a string");
     }
 
     /** A list of strings, empty if the key is absent. */
     public List<String> texts(String key) {
-        @Nullable Object value = table.get(List.of(key));
-        if (value == null) {
+        Optional<Node> value = value(key);
+        if (value.isEmpty()) {
             return List.of();
         }
-        if (!(value instanceof TomlArray array)) {
+        if (!(value.get() instanceof Node.Listing list)) {
             throw error(key, "'" + key + "' must be a list of strings: " + key + " = [\"...\"]");
         }
-        List<String> result = new ArrayList<>();
-        for (Object entry : array.toList()) {
-            result.add(asText(key, entry));
-        }
-        return result;
+        return list.entries().stream().map(entry -> asText(key, entry)).toList();
     }
 
     /** The tables [[key]], empty if the key is absent. */
     public List<TomlSection> tables(String key) {
-        @Nullable Object value = table.get(List.of(key));
-        if (value == null) {
+        Optional<Node> value = value(key);
+        if (value.isEmpty()) {
             return List.of();
         }
-        if (!(value instanceof TomlArray array)) {
-            throw error(key, "'" + key + "' must be a list of tables: [[" + key + "]]");
-        }
         List<TomlSection> result = new ArrayList<>();
-        for (int k = 0; k < array.size(); k++) {
-            if (!(array.get(k) instanceof TomlTable entry)) {
-                throw error(key, "'" + key + "' must be a list of tables: [[" + key + "]]");
+        if (value.get() instanceof Node.Listing list) {
+            for (Node entry : list.entries()) {
+                if (entry instanceof Node.Table inner) {
+                    result.add(new TomlSection(file, "in [[" + key + "]]", inner));
+                }
             }
-            result.add(new TomlSection(file, "in [[" + key + "]]", entry, array.inputPositionOf(k)));
+            if (result.size() == list.entries().size()) {
+                return result;
+            }
         }
-        return result;
+        throw error(key, "'" + key + "' must be a list of tables: [[" + key + "]]");
     }
 
     /** The table [key], if there is one. */
     public Optional<TomlSection> optionalTable(String key) {
-        @Nullable Object value = table.get(List.of(key));
-        if (value == null) {
+        Optional<Node> value = value(key);
+        if (value.isEmpty()) {
             return Optional.empty();
         }
-        if (!(value instanceof TomlTable inner)) {
+        if (!(value.get() instanceof Node.Table inner)) {
             throw error(key, "'" + key + "' must be a table: [" + key + "]");
         }
-        @Nullable TomlPosition position = table.inputPositionOf(List.of(key));
-        return Optional.of(new TomlSection(file, "in [" + key + "]", inner, position == null ? start : position));
+        return Optional.of(new TomlSection(file, "in [" + key + "]", inner));
     }
 
     /** An exact rational number written as a string. */
@@ -171,7 +168,6 @@ public final class TomlSection {
     }
 
     private String position(String key) {
-        @Nullable TomlPosition position = table.inputPositionOf(List.of(key));
-        return place(position == null ? start : position);
+        return place(nodeOf(key));
     }
 }
