@@ -25,6 +25,7 @@ public final class FixedSeries {
     private static final int DIGITS_AT_ONCE = 64;
 
     private static final int SMALL = 1 << 26;
+    private static final int MANTISSA_BITS = 52;
 
     private final int limbs;
     private final long[][] digits;
@@ -84,10 +85,16 @@ public final class FixedSeries {
     /** A ball for the coefficient of v^k. */
     public Ball coefficient(int k) {
         Ball middle = Ball.ofDyadic(FixedDigits.toInteger(digits[k]), -bits(limbs));
-        double error = errors[k];
-        return error == 0
-                ? middle
-                : middle.addError(Magnitude.of((long) Math.ceil(error * UP)).scale(-bits(limbs)));
+        return errors[k] == 0 ? middle : middle.addError(magnitude(errors[k] * UP).scale(-bits(limbs)));
+    }
+
+    /** Not below a bound, which may exceed the range of a long. */
+    private static Magnitude magnitude(double bound) {
+        if (!(bound < Double.MAX_VALUE)) {
+            throw new ArithmeticException("an error bound left the range of a double");
+        }
+        int shift = Math.max(0, Math.getExponent(bound) - MANTISSA_BITS);
+        return Magnitude.of((long) Math.ceil(Math.scalb(bound, -shift))).scale(shift);
     }
 
     /** The error bound of the coefficient of v^k in units of the last place. */
