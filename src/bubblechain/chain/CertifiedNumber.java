@@ -4,6 +4,9 @@ import bubblechain.exact.Ball;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.PrecisionException;
 import bubblechain.exact.Rational;
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.Optional;
 
 /**
@@ -16,7 +19,16 @@ import java.util.Optional;
  */
 public record CertifiedNumber(String text, boolean isZero, boolean isDecimal) {
     private static final double DIGITS_PER_BIT = 0.30102999566398120;
-    private static final int LAST_BITS_FACTOR = 8;
+    /** Precision beyond the digits asked for, up to which a number that may be zero is refined. */
+    private static final int FIRST_EXTRA_BITS = 128;
+
+    private static final int LAST_EXTRA_BITS = 2_048;
+
+    /** The decimal of an exact constant, rounded half-even to a number of significant digits. */
+    public static CertifiedNumber of(ExactConstant value, int digits) {
+        int bits = (int) (digits / DIGITS_PER_BIT) + 64;
+        return of(value, value.toBall(bits), digits, bits);
+    }
 
     /** From a ball, if its digits are certain or it is exactly zero. */
     static Optional<CertifiedNumber> ifDecided(Ball ball, int digits) {
@@ -35,10 +47,16 @@ public record CertifiedNumber(String text, boolean isZero, boolean isDecimal) {
             return new CertifiedNumber(decimal.get(), false, true);
         }
         if (ball.containsZero()) {
-            int power = (int) Math.floor(-Math.log10(ball.upperBound().toDouble()));
-            return new CertifiedNumber("0 within 10^" + -power + " (not proved zero)", false, false);
+            return new CertifiedNumber("0 within 10^" + decadeAbove(ball) + " (not proved zero)", false, false);
         }
         throw new PrecisionException("the digits of " + ball + " could not be decided to " + digits + " places");
+    }
+
+    /** A k with |x| &lt;= 10^k for all x of the ball, also where a double would underflow. */
+    private static int decadeAbove(Ball ball) {
+        Rational bound = ball.upperBound().toRational();
+        int bits = bound.numerator().bitLength() - bound.denominator().bitLength() + 1;
+        return (int) Math.ceil(bits * DIGITS_PER_BIT);
     }
 
     /** From the exact value where the ball leaves a doubt. */
@@ -53,29 +71,29 @@ public record CertifiedNumber(String text, boolean isZero, boolean isDecimal) {
         if (rational.isPresent()) {
             return of(rational.get(), digits);
         }
-        for (int working = bits; working <= LAST_BITS_FACTOR * bits; working *= 2) {
-            Ball refined = exact.toBall(working);
+        Ball refined = ball;
+        for (int extra = FIRST_EXTRA_BITS; extra <= LAST_EXTRA_BITS; extra *= 2) {
+            refined = exact.toBall(bits + extra);
             if (refined.toDecimal(digits).isPresent()) {
-                return of(refined, digits);
+                break;
             }
         }
-        return of(exact.toBall(LAST_BITS_FACTOR * bits), digits);
+        return of(refined, digits);
     }
 
     /** A rational, rounded half-even. */
     private static CertifiedNumber of(Rational value, int digits) {
         int bits = (int) (digits / DIGITS_PER_BIT) + 64;
-        for (int working = bits; working <= LAST_BITS_FACTOR * bits; working *= 2) {
+        for (int working = bits; working <= bits + LAST_EXTRA_BITS; working *= 2) {
             Optional<String> decimal = Ball.of(value, working).toDecimal(digits);
             if (decimal.isPresent()) {
                 return new CertifiedNumber(decimal.get(), false, true);
             }
         }
         // A tie: the decimal expansion ends exactly half-way, so the number is a multiple of a power of ten.
-        java.math.BigDecimal exact = new java.math.BigDecimal(value.numerator())
-                .divide(
-                        new java.math.BigDecimal(value.denominator()),
-                        new java.math.MathContext(digits, java.math.RoundingMode.HALF_EVEN));
-        return new CertifiedNumber(exact.toPlainString(), false, true);
+        BigDecimal rounded = new BigDecimal(value.numerator())
+                .divide(new BigDecimal(value.denominator()), new MathContext(digits, RoundingMode.HALF_EVEN));
+        String text = Ball.of(Rational.parse(rounded.toPlainString()), bits).toDecimal(digits).orElseThrow();
+        return new CertifiedNumber(text, false, true);
     }
 }

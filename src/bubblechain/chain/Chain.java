@@ -20,6 +20,8 @@ public final class Chain {
     public static final int LARGEST_LOOPS = 1_000;
     /** Largest number of coefficients in exact form. */
     public static final int LARGEST_EXACT_LOOPS = 40;
+    /** Terms of an exact coefficient up to which longer exact lists stay cheap. */
+    private static final int FEW_TERMS = 20;
     /** Largest number of digits. */
     public static final int LARGEST_DIGITS = 10_000;
 
@@ -105,33 +107,53 @@ public final class Chain {
     public List<CertifiedNumber> certified(int loops, int digits, Rendering rendering) {
         requireRange("the number of digits", digits, LARGEST_DIGITS);
         int needed = (int) Math.ceil(digits * BITS_PER_DIGIT) + 2 * (32 - Integer.numberOfLeadingZeros(loops));
-        boolean exactReaches = loops <= LARGEST_EXACT_LOOPS;
         for (int guard = FIRST_GUARD_BITS; ; guard *= 2) {
             int bits = needed + guard;
             List<Ball> balls = rendering.applyToBalls(balls(loops, bits), bits);
             List<Optional<CertifiedNumber>> numbers =
                     balls.stream().map(b -> CertifiedNumber.ifDecided(b, digits)).toList();
-            if (numbers.stream().allMatch(Optional::isPresent)) {
+            int open = undecided(numbers);
+            if (open == 0) {
                 return numbers.stream().flatMap(Optional::stream).toList();
             }
-            if (2 * guard > LARGEST_GUARD_BITS || exactReaches && guard >= 2 * FIRST_GUARD_BITS) {
-                return settled(balls, numbers, digits, rendering, bits);
+            // what more bits do not settle is a zero or a tie, which exact arithmetic decides where it is affordable
+            if (2 * guard > LARGEST_GUARD_BITS || open <= LARGEST_EXACT_LOOPS && guard >= 2 * FIRST_GUARD_BITS) {
+                return settled(balls, numbers, rendering.applyToExact(affordable(open)), digits, bits);
             }
         }
     }
 
-    /** The numbers that balls could not decide, by the exact route where it reaches. */
-    private List<CertifiedNumber> settled(
-            List<Ball> balls, List<Optional<CertifiedNumber>> numbers, int digits, Rendering rendering, int bits) {
-        List<ExactConstant> exact =
-                balls.size() <= LARGEST_EXACT_LOOPS ? rendering.applyToExact(exact(balls.size())) : List.of();
+    /** One more than the index of the last number in doubt; 0 if there is none. */
+    private static int undecided(List<Optional<CertifiedNumber>> numbers) {
+        for (int n = numbers.size() - 1; n >= 0; n--) {
+            if (numbers.get(n).isEmpty()) {
+                return n + 1;
+            }
+        }
+        return 0;
+    }
+
+    /** At most {@code loops} exact coefficients: beyond the general limit only while they have few terms. */
+    private List<ExactConstant> affordable(int loops) {
+        int reached = Math.min(loops, LARGEST_EXACT_LOOPS);
+        List<ExactConstant> exact = exact(reached);
+        while (reached < loops && exact.stream().allMatch(c -> c.size() <= FEW_TERMS)) {
+            reached = Math.min(loops, 2 * reached);
+            exact = new ExactCoefficients().coefficients(kernel, reached, scales);
+        }
+        return exact;
+    }
+
+    /** The numbers that balls could not decide, by the exact ones as far as these reach. */
+    private static List<CertifiedNumber> settled(
+            List<Ball> balls, List<Optional<CertifiedNumber>> numbers, List<ExactConstant> exact, int digits, int bits) {
         List<CertifiedNumber> result = new ArrayList<>();
         for (int n = 0; n < balls.size(); n++) {
             Ball ball = balls.get(n);
-            int index = n;
-            result.add(numbers.get(n).orElseGet(() -> exact.isEmpty()
-                    ? CertifiedNumber.of(ball, digits)
-                    : CertifiedNumber.of(exact.get(index), ball, digits, bits)));
+            Optional<ExactConstant> form = n < exact.size() ? Optional.of(exact.get(n)) : Optional.empty();
+            result.add(numbers.get(n).orElseGet(() -> form
+                    .map(c -> CertifiedNumber.of(c, ball, digits, bits))
+                    .orElseGet(() -> CertifiedNumber.of(ball, digits))));
         }
         return result;
     }

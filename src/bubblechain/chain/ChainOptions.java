@@ -5,10 +5,12 @@ import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import bubblechain.formula.ConstantValue;
 import bubblechain.formula.Formula;
+import bubblechain.formula.FormulaException;
 import bubblechain.kernel.Kernel;
 import bubblechain.qcd.Coupling;
 import bubblechain.qcd.Normalisation;
 import bubblechain.qcd.Theory;
+import java.math.BigInteger;
 import java.util.Optional;
 import java.util.OptionalInt;
 
@@ -34,6 +36,9 @@ public record ChainOptions(
     /** Largest number of massless flavours. */
     public static final int LARGEST_NF = 16;
 
+    /** Characters up to which a rational ratio of scales is written out in words. */
+    private static final int LONGEST_FACTOR = 12;
+
     /** mu = scale, coupling a, prefactor taken out, MS-bar. */
     public static final ChainOptions DEFAULT = new ChainOptions(
             "1", "1", Coupling.A, Normalisation.PREFACTOR, Scheme.MSBAR, OptionalInt.empty(), OptionalInt.empty());
@@ -46,6 +51,12 @@ public record ChainOptions(
     /** The same with another scale of the coupling. */
     public ChainOptions withMu(String value) {
         return new ChainOptions(value, operatorMuOverScale, coupling, normalisation, scheme, nf, couplingFlavours);
+    }
+
+    /** The same for a number of massless flavours. */
+    public ChainOptions withFlavours(int value) {
+        return new ChainOptions(
+                muOverScale, operatorMuOverScale, coupling, normalisation, scheme, OptionalInt.of(value), couplingFlavours);
     }
 
     private static void requireFlavours(int nf) {
@@ -65,9 +76,19 @@ public record ChainOptions(
         return scheme == Scheme.V ? flavoured.withVCoupling() : flavoured;
     }
 
+    /** The scales of a coupling that counts the flavours in the bubbles only. */
+    Scales scalesWithoutHeavyQuark(Kernel kernel) {
+        return new ChainOptions(muOverScale, operatorMuOverScale, coupling, normalisation, scheme, nf, nf).scales(kernel);
+    }
+
     /** A positive constant of the formula language. */
     public static ExactConstant ratio(String option, String text) {
-        ExactConstant value = ConstantValue.of(Formula.parse(text));
+        ExactConstant value;
+        try {
+            value = ConstantValue.of(Formula.parse(text));
+        } catch (FormulaException e) {
+            throw e.in(option + ": ");
+        }
         boolean positive = value.asRational()
                 .map(q -> q.signum() > 0)
                 .orElseGet(() -> value.toBall(128).isPositive());
@@ -112,17 +133,31 @@ public record ChainOptions(
         return scaled(muOverScale, kernel.scale());
     }
 
+    /** A multiple of a scale in words: "2 m", "m/2", "(3/2) m", "sqrt(8)/r", "1/(2 r)". */
     private static String scaled(String ratio, String scale) {
-        Optional<Rational> value = ConstantValue.of(Formula.parse(ratio)).asRational();
+        Formula formula = Formula.parse(ratio);
+        Optional<Rational> value = ConstantValue.of(formula).asRational();
         if (value.isPresent() && value.get().equals(Rational.ONE)) {
             return scale;
         }
-        String factor = value.map(Rational::toString).orElse(ratio);
-        boolean plain = factor.matches("[0-9a-z(]+[0-9a-z_(),]*\\)?");
-        if (scale.startsWith("1/")) {
-            return (plain ? factor : "(" + factor + ")") + scale.substring(1);
+        boolean inverse = scale.startsWith("1/");
+        if (value.isPresent() && value.get().numerator().equals(BigInteger.ONE)) {
+            return inverse ? "1/(" + value.get().inverse() + " " + scale.substring(2) + ")" : scale + "/" + value.get().inverse();
         }
-        return (plain ? factor : "(" + factor + ")") + " " + scale;
+        String factor = value.map(Rational::toString)
+                .filter(text -> text.length() <= LONGEST_FACTOR)
+                .orElse(formula.print());
+        boolean plain = value.map(Rational::isInteger).orElseGet(() -> isFactor(formula));
+        String front = plain ? factor : "(" + factor + ")";
+        return front + (inverse ? scale.substring(1) : " " + scale);
+    }
+
+    /** True if a formula may stand in front of another factor without parentheses. */
+    private static boolean isFactor(Formula formula) {
+        return !(formula instanceof Formula.Negation)
+                && !(formula instanceof Formula.Binary b
+                        && b.operator() != Formula.Operator.MULTIPLY
+                        && b.operator() != Formula.Operator.POWER);
     }
 
     /** The coupling in words, such as "alpha_s^(4)(2 m)/pi". */
@@ -147,8 +182,11 @@ public record ChainOptions(
                 : normalisation == Normalisation.FIRST ? "(first coefficient) " : kernel.prefactor().words() + " ";
         String operator = operatorMuOverScale.equals("1") || kernel.anomalousDimension().isEmpty()
                 ? ""
-                : "; operator renormalised at " + scaled(operatorMuOverScale, kernel.scale());
+                : "; operator renormalised at " + scaled(operatorMuOverScale, kernel.scale()) + " instead";
+        String decoupling = countsHeavyQuark(kernel)
+                ? "; the " + couplingFlavours.getAsInt() + "-flavour coupling is decoupled at " + kernel.scale() + ", at one loop"
+                : "";
         return kernel.quantity() + " = " + front + "sum_{n>=0} c_n " + expansion + "^(n+1), " + meaning + operator
-                + ", large-beta0 limit" + (scheme == Scheme.V ? ", V-scheme coupling" : ", MS-bar coupling");
+                + decoupling + ", large-beta0 limit" + (scheme == Scheme.V ? ", V-scheme coupling" : ", MS-bar coupling");
     }
 }

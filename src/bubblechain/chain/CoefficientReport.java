@@ -15,7 +15,7 @@ public final class CoefficientReport {
     public static final String MODEL_CAUTION =
             "Large beta0 is a model of the series, not QCD: beyond the flavour terms the coefficients are estimates.";
 
-    /** Loops up to which the closed forms are shown without being asked for. */
+    /** Most nf^n terms that are shown. */
     private static final int LARGEST_FLAVOUR_TERM = 20;
 
     private CoefficientReport() {}
@@ -43,7 +43,7 @@ public final class CoefficientReport {
         report.normalisation(options.words(kernel));
         report.add(table(numbers, closed));
         if (flavourTerms) {
-            report.add(flavourTable(kernel, Math.min(loops, LARGEST_FLAVOUR_TERM), digits));
+            report.add(flavourTable(kernel, options, Math.min(loops, LARGEST_FLAVOUR_TERM), digits));
         }
         kernel.sources().forEach(report::source);
         kernel.cautions().forEach(report::caution);
@@ -88,19 +88,23 @@ public final class CoefficientReport {
         return number.isDecimal() ? Value.numeral(number.text()) : Value.text(number.text());
     }
 
-    private static Table flavourTable(Kernel kernel, int loops, int digits) {
+    /** The highest power of nf does not see the heavy quark in the running: a coupling of nf or nf + 1 flavours alike. */
+    private static Table flavourTable(Kernel kernel, ChainOptions options, int loops, int digits) {
+        String coupling = kernel.theory().coupling() + "/pi";
         List<Column> columns = List.of(
-                Column.of("n", "n"), Column.of("value", "nf^n term in (alpha/pi)^(n+1)"), Column.of("exact", "exact"));
+                Column.of("n", "n"), Column.of("value", "nf^n term in (" + coupling + ")^(n+1)"),
+                Column.of("exact", "exact"));
         List<List<Value>> rows = new ArrayList<>();
-        List<ExactConstant> coefficients = Chain.of(kernel).exact(loops);
+        List<ExactConstant> coefficients = Chain.of(kernel, options.scalesWithoutHeavyQuark(kernel)).exact(loops);
         for (int n = 0; n < loops; n++) {
             ExactConstant term = FlavourTerm.perAlphaOverPi(kernel, n, coefficients.get(n));
-            CertifiedNumber number = CertifiedNumber.of(term, term.toBall(4 * digits + 64), digits, 4 * digits + 64);
             rows.add(List.of(
                     Value.count(n),
-                    value(number),
+                    value(CertifiedNumber.of(term, digits)),
                     term.isClosedForm() ? Value.exact(term.toString()) : Value.absent()));
         }
-        return new Table("nf_terms", "The nf^n terms of the full series at mu = scale, prefactor included", columns, rows);
+        String title = "The nf^n terms of the full series at mu = " + options.scaleWords(kernel)
+                + ", prefactor included (at most " + LARGEST_FLAVOUR_TERM + ")";
+        return new Table("nf_terms", title, columns, rows);
     }
 }
