@@ -17,8 +17,11 @@ final class FixedDigits {
     private static final long HALF = 1L << (BITS - 1);
     private static final int WORD = 28;
     private static final long WORD_MASK = (1L << WORD) - 1;
-    /** The integer digit must stay below this; beyond it the computation is given up. */
-    private static final long OVERFLOW = 1L << 60;
+    /**
+     * The integer digit must stay within this; beyond it the computation is given up. 64 times as much, which
+     * {@link #combination} can make of it,, still fits a long.
+     */
+    static final long LARGEST = 1L << 56;
 
     private FixedDigits() {}
 
@@ -75,7 +78,7 @@ final class FixedDigits {
             digits[k] = d - (carry << BITS);
         }
         digits[0] += carry;
-        if (digits[0] > OVERFLOW || digits[0] < -OVERFLOW) {
+        if (digits[0] > LARGEST || digits[0] < -LARGEST) {
             throw new ArithmeticException("a fixed-point number is out of range");
         }
     }
@@ -153,7 +156,7 @@ final class FixedDigits {
         System.arraycopy(sums, 2, digits, 0, limbs + 1);
         // sums[0] and sums[1] stand above the integer digit: a sign extension unless the number is out of range
         long above = (sums[0] << BITS) + sums[1];
-        if (above > 7 || above < -8) {
+        if (sums[0] > 0 || sums[0] < -1 || above > 7 || above < -8) {
             throw new ArithmeticException("a fixed-point number is out of range");
         }
         digits[0] += above << BITS;
@@ -161,7 +164,10 @@ final class FixedDigits {
         return digits;
     }
 
-    /** number/divisor for 0 &lt; divisor &lt; 2^26, truncated: the error is below one unit in the last place. */
+    /**
+     * number/divisor for 0 &lt; divisor &lt; 2^26, cut off: the error is below 1 + 2^-20 units in the last place, the excess
+     * because a quotient of doubles can fall just below an integer.
+     */
     static void divideSmall(long[] digits, int divisor) {
         double inverse = 1.0 / divisor;
         long remainder = 0;
@@ -198,7 +204,8 @@ final class FixedDigits {
 
     /**
      * sum_i weights[i] terms[i] / divisor into target, for up to {@link #TERMS} terms, |weights| &lt; 2^26 and
-     * 0 &lt; divisor &lt; 2^26: one pass, the error of the division below two units in the last place.
+     * 0 &lt; divisor &lt; 2^26, sum |weights| at most 64 divisor: one pass, the error of the division below two units in the
+     * last place.
      */
     static void combination(long[] target, long[][] terms, int[] weights, int count, int divisor) {
         double inverse = 1.0 / divisor;
