@@ -28,6 +28,8 @@ import java.util.TreeSet;
 public record RemainderBound(double radius, Magnitude size) {
     private static final MathContext THREE_UP = new MathContext(3, RoundingMode.UP);
     private static final Rational BEYOND = Rational.of(2);
+    /** How far beyond the range a circle may lie where nothing but the range limits it. */
+    private static final int FURTHEST = 12;
     private static final int ARCS = 64;
     private static final int ROOT_DIGITS = 15;
     /** Where in the gap the circle may lie: the higher the order, the nearer to the outer end the best one. */
@@ -50,6 +52,10 @@ public record RemainderBound(double radius, Magnitude size) {
         Rational limit = from.abs().compareTo(to.abs()) > 0 ? from.abs() : to.abs();
         Magnitude rest = entire.upperBound();
         Gap gap = gap(form, plane, limit.add(BEYOND), from, to);
+        if (gap.isOpen() && 2 * gap.outer() < n) {
+            // nothing is missing so far: the larger the circle the better, up to about n
+            gap = gap(form, plane, limit.add(Rational.of(Math.min(n, FURTHEST))), from, to);
+        }
         for (int k = 0; k < listed.size(); k++) {
             if (listed.get(k).u().abs().toDouble() > gap.inner()) {
                 rest = rest.add(shares.get(k).upperBound());
@@ -75,8 +81,12 @@ public record RemainderBound(double radius, Magnitude size) {
         }
     }
 
-    /** Radii between two neighbouring circles of singular points. */
-    private record Gap(double inner, double outer) {
+    /**
+     * Radii between two neighbouring circles of singular points.
+     *
+     * @param isOpen true if no singular point that is not listed was found at the outer end
+     */
+    private record Gap(double inner, double outer, boolean isOpen) {
         double radius(double part) {
             return inner + part * (outer - inner);
         }
@@ -100,7 +110,7 @@ public record RemainderBound(double radius, Magnitude size) {
         SortedSet<Double> circles = new TreeSet<>();
         circles.add(0.0);
         singularities.candidates(limit.negate(), limit).forEach(u -> circles.add(u.abs().toDouble()));
-        return new Gap(circles.headSet(missing).last(), missing);
+        return new Gap(circles.headSet(missing).last(), missing, missing == limit.toDouble());
     }
 
     /** The bound in three digits, rounded up. */
