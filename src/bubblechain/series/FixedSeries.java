@@ -316,13 +316,16 @@ public final class FixedSeries {
         return FixedDigits.toInteger(digits[k]);
     }
 
-    /** v^shift times this for a positive shift, or this over v^-shift, whose first coefficients are dropped. */
+    /** v^shift times this, shift not negative; the coefficients beyond the length are dropped. */
     public FixedSeries shifted(int shift) {
+        if (shift < 0) {
+            throw new IllegalArgumentException("a series has no coefficients to give for v^" + shift);
+        }
         long[][] moved = new long[length()][];
         double[] bounds = new double[length()];
         for (int k = 0; k < moved.length; k++) {
             int from = k - shift;
-            boolean inside = from >= 0 && from < moved.length;
+            boolean inside = from >= 0;
             moved[k] = inside ? digits[from] : new long[limbs + 1];
             bounds[k] = inside ? errors[from] : 0;
         }

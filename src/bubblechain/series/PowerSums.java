@@ -34,6 +34,11 @@ public final class PowerSums {
 
     /** Adds weight ratio^k to the sum of every k from 1 to {@code largest}. */
     public void add(Rational ratio, int weight, int largest) {
+        if (Math.abs((long) weight) > WEIGHT_LIMIT) {
+            add(ratio, weight / 2, largest);
+            add(ratio, weight - weight / 2, largest);
+            return;
+        }
         pending += Math.abs(weight);
         if (pending > WEIGHT_LIMIT) {
             settle();
