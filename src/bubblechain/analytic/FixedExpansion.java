@@ -40,16 +40,21 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
 
     /** The expansion at one precision. */
     public static Optional<FixedExpansion> of(NormalForm form, int end, int bits) {
-        return of(form, List.of(new Stage(end, bits)));
+        return of(form, List.of(new Stage(end, bits)), true);
     }
 
     /**
-     * The expansion, if this route can take the form.
+     * The expansion in stages. Bits lost where poles of single gammas cancel within the radius are not made up for: their
+     * loss must fall faster than the worth of the coefficients.
      *
      * @param stages falling precision for growing orders
      * @return empty if the form has no singular point to set the scale, or a number leaves the fixed-point range
      */
     public static Optional<FixedExpansion> of(NormalForm form, List<Stage> stages) {
+        return of(form, stages, false);
+    }
+
+    private static Optional<FixedExpansion> of(NormalForm form, List<Stage> stages, boolean makeUp) {
         List<FactoredTerm> terms = factored(form);
         Optional<Rational> radius = radius(terms);
         if (radius.isEmpty()) {
@@ -57,8 +62,14 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
         }
         int shift = Math.max(0, terms.stream().mapToInt(t -> -t.valuation()).max().orElse(0));
         int last = stages.get(stages.size() - 1).end() + shift;
+        int lost = makeUp
+                ? terms.stream()
+                        .mapToInt(t -> GammaProducts.bitsLost(t.key(), radius.get(), last))
+                        .max()
+                        .orElse(0)
+                : 0;
         GammaProducts gammas = new GammaProducts(
-                radius.get(), last, FixedSeries.limbsFor(stages.get(0).bits()));
+                radius.get(), last, FixedSeries.limbsFor(stages.get(0).bits()), lost);
         List<Ball> coefficients = new ArrayList<>();
         try {
             for (Stage stage : stages) {

@@ -32,11 +32,12 @@ final class GammaProducts {
     private final BallRing ring;
     private final Map<TermKey, Known> products = new HashMap<>();
 
-    GammaProducts(Rational radius, int length, int limbs) {
+    /** @param extraBits precision of the logarithms beyond the limbs, where large parts of them cancel */
+    GammaProducts(Rational radius, int length, int limbs, int extraBits) {
         this.radius = radius;
         this.length = length;
         this.limbs = limbs;
-        this.bits = FixedSeries.bits(limbs) + GUARD_BITS;
+        this.bits = FixedSeries.bits(limbs) + GUARD_BITS + extraBits;
         this.removal = removalRadius(limbs);
         this.ring = BallRing.of(bits, length + 2);
     }
@@ -155,6 +156,19 @@ final class GammaProducts {
             }
         }
         return sums;
+    }
+
+    /**
+     * Bits that the logarithm of a product loses up to some order where poles of single gammas lie inside the radius: their
+     * parts (rho/u_0)^k of the zeta values are taken away again.
+     */
+    static int bitsLost(TermKey key, Rational radius, int length) {
+        double largest = 0;
+        for (GammaFactor gamma : key.gammas().keySet()) {
+            double ratio = gamma.slope().abs().multiply(radius).divide(gamma.shift()).toDouble();
+            largest = Math.max(largest, Math.log(ratio) / Math.log(2));
+        }
+        return (int) Math.ceil(largest * length);
     }
 
     /** The same sums for a ratio that is not a quotient of small integers. */

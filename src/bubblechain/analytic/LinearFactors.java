@@ -17,37 +17,36 @@ final class LinearFactors {
 
     static FixedSeries apply(FixedSeries series, Map<Rational, Integer> powers, Rational radius) {
         FixedSeries result = series;
-        for (Polynomial p : groups(powers, radius, 1)) {
-            result = result.times(p.coefficients());
+        for (List<Rational> slopes : groups(powers, radius, 1)) {
+            result = result.timesLinear(slopes);
         }
-        for (Polynomial p : groups(powers, radius, -1)) {
-            result = result.over(p.coefficients());
+        for (List<Rational> slopes : groups(powers, radius, -1)) {
+            result = result.overLinear(slopes);
         }
         return result;
     }
 
-    /** The factors whose power has one sign, multiplied together in small groups, each group 1 at v = 0. */
-    private static List<Polynomial> groups(Map<Rational, Integer> powers, Rational radius, int sign) {
-        List<Polynomial> groups = new ArrayList<>();
-        Polynomial group = Polynomial.ONE;
+    /** The slopes -rho/root of the factors whose power has one sign, in small groups. */
+    private static List<List<Rational>> groups(Map<Rational, Integer> powers, Rational radius, int sign) {
+        List<List<Rational>> groups = new ArrayList<>();
+        List<Rational> group = new ArrayList<>();
         BigInteger denominator = BigInteger.ONE;
         for (Map.Entry<Rational, Integer> factor : new TreeMap<>(powers).entrySet()) {
             Rational slope = radius.divide(factor.getKey()).negate();
+            BigInteger size = slope.denominator().max(slope.numerator().abs());
             for (int k = 0; k < sign * factor.getValue(); k++) {
-                BigInteger larger = denominator.multiply(
-                        slope.denominator().max(slope.numerator().abs()));
-                if (group.degree() == LARGEST_DEGREE || larger.bitLength() > LARGEST_BITS) {
+                BigInteger larger = denominator.multiply(size);
+                if (group.size() == LARGEST_DEGREE || larger.bitLength() > LARGEST_BITS) {
                     groups.add(group);
-                    group = Polynomial.ONE;
-                    larger = slope.denominator().max(slope.numerator().abs());
+                    group = new ArrayList<>();
+                    larger = size;
                 }
-                group = group.multiply(Polynomial.linear(Rational.ONE, slope));
+                group.add(slope);
                 denominator = larger;
             }
         }
-        if (group.degree() > 0) {
-            groups.add(group);
-        }
+        groups.add(group);
+        groups.removeIf(List::isEmpty);
         return groups;
     }
 }

@@ -23,6 +23,8 @@ public final class FixedSeries {
     /** Column sums of so many products of up to 64 digits fit a long; longer numbers take more from it. */
     private static final int PRODUCTS_BETWEEN_CARRIES = 40;
     private static final int DIGITS_AT_ONCE = 64;
+    /** Nanoseconds for one product of digits, to be weighed against a transform. */
+    private static final double COLUMN_COST = 1.2;
 
     private static final int SMALL = 1 << 26;
     private static final int MANTISSA_BITS = 52;
@@ -209,25 +211,51 @@ public final class FixedSeries {
         return Arrays.stream(digits).mapToInt(FixedDigits::leadingZeros).toArray();
     }
 
-    /** The product of two series. */
+    /** The product of two series, digit by digit or by one long convolution, whichever is cheaper. */
     public FixedSeries multiply(FixedSeries other) {
         int length = Math.min(length(), other.length());
-        long[][] product = new long[length][];
         double[] bounds = new double[length];
+        double work = productBounds(other, bounds);
+        TransformProduct.Shape shape = TransformProduct.Shape.of(length, limbs);
+        boolean transform = shape.isPossible() && shape.cost() < work * COLUMN_COST;
+        long[][] product = transform
+                ? TransformProduct.multiply(digits, other.digits, limbs, shape)
+                : columnProduct(other, length);
+        return new FixedSeries(limbs, product, bounds);
+    }
+
+    /** Fills in the bounds of a product; returns the number of digit products it would take. */
+    private double productBounds(FixedSeries other, double[] bounds) {
         double[] left = sizes();
         double[] right = other.sizes();
         int[] leftZeros = leadingZeros();
         int[] rightZeros = other.leadingZeros();
         double unit = Math.scalb(1.0, -bits(limbs));
         int last = limbs + GUARD_COLUMNS;
+        double work = 0;
+        for (int n = 0; n < bounds.length; n++) {
+            double bound = 0;
+            for (int k = 0; k <= n; k++) {
+                bound += left[k] * other.errors[n - k] + errors[k] * (right[n - k] + other.errors[n - k] * unit);
+                double columns = Math.max(0, last + 1 - leftZeros[k] - rightZeros[n - k]);
+                work += columns * columns / 2;
+            }
+            bounds[n] = (bound + 2) * UP;
+        }
+        return work;
+    }
+
+    private long[][] columnProduct(FixedSeries other, int length) {
+        long[][] product = new long[length][];
+        int[] leftZeros = leadingZeros();
+        int[] rightZeros = other.leadingZeros();
+        int last = limbs + GUARD_COLUMNS;
         int between = productsBetweenCarries();
         long[] sums = new long[last + 3];
         for (int n = 0; n < length; n++) {
             Arrays.fill(sums, 0);
-            double bound = 0;
             int products = 0;
             for (int k = 0; k <= n; k++) {
-                bound += left[k] * other.errors[n - k] + errors[k] * (right[n - k] + other.errors[n - k] * unit);
                 if (leftZeros[k] + rightZeros[n - k] <= last) {
                     FixedDigits.accumulateProduct(
                             digits[k], leftZeros[k], other.digits[n - k], rightZeros[n - k], last, sums);
@@ -237,9 +265,8 @@ public final class FixedSeries {
                 }
             }
             product[n] = FixedDigits.fromSums(sums, limbs);
-            bounds[n] = (bound + 2) * UP;
         }
-        return new FixedSeries(limbs, product, bounds);
+        return product;
     }
 
     /** True if {@link #timesPolynomial} and {@link #overPolynomial} can take these integers. */
@@ -309,6 +336,33 @@ public final class FixedSeries {
     /** This over a polynomial over Q in v whose constant term is not zero. */
     public FixedSeries over(List<Rational> polynomial) {
         return RationalSteps.over(this, polynomial);
+    }
+
+    /**
+     * This over prod (1 + slope v).
+     *
+     * <p>What the recurrence loses at each step is divided by the same factors, so the errors obey
+     * e = (e_f + 2)/prod (1 - |slope| v) as majorants; bounding the recurrence of the multiplied-out polynomial term by term
+     * would let them grow exponentially.
+     */
+    public FixedSeries overLinear(List<Rational> slopes) {
+        FixedSeries quotient = RationalSteps.over(this, RationalSteps.product(slopes));
+        double[] bounds = new double[length()];
+        for (int n = 0; n < bounds.length; n++) {
+            bounds[n] = (errors[n] + 2) * UP;
+        }
+        for (Rational slope : slopes) {
+            double size = Math.abs(slope.toDouble()) * UP;
+            for (int n = 1; n < bounds.length; n++) {
+                bounds[n] = (bounds[n] + size * bounds[n - 1]) * (1 + 0x1p-50);
+            }
+        }
+        return new FixedSeries(limbs, quotient.digits, bounds);
+    }
+
+    /** This times prod (1 + slope v). */
+    public FixedSeries timesLinear(List<Rational> slopes) {
+        return RationalSteps.times(this, RationalSteps.product(slopes));
     }
 
     /** The integer of coefficient k, the number times 2^(56 limbs). */

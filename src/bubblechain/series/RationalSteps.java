@@ -54,6 +54,18 @@ final class RationalSteps {
         return FixedSeries.of(result, errors, series.limbs());
     }
 
+    /** The coefficients of prod (1 + slope v). */
+    static List<Rational> product(List<Rational> slopes) {
+        List<Rational> product = new ArrayList<>(List.of(Rational.ONE));
+        for (Rational slope : slopes) {
+            product.add(Rational.ZERO);
+            for (int k = product.size() - 1; k > 0; k--) {
+                product.set(k, product.get(k).add(product.get(k - 1).multiply(slope)));
+            }
+        }
+        return product;
+    }
+
     private static List<BigInteger> integers(FixedSeries series) {
         List<BigInteger> values = new ArrayList<>();
         for (int k = 0; k < series.length(); k++) {
