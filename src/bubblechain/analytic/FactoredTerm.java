@@ -32,6 +32,9 @@ record FactoredTerm(
     /** Poles of each gamma function looked at for the nearest one that does not cancel. */
     private static final int POLES_SEARCHED = 24;
 
+    private static final Rational ROOT_WIDTH = Rational.TWO.power(-40);
+    private static final double SMALLEST_SCALE = 1e-6;
+
     static FactoredTerm of(TermKey key, RationalFunction factor) {
         Map<Rational, Integer> roots = new HashMap<>();
         int valuation = factor.numerator().valuation() - factor.denominator().valuation();
@@ -80,16 +83,13 @@ record FactoredTerm(
         for (TermKey.PolygammaFactor p : key.polygammas().keySet()) {
             nearest = smaller(nearest, p.shift().divide(p.slope()).abs());
         }
-        for (Interval interval : RealRoots.of(below)) {
-            Rational size = interval.lower().abs().compareTo(interval.upper().abs()) < 0
-                    ? interval.lower().abs()
-                    : interval.upper().abs();
-            nearest = smaller(nearest, powerOfTwoBelow(size.toDouble()));
+        Polynomial squarefree = below.divideExactly(below.gcd(below.derivative()));
+        for (Interval interval : RealRoots.of(squarefree)) {
+            double root = RealRoots.refine(squarefree, interval, ROOT_WIDTH).lower().toDouble();
+            nearest = smaller(nearest, shortNumberBelow(Math.abs(root)));
         }
-        for (ComplexRoots.Pair pair : ComplexRoots.of(below.gcd(below.derivative()).isConstant()
-                ? below
-                : below.divideExactly(below.gcd(below.derivative())))) {
-            nearest = smaller(nearest, powerOfTwoBelow(Math.hypot(pair.re(), pair.im())));
+        for (ComplexRoots.Pair pair : ComplexRoots.of(squarefree)) {
+            nearest = smaller(nearest, shortNumberBelow(Math.hypot(pair.re(), pair.im())));
         }
         return nearest;
     }
@@ -98,10 +98,11 @@ record FactoredTerm(
         return first.isPresent() && first.get().compareTo(second) < 0 ? first : Optional.of(second);
     }
 
-    /** A number with small numerator and denominator; only the scale of the variable hangs on it. */
-    private static Rational powerOfTwoBelow(double size) {
-        int exponent = Math.getExponent(Math.max(size * 0.999, 1e-6));
-        return Rational.TWO.power(exponent);
+    /** A number of five bits, at most 1/16 below; only the scale of the variable hangs on it. */
+    private static Rational shortNumberBelow(double size) {
+        double reduced = Math.max(size * 0.999, SMALLEST_SCALE);
+        int exponent = Math.getExponent(reduced) - 4;
+        return Rational.TWO.power(exponent).multiply((long) Math.scalb(reduced, -exponent));
     }
 
     static Rational pole(GammaFactor gamma, int j) {
