@@ -4,6 +4,7 @@ import bubblechain.borel.BorelPlane;
 import bubblechain.borel.BorelPole;
 import bubblechain.chain.Chain;
 import bubblechain.chain.ChainOptions;
+import bubblechain.chain.CoefficientReport;
 import bubblechain.chain.Scales;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
@@ -12,8 +13,11 @@ import bubblechain.fixedorder.Singularity;
 import bubblechain.kernel.Kernel;
 import bubblechain.kernel.SingularityNote;
 import bubblechain.qcd.Theory;
+import bubblechain.report.Report;
 import bubblechain.sumrule.ChainPole;
 import bubblechain.sumrule.Obstacle;
+import bubblechain.sumrule.ResidueReport;
+import bubblechain.sumrule.SumRule;
 import bubblechain.sumrule.SumRuleRequest;
 import java.util.ArrayList;
 import java.util.List;
@@ -69,6 +73,18 @@ public final class ChainSumRule {
             }
         }
         return builder.build();
+    }
+
+    /** The answer to such a request, with the sources and cautions of the kernel. */
+    public static Report report(Kernel kernel, SumRuleRequest request) {
+        Report answer = ResidueReport.of(SumRule.evaluate(request));
+        List<String> sources = new ArrayList<>(kernel.sources());
+        sources.addAll(answer.sources());
+        List<String> cautions = new ArrayList<>(kernel.cautions());
+        cautions.addAll(answer.cautions());
+        cautions.add(CoefficientReport.MODEL_CAUTION);
+        return new Report(
+                answer.command(), answer.request(), answer.normalisation(), answer.blocks(), sources, cautions);
     }
 
     private static String removedInWords(List<BorelPole> poles, Rational u) {

@@ -166,9 +166,16 @@ public record CrossCheck(
         return orders.stream().allMatch(OrderComparison::flavourTermsEqual);
     }
 
+    /** True if no pole of the chain is as near to the origin: then the sum rule on its first terms has a limit. */
+    public boolean isNearest() {
+        Rational u = power.divide(2);
+        return BorelPlane.of(kernel, Scales.NATURAL).poles(u.abs().negate(), u.abs()).stream()
+                .allMatch(other -> other.u().equals(u));
+    }
+
     /** The verdict in one sentence. */
     public String verdict() {
-        String published = "sum rule on the published series: singularity at u = " + power.divide(2) + " "
+        String published = "sum rule on the published series: singularity at u = " + power.divide(2) + ": "
                 + measured.verdict().text();
         String chain = pole.isPresent() ? "chain: simple pole there" : "chain: no pole there";
         String flavours = flavourTermsAgree()

@@ -94,7 +94,8 @@ public final class CrossCheckReport {
     }
 
     private static Table chainOrders(CrossCheck check) {
-        Table.Builder table = Table.builder("chain_orders", "Sum rule on the first terms of the chain (tends to the exact N)")
+        String limit = check.isNearest() ? "tends to the exact N" : "another pole is as near or nearer: it has no limit";
+        Table.Builder table = Table.builder("chain_orders", "Sum rule on the first terms of the chain (" + limit + ")")
                 .column("loops", "loops")
                 .column("K", "K")
                 .column("N", "N")

@@ -33,7 +33,7 @@ public record RemainderBound(double radius, Magnitude size) {
     private static final int ARCS = 64;
     private static final int ROOT_DIGITS = 15;
     /** Where in the gap the circle may lie: the higher the order, the nearer to the outer end the best one. */
-    private static final double[] PARTS_OF_GAP = {0.5, 0.75, 0.875, 0.96875};
+    private static final double[] PARTS_OF_GAP = {0.5, 0.8125, 0.96875};
 
     /**
      * The bound for c_n.

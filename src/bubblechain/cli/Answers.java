@@ -54,7 +54,7 @@ final class Answers {
         Report report = CoefficientReport.of(
                 c.anomalousDimension ? kernel.anomalousDimensionAsKernel() : kernel, options, c.loops, c.digits, c.exact,
                 c.flavourTerms);
-        return asked(report, c.scales.parameters);
+        return asked(report, parameterEntries(c.scales));
     }
 
     static Report poles(PolesCommand c) {
@@ -62,14 +62,17 @@ final class Answers {
         Kernel kernel = KernelLibrary.load(c.name, parameters(c.scales));
         Report report = PolesReport.of(
                 kernel, options, rational("--from", c.from), rational("--to", c.to), c.digits, c.shareOf);
-        return asked(report, c.scales.parameters);
+        return asked(report, parameterEntries(c.scales));
     }
 
     static Report residue(ResidueCommand c) {
-        SumRuleRequest request = c.chain ? chainRequest(c) : seriesRequest(c);
-        return asked(
-                ResidueReport.of(SumRule.evaluate(request)),
-                Map.of("chain", c.chain ? "yes" : "no", "remove_nearer", c.removeNearer ? "yes" : "no"));
+        Map<String, String> flags =
+                Map.of("chain", c.chain ? "yes" : "no", "remove_nearer", c.removeNearer ? "yes" : "no");
+        if (!c.chain) {
+            return asked(ResidueReport.of(SumRule.evaluate(seriesRequest(c))), flags);
+        }
+        Kernel kernel = KernelLibrary.load(c.name);
+        return asked(ChainSumRule.report(kernel, chainRequest(c, kernel)), flags);
     }
 
     /** A report with more entries in its request. */
@@ -78,6 +81,12 @@ final class Answers {
         new TreeMap<>(more).forEach(request::put);
         return new Report(
                 report.command(), request, report.normalisation(), report.blocks(), report.sources(), report.cautions());
+    }
+
+    private static Map<String, String> parameterEntries(ScaleOptions s) {
+        Map<String, String> entries = new LinkedHashMap<>();
+        s.parameters.forEach((name, value) -> entries.put("parameter_" + name, value));
+        return entries;
     }
 
     private static SumRuleRequest seriesRequest(ResidueCommand c) {
@@ -96,14 +105,14 @@ final class Answers {
         return builder.build();
     }
 
-    private static SumRuleRequest chainRequest(ResidueCommand c) {
+    private static SumRuleRequest chainRequest(ResidueCommand c, Kernel kernel) {
         if (c.exponentShift != null || c.betaLoops != null) {
             throw new DomainException("a chain runs at one loop and its exponents are exact; leave out --exponent-shift and"
                     + " --beta-loops");
         }
         return ChainSumRule.request(
-                KernelLibrary.load(c.name), c.nf, optional(c.loops).orElse(CHAIN_TERMS),
-                optionalRational("--power", c.power), c.removeNearer);
+                kernel, c.nf, optional(c.loops).orElse(CHAIN_TERMS), optionalRational("--power", c.power),
+                c.removeNearer);
     }
 
     static Report crosscheck(CrosscheckCommand c) {
