@@ -26,6 +26,9 @@ import java.util.Optional;
  * @param shift        the order of the pole at u = 0
  */
 public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift) {
+    /** Bits that may be lost on the way: error bounds are doubles and end at 2^1023 units. */
+    private static final int LARGEST_LOSS = 400;
+
     public FixedExpansion {
         coefficients = List.copyOf(coefficients);
     }
@@ -44,8 +47,8 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
     }
 
     /**
-     * The expansion in stages. Bits lost where poles of single gammas cancel within the radius are not made up for: their
-     * loss must fall faster than the worth of the coefficients.
+     * The expansion in stages. Bits lost where poles of single gammas cancel within the radius are made up for in part only:
+     * the worth of the coefficients must fall faster.
      *
      * @param stages falling precision for growing orders
      * @return empty if the form has no singular point to set the scale, or a number leaves the fixed-point range
@@ -62,14 +65,13 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
         }
         int shift = Math.max(0, terms.stream().mapToInt(t -> -t.valuation()).max().orElse(0));
         int last = stages.get(stages.size() - 1).end() + shift;
-        int lost = makeUp
-                ? terms.stream()
-                        .mapToInt(t -> GammaProducts.bitsLost(t.key(), radius.get(), last))
-                        .max()
-                        .orElse(0)
-                : 0;
+        int lost = terms.stream()
+                .mapToInt(t -> GammaProducts.bitsLost(t.key(), radius.get(), last))
+                .max()
+                .orElse(0);
+        int extra = makeUp ? lost : Math.max(0, lost - LARGEST_LOSS);
         GammaProducts gammas = new GammaProducts(
-                radius.get(), last, FixedSeries.limbsFor(stages.get(0).bits()), lost);
+                radius.get(), last, FixedSeries.limbsFor(stages.get(0).bits()), extra);
         List<Ball> coefficients = new ArrayList<>();
         try {
             for (Stage stage : stages) {

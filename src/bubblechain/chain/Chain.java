@@ -17,7 +17,7 @@ import java.util.Optional;
  */
 public final class Chain {
     /** Largest number of coefficients by the ball route. */
-    public static final int LARGEST_LOOPS = 1_000;
+    public static final int LARGEST_LOOPS = 10_000;
     /** Largest number of coefficients in exact form. */
     public static final int LARGEST_EXACT_LOOPS = 40;
     /** Terms of an exact coefficient up to which longer exact lists stay cheap. */
@@ -26,8 +26,8 @@ public final class Chain {
     public static final int LARGEST_DIGITS = 10_000;
 
     private static final double BITS_PER_DIGIT = 3.3219280948873626;
-    /** Guard bits of the first attempt: bounds of the fixed-point route lose about 60 bits on the way. */
-    private static final int FIRST_GUARD_BITS = 80;
+    /** Guard bits of the first attempt: the bounds of the fixed-point route lose some 10 to 50 bits on the way. */
+    private static final int FIRST_GUARD_BITS = 64;
 
     /** Jobs up to this size take the ball route, which starts sooner. */
     private static final int SMALL_LOOPS = 20;
