@@ -1,6 +1,7 @@
 package bubblechain.series;
 
 import java.math.BigInteger;
+import java.util.List;
 
 /**
  * Fixed-point numbers as arrays of signed digits in radix 2^56: d[0] + d[1] 2^-56 + ... + d[limbs] 2^(-56 limbs). Digits
@@ -90,6 +91,19 @@ final class FixedDigits {
             k++;
         }
         return k;
+    }
+
+    /** Not below the bit lengths of the integers behind some numbers. */
+    static int largestBits(List<long[]> numbers) {
+        int largest = 0;
+        for (long[] digits : numbers) {
+            int zeros = leadingZeros(digits);
+            if (zeros < digits.length) {
+                int first = Long.SIZE - Long.numberOfLeadingZeros(Math.abs(digits[zeros]));
+                largest = Math.max(largest, first + 1 + BITS * (digits.length - 1 - zeros));
+            }
+        }
+        return largest;
     }
 
     /** Not below |number|. */

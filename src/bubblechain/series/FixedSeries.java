@@ -17,14 +17,14 @@ import java.util.List;
  */
 public final class FixedSeries {
     /** Covers the rounding of a sum of up to 2^20 positive doubles. */
-    private static final double UP = 1 + 0x1p-30;
+    static final double UP = 1 + 0x1p-30;
     /** Guard columns of a product: what is dropped is below 2^-50 of the last place for each pair. */
-    private static final int GUARD_COLUMNS = 2;
+    static final int GUARD_COLUMNS = 2;
     /** Column sums of so many products of up to 64 digits fit a long; longer numbers take more from it. */
     private static final int PRODUCTS_BETWEEN_CARRIES = 40;
     private static final int DIGITS_AT_ONCE = 64;
     /** Nanoseconds for one product of digits, to be weighed against a transform. */
-    private static final double COLUMN_COST = 1.2;
+    static final double COLUMN_COST = 1.2;
 
     private static final int SMALL = 1 << 26;
     private static final int MANTISSA_BITS = 52;
@@ -151,7 +151,7 @@ public final class FixedSeries {
      * e^L for a series given by its derivative: this series holds k L_k at v^k, the constant term is not used.
      *
      * <p>n h_n = sum_{k=1}^{n} (k L_k) h_{n-k}, and the errors obey
-     * e_n &lt;= (1/n) sum_k (|k L_k| e_{n-k} + d_k |h_{n-k}| + d_k e_{n-k}) + 3.
+     * e_n &lt;= (1/n) sum_k (|k L_k| e_{n-k} + d_k |h_{n-k}| + d_k e_{n-k}) + 3 + (transforms used)/n.
      */
     public FixedSeries expOfIntegral() {
         return expOfIntegral(one(1, limbs));
@@ -159,47 +159,17 @@ public final class FixedSeries {
 
     /** The same, continuing from coefficients that are already known. */
     public FixedSeries expOfIntegral(FixedSeries known) {
-        int length = length();
-        long[][] h = new long[length][];
-        double[] bounds = new double[length];
-        double[] sizes = new double[length];
-        int[] zeros = new int[length];
-        double[] slopes = sizes();
-        int[] slopeZeros = leadingZeros();
-        double unit = Math.scalb(1.0, -bits(limbs));
-        for (int k = 0; k < known.length(); k++) {
-            h[k] = known.digits[k];
-            bounds[k] = known.errors[k];
-            sizes[k] = FixedDigits.upperBound(h[k]);
-            zeros[k] = FixedDigits.leadingZeros(h[k]);
-        }
-        int last = limbs + GUARD_COLUMNS;
-        int between = productsBetweenCarries();
-        long[] sums = new long[last + 3];
-        for (int n = known.length(); n < length; n++) {
-            Arrays.fill(sums, 0);
-            double bound = 0;
-            int products = 0;
-            for (int k = 1; k <= n; k++) {
-                bound += slopes[k] * bounds[n - k] + errors[k] * (sizes[n - k] + bounds[n - k] * unit);
-                if (slopeZeros[k] + zeros[n - k] <= last) {
-                    FixedDigits.accumulateProduct(digits[k], slopeZeros[k], h[n - k], zeros[n - k], last, sums);
-                    if (++products % between == 0) {
-                        FixedDigits.carry(sums);
-                    }
-                }
-            }
-            h[n] = FixedDigits.fromSums(sums, limbs);
-            FixedDigits.divideSmall(h[n], n);
-            // one unit for the digits dropped from the sum, one for the division, one for all dropped columns
-            bounds[n] = (bound / n + 3) * UP;
-            sizes[n] = FixedDigits.upperBound(h[n]);
-            zeros[n] = FixedDigits.leadingZeros(h[n]);
-        }
-        return new FixedSeries(limbs, h, bounds);
+        ExponentialRecurrence recurrence = new ExponentialRecurrence(digits, errors, limbs);
+        recurrence.run(known.digits, known.errors);
+        return new FixedSeries(limbs, recurrence.digits(), recurrence.bounds());
     }
 
     private int productsBetweenCarries() {
+        return productsBetweenCarries(limbs);
+    }
+
+    /** Products of numbers of so many limbs that can be added to column sums before they must be carried. */
+    static int productsBetweenCarries(int limbs) {
         return Math.max(1, PRODUCTS_BETWEEN_CARRIES / (1 + (limbs + GUARD_COLUMNS) / DIGITS_AT_ONCE));
     }
 
@@ -216,10 +186,13 @@ public final class FixedSeries {
         int length = Math.min(length(), other.length());
         double[] bounds = new double[length];
         double work = productBounds(other, bounds);
-        TransformProduct.Shape shape = TransformProduct.Shape.of(length, limbs);
+        List<long[]> left = Arrays.asList(digits).subList(0, length);
+        List<long[]> right = Arrays.asList(other.digits).subList(0, length);
+        TransformProduct.Shape shape = TransformProduct.Shape.of(
+                length, 2 * length, FixedDigits.largestBits(left), FixedDigits.largestBits(right));
         boolean transform = shape.isPossible() && shape.cost() < work * COLUMN_COST;
         long[][] product = transform
-                ? TransformProduct.multiply(digits, other.digits, limbs, shape)
+                ? TransformProduct.multiply(left, right, 0, length, limbs, shape)
                 : columnProduct(other, length);
         return new FixedSeries(limbs, product, bounds);
     }

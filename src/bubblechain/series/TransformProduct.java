@@ -1,6 +1,7 @@
 package bubblechain.series;
 
 import java.math.BigInteger;
+import java.util.List;
 
 /**
  * Products of series with fixed-point coefficients by one integer convolution: every coefficient is cut into chunks of a
@@ -11,24 +12,40 @@ final class TransformProduct {
     private static final int SUM_BITS = 59;
 
     private static final int LARGEST_LOG2_LENGTH = 26;
+    private static final int SMALLEST_CHUNK = 4;
+    private static final int LARGEST_CHUNK = 26;
 
     private TransformProduct() {}
 
-    /** How two series are cut up. */
-    record Shape(int terms, int chunkBits, int chunks, int log2Length) {
-        /** The shape for so many terms of so many limbs; a log2Length above the limit if it is too large. */
-        static Shape of(int terms, int limbs) {
-            int bits = (limbs + 1) * FixedDigits.BITS;
-            int chunkBits = 4;
-            for (int candidate = 5; candidate <= 26; candidate++) {
-                long products = (long) terms * (bits / candidate + 2);
+    /**
+     * How two lists of numbers are cut up.
+     *
+     * @param period     the convolution is cyclic with this many coefficients
+     * @param chunkBits  bits of a chunk
+     * @param places     chunks of a coefficient of the product
+     * @param log2Length length of the transform
+     */
+    record Shape(int period, int chunkBits, int places, int log2Length) {
+        /**
+         * @param terms     the smaller number of terms
+         * @param leftBits  largest length of a left number, sign not counted
+         * @param rightBits the same on the right
+         */
+        static Shape of(int terms, int period, int leftBits, int rightBits) {
+            int chunkBits = SMALLEST_CHUNK;
+            for (int candidate = SMALLEST_CHUNK + 1; candidate <= LARGEST_CHUNK; candidate++) {
+                long products = (long) terms * chunks(Math.min(leftBits, rightBits), candidate);
                 if (2 * (candidate - 1) + (Long.SIZE - Long.numberOfLeadingZeros(products)) <= SUM_BITS) {
                     chunkBits = candidate;
                 }
             }
-            int chunks = bits / chunkBits + 2;
-            long places = 2L * chunks * 2 * terms;
-            return new Shape(terms, chunkBits, chunks, Long.SIZE - Long.numberOfLeadingZeros(places - 1));
+            int places = chunks(leftBits, chunkBits) + chunks(rightBits, chunkBits);
+            long length = Math.max(2, (long) places * period);
+            return new Shape(period, chunkBits, places, Long.SIZE - Long.numberOfLeadingZeros(length - 1));
+        }
+
+        private static int chunks(int bits, int chunkBits) {
+            return bits / chunkBits + 2;
         }
 
         boolean isPossible() {
@@ -37,33 +54,30 @@ final class TransformProduct {
 
         /** Nanoseconds, roughly: three transforms, and packing. */
         double cost() {
-            double length = Math.scalb(1.0, log2Length);
-            return length * (log2Length * 7.0 + 20);
-        }
-
-        private int places() {
-            return 2 * chunks;
+            return Math.scalb(1.0, log2Length) * (log2Length * 7.0 + 20);
         }
     }
 
     /**
-     * The first coefficients of a product, digits below the last place dropped: entry n is floor(sum_k a_k b_(n-k)).
+     * Entries from .. to-1 of the cyclic convolution of two lists of fixed-point numbers, digits below the last place
+     * dropped: floor(sum_k left_k right_(n-k)).
      */
-    static long[][] multiply(long[][] left, long[][] right, int limbs, Shape shape) {
+    static long[][] multiply(
+            List<long[]> left, List<long[]> right, int from, int to, int limbs, Shape shape) {
         NumberTheoreticTransform transform = new NumberTheoreticTransform(shape.log2Length());
         long[] a = pack(left, shape);
         transform.convolve(a, pack(right, shape));
-        long[][] product = new long[shape.terms()][];
-        for (int n = 0; n < product.length; n++) {
-            product[n] = unpack(a, n * shape.places(), limbs, shape);
+        long[][] product = new long[to - from][];
+        for (int n = from; n < to; n++) {
+            product[n - from] = unpack(a, n * shape.places(), limbs, shape);
         }
         return product;
     }
 
-    private static long[] pack(long[][] series, Shape shape) {
+    private static long[] pack(List<long[]> numbers, Shape shape) {
         long[] packed = new long[1 << shape.log2Length()];
-        for (int k = 0; k < shape.terms(); k++) {
-            BigInteger value = FixedDigits.toInteger(series[k]);
+        for (int k = 0; k < numbers.size(); k++) {
+            BigInteger value = FixedDigits.toInteger(numbers.get(k));
             if (value.signum() != 0) {
                 cut(value, packed, k * shape.places(), shape.chunkBits());
             }

@@ -28,8 +28,11 @@ class TransformProductTest {
 
     private static void assertProduct(List<BigInteger> left, List<BigInteger> right, int limbs) {
         int terms = left.size();
-        long[][] product = TransformProduct.multiply(
-                digits(left, limbs), digits(right, limbs), limbs, TransformProduct.Shape.of(terms, limbs));
+        List<long[]> a = digits(left, limbs);
+        List<long[]> b = digits(right, limbs);
+        TransformProduct.Shape shape = TransformProduct.Shape.of(
+                terms, 2 * terms, FixedDigits.largestBits(a), FixedDigits.largestBits(b));
+        long[][] product = TransformProduct.multiply(a, b, 0, terms, limbs, shape);
         for (int n = 0; n < terms; n++) {
             BigInteger sum = BigInteger.ZERO;
             for (int k = 0; k <= n; k++) {
@@ -41,8 +44,8 @@ class TransformProductTest {
         }
     }
 
-    private static long[][] digits(List<BigInteger> values, int limbs) {
-        return values.stream().map(v -> FixedDigits.of(v, limbs)).toArray(long[][]::new);
+    private static List<long[]> digits(List<BigInteger> values, int limbs) {
+        return values.stream().map(v -> FixedDigits.of(v, limbs)).toList();
     }
 
     @ParameterizedTest
@@ -65,12 +68,34 @@ class TransformProductTest {
     @Test
     void sumsOfChunksStayBelowHalfTheModulus() {
         for (int terms : new int[] {1, 10, 1_000, 10_000}) {
-            for (int limbs : new int[] {1, 20, 600}) {
-                TransformProduct.Shape shape = TransformProduct.Shape.of(terms, limbs);
-                double largest = Math.scalb((double) terms * shape.chunks(), 2 * (shape.chunkBits() - 1));
+            for (int bits : new int[] {1, 56, 1_200, 34_000}) {
+                TransformProduct.Shape shape = TransformProduct.Shape.of(terms, terms, bits, bits);
+                double chunks = shape.places() / 2.0;
+                double largest = Math.scalb(terms * chunks, 2 * (shape.chunkBits() - 1));
                 assertThat(largest).isLessThan(NumberTheoreticTransform.MODULUS / 2.0);
-                assertThat((long) shape.chunks() * shape.chunkBits()).isGreaterThan((limbs + 1L) * FixedDigits.BITS);
+                assertThat(chunks * shape.chunkBits()).isGreaterThan(bits);
             }
+        }
+    }
+
+    @ParameterizedTest
+    @CsvSource({"3,2", "40,3", "90,11"})
+    void theUpperHalfOfACyclicConvolutionDoesNotSeeTheWrapSeed73(int terms, int limbs) {
+        Random random = new Random(73);
+        int bits = limbs * FixedDigits.BITS;
+        List<BigInteger> left = random(terms, bits, random);
+        List<BigInteger> right = random(2 * terms, bits, random);
+        List<long[]> a = digits(left, limbs);
+        List<long[]> b = digits(right, limbs);
+        TransformProduct.Shape shape = TransformProduct.Shape.of(
+                terms, 2 * terms, FixedDigits.largestBits(a), FixedDigits.largestBits(b));
+        long[][] product = TransformProduct.multiply(a, b, terms, 2 * terms, limbs, shape);
+        for (int n = terms; n < 2 * terms; n++) {
+            BigInteger sum = BigInteger.ZERO;
+            for (int k = 0; k < terms; k++) {
+                sum = sum.add(left.get(k).multiply(right.get(n - k)));
+            }
+            assertThat(FixedDigits.toInteger(product[n - terms])).isEqualTo(sum.shiftRight(bits));
         }
     }
 

@@ -1,0 +1,152 @@
+package bubblechain.series;
+
+import java.util.Arrays;
+import java.util.List;
+
+/**
+ * The work state of n h_n = sum_{k=1}^{n} s_k h_{n-k}, h_0 given. Each block of new coefficients is added to the sums of
+ * the next one as a whole, by columns or by a transform, whichever is cheaper; single blocks are done term by term.
+ */
+final class ExponentialRecurrence {
+    /** Blocks below this size are not divided. */
+    private static final int SMALLEST_BLOCK = 32;
+
+    private final long[][] slopes;
+    private final double[] slopeErrors;
+    private final double[] slopeSizes;
+    private final int[] slopeZeros;
+    private final int limbs;
+    private final int last;
+    private final int between;
+    private final long[][] h;
+    private final double[] bounds;
+    private final double[] sizes;
+    private final int[] zeros;
+    /** Column sums of the contributions to each n, and how many products or transforms went into them. */
+    private final long[][] sums;
+    private final int[] products;
+    private final int[] transforms;
+
+    ExponentialRecurrence(long[][] slopes, double[] slopeErrors, int limbs) {
+        this.slopes = slopes;
+        this.slopeErrors = slopeErrors;
+        this.limbs = limbs;
+        this.last = limbs + FixedSeries.GUARD_COLUMNS;
+        this.between = FixedSeries.productsBetweenCarries(limbs);
+        int length = slopes.length;
+        this.slopeSizes = Arrays.stream(slopes).mapToDouble(FixedDigits::upperBound).toArray();
+        this.slopeZeros = Arrays.stream(slopes).mapToInt(FixedDigits::leadingZeros).toArray();
+        this.h = new long[length][];
+        this.bounds = new double[length];
+        this.sizes = new double[length];
+        this.zeros = new int[length];
+        this.sums = new long[length][];
+        this.products = new int[length];
+        this.transforms = new int[length];
+    }
+
+    long[][] digits() {
+        return h;
+    }
+
+    double[] bounds() {
+        return bounds;
+    }
+
+    void run(long[][] known, double[] knownBounds) {
+        for (int k = 0; k < known.length; k++) {
+            h[k] = known[k];
+            bounds[k] = knownBounds[k];
+            measure(k);
+        }
+        int length = h.length;
+        if (known.length < length) {
+            for (int n = known.length; n < length; n++) {
+                sums[n] = new long[last + 3];
+            }
+            contribute(0, known.length, length);
+            block(known.length, length);
+        }
+    }
+
+    private void measure(int n) {
+        sizes[n] = FixedDigits.upperBound(h[n]);
+        zeros[n] = FixedDigits.leadingZeros(h[n]);
+    }
+
+    /** All coefficients from .. to-1, what those before {@code from} contribute being in the sums. */
+    private void block(int from, int to) {
+        if (to - from <= SMALLEST_BLOCK) {
+            for (int n = from; n < to; n++) {
+                addColumns(from, n, n);
+                finish(n);
+            }
+            return;
+        }
+        int middle = (from + to) >>> 1;
+        block(from, middle);
+        contribute(from, middle, to);
+        block(middle, to);
+    }
+
+    /** Adds what h_from .. h_(middle-1) contribute to the sums of middle .. to-1. */
+    private void contribute(int from, int middle, int to) {
+        double work = 0;
+        for (int n = middle; n < to; n++) {
+            for (int i = from; i < middle; i++) {
+                double columns = Math.max(0, last + 1 - slopeZeros[n - i] - zeros[i]);
+                work += columns * columns / 2;
+            }
+        }
+        List<long[]> left = Arrays.asList(h).subList(from, middle);
+        List<long[]> right = Arrays.asList(slopes).subList(0, to - from);
+        TransformProduct.Shape shape = TransformProduct.Shape.of(
+                middle - from, to - from, FixedDigits.largestBits(left), FixedDigits.largestBits(right));
+        if (shape.isPossible() && shape.cost() < work * FixedSeries.COLUMN_COST) {
+            // the convolution wraps around onto entries below middle - from, which are not wanted
+            long[][] product = TransformProduct.multiply(left, right, middle - from, to - from, limbs, shape);
+            for (int n = middle; n < to; n++) {
+                addDigits(product[n - middle], n);
+            }
+        } else {
+            for (int n = middle; n < to; n++) {
+                addColumns(from, middle, n);
+            }
+        }
+    }
+
+    private void addDigits(long[] digits, int n) {
+        for (int i = 0; i <= limbs; i++) {
+            sums[n][i + 2] += digits[i];
+        }
+        FixedDigits.carry(sums[n]);
+        products[n] = 0;
+        transforms[n]++;
+    }
+
+    private void addColumns(int from, int to, int n) {
+        for (int i = from; i < to; i++) {
+            int k = n - i;
+            if (slopeZeros[k] + zeros[i] <= last) {
+                FixedDigits.accumulateProduct(slopes[k], slopeZeros[k], h[i], zeros[i], last, sums[n]);
+                if (++products[n] % between == 0) {
+                    FixedDigits.carry(sums[n]);
+                }
+            }
+        }
+    }
+
+    private void finish(int n) {
+        double unit = Math.scalb(1.0, -FixedSeries.bits(limbs));
+        double bound = transforms[n];
+        for (int k = 1; k <= n; k++) {
+            bound += slopeSizes[k] * bounds[n - k] + slopeErrors[k] * (sizes[n - k] + bounds[n - k] * unit);
+        }
+        h[n] = FixedDigits.fromSums(sums[n], limbs);
+        sums[n] = new long[0];
+        FixedDigits.divideSmall(h[n], n);
+        // one unit for the digits dropped from the sum, one for the division, one for all dropped columns
+        bounds[n] = (bound / n + 3) * FixedSeries.UP;
+        measure(n);
+    }
+}
