@@ -129,9 +129,9 @@ class ChainDigitsTest {
 
     @ParameterizedTest
     @CsvSource(delimiter = '|', value = {
-        "0     | 20     | the number of loops lies between 1 and 1000, got 0",
-        "-5    | 20     | the number of loops lies between 1 and 1000, got -5",
-        "1001  | 20     | the number of loops lies between 1 and 1000, got 1001",
+        "0     | 20     | the number of loops lies between 1 and 10000, got 0",
+        "-5    | 20     | the number of loops lies between 1 and 10000, got -5",
+        "10001 | 20     | the number of loops lies between 1 and 10000, got 10001",
         "3     | 0      | the number of digits lies between 1 and 10000, got 0",
         "3     | 10001  | the number of digits lies between 1 and 10000, got 10001"
     })

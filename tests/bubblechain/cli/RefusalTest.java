@@ -31,9 +31,9 @@ class RefusalTest {
                 + " given by its path, ending in .toml)",
         "poles xyzzy | no kernel is named 'xyzzy'; 'bubblechain kernels' lists them (a file of your own is given by its path,"
                 + " ending in .toml)",
-        "coefficients pole-mass --loops 0 | the number of loops lies between 1 and 1000, got 0",
-        "coefficients pole-mass --loops 1001 | the number of loops lies between 1 and 1000, got 1001",
-        "coefficients pole-mass --loops -1 | the number of loops lies between 1 and 1000, got -1",
+        "coefficients pole-mass --loops 0 | the number of loops lies between 1 and 10000, got 0",
+        "coefficients pole-mass --loops 10001 | the number of loops lies between 1 and 10000, got 10001",
+        "coefficients pole-mass --loops -1 | the number of loops lies between 1 and 10000, got -1",
         "coefficients pole-mass --exact --loops 41 | the number of loops in exact form lies between 1 and 40, got 41",
         "coefficients pole-mass --digits 0 | the number of digits lies between 1 and 10000, got 0",
         "coefficients pole-mass --digits 10001 | the number of digits lies between 1 and 10000, got 10001",
