@@ -32,6 +32,7 @@ final class FixedCoefficients {
     private static final int STAGED_BITS = 1_200;
 
     private static final int CUT_TERMS = 150;
+    private static final int ESTIMATE_BITS = 64;
 
     private final int bits;
 
@@ -104,7 +105,7 @@ final class FixedCoefficients {
         if (form.isEmpty()) {
             return Optional.empty();
         }
-        Optional<Tail> tail = tail(form.get(), loops + 1, radius);
+        Optional<Tail> tail = tail(form.get(), loops + 1, radius, log);
         if (tail.isEmpty()) {
             return Optional.empty();
         }
@@ -178,39 +179,42 @@ final class FixedCoefficients {
      * @param last first order that is left out
      * @param size not below what any of the coefficients loses by it
      */
-    private record Tail(int last, Magnitude size) {}
+    record Tail(int last, Magnitude size) {}
 
     /**
      * |y_k| &lt;= M (rho/R)^k/k!/2 for |gamma| &lt;= M on |a| = R; the sum over k &gt;= K is at most twice its first term once
-     * K exceeds 2 rho/R. With the exponential in front the loss is at most e^|l| times that.
+     * K exceeds 2 rho/R. With the exponential in front the loss is at most e^|l| times that, l = L rho.
      */
-    private Optional<Tail> tail(NormalForm form, int count, Rational radius) {
+    Optional<Tail> tail(NormalForm form, int count, Rational radius, ExactConstant log) {
         Optional<Rational> own = FixedExpansion.radius(form);
         if (own.isEmpty()) {
             return Optional.empty();
         }
+        Tail none = new Tail(count, Magnitude.ZERO);
         double ratioOnly = radius.toDouble() / own.get().toDouble();
         double falls = 0;
         for (int k = 1; k < count; k++) {
             falls += Math.log(ratioOnly) - Math.log(k);
         }
         if (count < CUT_TERMS || falls > -bits * LN2) {
-            return Optional.of(new Tail(count, Magnitude.ZERO));
+            return Optional.of(none);
         }
         ArcBound.Bound bound;
         try {
             bound = ArcBound.remainder(form, own.get().multiply(INSIDE).toDouble());
         } catch (DomainException noCircle) {
-            return Optional.of(new Tail(count, Magnitude.ZERO));
+            return Optional.of(none);
         }
         double ratio = radius.toDouble() / bound.radius();
-        double logarithm = bound.logarithm();
+        double logarithm =
+                bound.logarithm() + log.multiply(radius).toBall(ESTIMATE_BITS).upperBound().toDouble();
         for (int k = 1; k < count; k++) {
             logarithm += Math.log(ratio) - Math.log(k);
             if (k > 2 * ratio && logarithm < -(bits + GUARD_BITS) * LN2) {
-                return Optional.of(new Tail(k + 1, Magnitude.powerOfTwo(-(long) bits)));
+                // one bit more for the rounding of the logarithms
+                return Optional.of(new Tail(k, Magnitude.powerOfTwo((long) Math.ceil(logarithm / LN2) + 1)));
             }
         }
-        return Optional.of(new Tail(count, Magnitude.ZERO));
+        return Optional.of(none);
     }
 }

@@ -18,7 +18,7 @@ import org.junit.jupiter.api.Test;
 class FixedSeriesBoundsTest {
     private static final double LARGEST_MEDIAN = 20;
     /** Lengths and limbs: products between carries, columns of more than 64 and 128 terms. */
-    private static final int[][] SHAPES = {{1, 1}, {2, 1}, {12, 1}, {30, 3}, {170, 2}, {50, 63}, {45, 66}, {44, 131}};
+    private static final int[][] SHAPES = {{1, 1}, {2, 1}, {12, 1}, {30, 3}, {170, 2}, {44, 63}, {42, 66}, {41, 131}};
 
     private static void assertNotWasteful(List<Double> slack) {
         assertThat(slack).hasSizeGreaterThan(50);
@@ -121,7 +121,7 @@ class FixedSeriesBoundsTest {
         RandomDigits random = new RandomDigits(24);
         List<Double> slack = new ArrayList<>();
         for (int[] shape : SHAPES) {
-            for (int i = 0; i < 12; i++) {
+            for (int i = 0; i < 6; i++) {
                 SampledSeries a = SampledSeries.random(random, shape[0], shape[1], 5, 10 * (i % 3));
                 List<Rational> p = polynomial(random, i % 2 == 0);
                 SampledSeries.assertWithin(a.series().times(p), a.times(p), a.scale(), slack);
@@ -135,7 +135,7 @@ class FixedSeriesBoundsTest {
         RandomDigits random = new RandomDigits(25);
         List<Double> slack = new ArrayList<>();
         for (int[] shape : new int[][] {{1, 1}, {2, 1}, {12, 1}, {20, 3}, {24, 63}, {24, 66}, {24, 131}}) {
-            for (int i = 0; i < 12; i++) {
+            for (int i = 0; i < 6; i++) {
                 SampledSeries a = SampledSeries.random(random, shape[0], shape[1], 5, 10 * (i % 3));
                 List<Rational> p = polynomial(random, i % 2 == 0);
                 SampledSeries.assertWithin(a.series().over(p), a.over(p), a.scale(), slack);
