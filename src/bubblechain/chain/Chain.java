@@ -98,6 +98,7 @@ public final class Chain {
      *
      * @param loops  between 1 and {@link #LARGEST_LOOPS}
      * @param digits between 1 and {@link #LARGEST_DIGITS}
+     * @throws bubblechain.exact.PrecisionException if the memory of the virtual machine will not do
      */
     public List<CertifiedNumber> certified(int loops, int digits) {
         return certified(loops, digits, Rendering.PLAIN);
@@ -106,6 +107,8 @@ public final class Chain {
     /** The same in another coupling and normalisation. */
     public List<CertifiedNumber> certified(int loops, int digits, Rendering rendering) {
         requireRange("the number of digits", digits, LARGEST_DIGITS);
+        requireRange("the number of loops", loops, LARGEST_LOOPS);
+        ChainCost.of(loops, digits).requireMemory(Runtime.getRuntime().maxMemory());
         int needed = (int) Math.ceil(digits * BITS_PER_DIGIT) + 2 * (32 - Integer.numberOfLeadingZeros(loops));
         for (int guard = FIRST_GUARD_BITS; ; guard *= 2) {
             int bits = needed + guard;

@@ -7,6 +7,7 @@ import bubblechain.assessment.CrossCheckReport;
 import bubblechain.assessment.Validation;
 import bubblechain.assessment.ValidationReport;
 import bubblechain.borel.PolesReport;
+import bubblechain.chain.ChainCost;
 import bubblechain.chain.ChainOptions;
 import bubblechain.chain.CoefficientReport;
 import bubblechain.chain.Scheme;
@@ -143,6 +144,10 @@ final class Answers {
     static Report validate(@Nullable String path) {
         List<Validation.Finding> findings = path == null ? Validation.library() : Validation.of(path);
         return ValidationReport.of(path == null ? "library" : path, findings);
+    }
+
+    static double estimatedSeconds(int loops, int digits) {
+        return ChainCost.of(Math.max(1, loops), Math.max(1, digits)).seconds();
     }
 
     /** True if a validation found no failure. */

@@ -13,6 +13,8 @@ import picocli.CommandLine.Parameters;
         description = "The coefficients c_0 .. c_(L-1) of a chain, f = prefactor x sum c_n a^(n+1), to certified digits"
                 + " or in closed form.")
 final class CoefficientsCommand extends ReportCommand {
+    private static final long LARGE = 4_000_000;
+
     @Parameters(index = "0", paramLabel = "KERNEL", description = "built-in name, or path of a kernel file")
     String name = "";
 
@@ -72,5 +74,15 @@ final class CoefficientsCommand extends ReportCommand {
     @Override
     Report report() {
         return Answers.coefficients(this);
+    }
+
+    @Override
+    double estimatedSeconds() {
+        return Answers.estimatedSeconds(loops, digits);
+    }
+
+    @Override
+    boolean isLarge() {
+        return (long) loops * digits > LARGE;
     }
 }

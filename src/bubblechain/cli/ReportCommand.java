@@ -1,5 +1,6 @@
 package bubblechain.cli;
 
+import bubblechain.output.ReportWriter;
 import bubblechain.report.Report;
 import java.io.IOException;
 import java.io.PrintWriter;
@@ -57,13 +58,30 @@ abstract class ReportCommand implements Callable<Integer> {
         return ExitStatus.DONE;
     }
 
+    /** Seconds the work may take, roughly; only for the progress shown on a terminal. */
+    double estimatedSeconds() {
+        return 1;
+    }
+
+    /** True if the text may be too large to be held twice; it is then written as it is made. */
+    boolean isLarge() {
+        return false;
+    }
+
     /** Prints the report. A command with output that is no report overrides this and ends with {@link #print}. */
     @Override
     public Integer call() throws IOException {
-        Report report = report();
-        StringWriter text = new StringWriter();
-        format.format().writer(terminal.width()).write(report, text);
-        print(text.toString());
+        Report report = Patience.during(terminal, spec.name(), estimatedSeconds(), this::report);
+        ReportWriter writer = format.format().writer(terminal.width());
+        if (isLarge()) {
+            PrintWriter out = spec.commandLine().getOut();
+            writer.write(report, out);
+            out.flush();
+        } else {
+            StringWriter text = new StringWriter();
+            writer.write(report, text);
+            print(text.toString());
+        }
         return status(report);
     }
 
