@@ -171,6 +171,11 @@ public record ChainOptions(
         return coupling.words().replace("alpha_s", symbol);
     }
 
+    /** The name of the coefficients: c_n, or d_n = c_n/c_0. */
+    String symbol() {
+        return normalisation == Normalisation.FIRST ? "d_n" : "c_n";
+    }
+
     /** The whole convention in one sentence: what is expanded, in what, and what the numbers multiply. */
     public String words(Kernel kernel) {
         String expansion = coupling == Coupling.A ? "a" : "x";
@@ -186,7 +191,7 @@ public record ChainOptions(
         String decoupling = countsHeavyQuark(kernel)
                 ? "; the " + couplingFlavours.getAsInt() + "-flavour coupling is decoupled at " + kernel.scale() + ", at one loop"
                 : "";
-        return kernel.quantity() + " = " + front + "sum_{n>=0} c_n " + expansion + "^(n+1), " + meaning + operator
+        return kernel.quantity() + " = " + front + "sum_{n>=0} " + symbol() + " " + expansion + "^(n+1), " + meaning + operator
                 + decoupling + ", large-beta0 limit" + (scheme == Scheme.V ? ", V-scheme coupling" : ", MS-bar coupling");
     }
 }

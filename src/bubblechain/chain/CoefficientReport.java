@@ -41,7 +41,7 @@ public final class CoefficientReport {
         requestEntries(report, kernel, options);
         report.request("loops", Integer.toString(loops)).request("digits", Integer.toString(digits));
         report.normalisation(options.words(kernel));
-        report.add(table(numbers, closed));
+        report.add(table(numbers, closed, options.symbol()));
         if (flavourTerms) {
             report.add(flavourTable(kernel, options, Math.min(loops, LARGEST_FLAVOUR_TERM), digits));
         }
@@ -65,9 +65,9 @@ public final class CoefficientReport {
         options.couplingFlavours().ifPresent(nf -> report.request("coupling_nf", Integer.toString(nf)));
     }
 
-    private static Table table(List<CertifiedNumber> numbers, List<ExactConstant> closed) {
+    private static Table table(List<CertifiedNumber> numbers, List<ExactConstant> closed, String symbol) {
         List<Column> columns = new ArrayList<>(
-                List.of(Column.of("n", "n"), Column.of("loops", "loops"), Column.of("value", "c_n")));
+                List.of(Column.of("n", "n"), Column.of("loops", "loops"), Column.of("value", symbol)));
         if (!closed.isEmpty()) {
             columns.add(Column.of("exact", "exact"));
         }

@@ -125,6 +125,12 @@ class ShownAnswersTest {
     }
 
     @Test
+    void ratiosToTheFirstCoefficientHaveTheirOwnName() {
+        String shown = text("coefficients pole-mass --normalise first --loops 2");
+        assertThat(shown).contains("(first coefficient) sum_{n>=0} d_n a^(n+1)", "n  loops  d_n\n", "4.6861511002723396547");
+    }
+
+    @Test
     void anAnomalousDimensionIsNamed() {
         assertThat(text("coefficients pole-mass --anomalous-dimension --loops 2")).contains("d ln(M/mbar(mu))/d ln mu = CF/beta0");
         assertThat(text("kernels pole-mass")).contains("defined by");

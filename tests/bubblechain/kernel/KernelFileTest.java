@@ -186,6 +186,10 @@ class KernelFileTest {
         // gamma(3+u)/(gamma(3) gamma(1+u)) = (1+u)(2+u)/2, so T(0) = 1 and T'(0) = 1 + 1 + 1/2
         assertThat(third.transform().orElseThrow().exact(Rational.ZERO, 2).coefficients())
                 .containsExactly(ExactConstant.ONE, ExactConstant.of(Rational.of(5, 2)));
+        assertThat(KernelLibrary.load(path, Map.of("moment", Rational.ONE)).title()).endsWith("(moment = 1)");
+        assertThat(KernelLibrary.load(path, Map.of("moment", Rational.of(50))).title()).endsWith("(moment = 50)");
+        assertThatThrownBy(() -> KernelLibrary.load(path, Map.of("moment", Rational.ZERO)))
+                .hasMessage("the parameter moment is an integer between 1 and 50, got 0");
         assertThatThrownBy(() -> KernelLibrary.load(path, Map.of("moment", Rational.of(51))))
                 .hasMessage("the parameter moment is an integer between 1 and 50, got 51");
         assertThatThrownBy(() -> KernelLibrary.load(path, Map.of("moment", Rational.of(5, 2))))
