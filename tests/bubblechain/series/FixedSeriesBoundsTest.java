@@ -76,6 +76,21 @@ class FixedSeriesBoundsTest {
         assertNotWasteful(slack);
     }
 
+    /** Long enough for products and blocks of the exponential to go through a transform. */
+    @Test
+    void productsAndExponentialsByTransformStayWithinTheirBoundsWithSeed29() {
+        RandomDigits random = new RandomDigits(29);
+        int length = 270;
+        int limbs = 42;
+        List<Double> slack = new ArrayList<>();
+        SampledSeries slopes = slopes(random, length, limbs, 0);
+        SampledSeries.assertWithin(
+                slopes.series().expOfIntegral(), slopes.exponential(), slopes.scale(), slack);
+        SampledSeries a = SampledSeries.random(random, length, limbs, 1, 0);
+        SampledSeries.assertWithin(a.series().multiply(slopes.series()), a.times(slopes), a.scale(), slack);
+        assertNotWasteful(slack);
+    }
+
     @Test
     void sumsDifferencesAndShortenedSeriesStayWithinTheirBoundsWithSeed23() {
         RandomDigits random = new RandomDigits(23);

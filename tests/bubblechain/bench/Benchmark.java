@@ -1,0 +1,157 @@
+package bubblechain.bench;
+
+import bubblechain.chain.Chain;
+import bubblechain.kernel.KernelLibrary;
+import com.sun.management.OperatingSystemMXBean;
+import com.sun.management.ThreadMXBean;
+import java.lang.management.ManagementFactory;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Locale;
+
+/**
+ * Prints what lists of certified coefficients cost in a warm virtual machine: processor time of all its threads, time on the
+ * clock, bytes allocated, medians of several runs. Run it with {@code mvn -q -B -P bench test}; options in
+ * {@code -Dbench.args="..."}:
+ *
+ * <pre>
+ *   --kernels pole-mass,adler   which kernels
+ *   --sizes 20x50,100x100       pairs of coefficients and digits
+ *   --exact 20,30,40            lengths of exact lists, of the first kernel; "none" for none
+ *   --repeat 5                  measurements of each, after a warm-up
+ * </pre>
+ */
+public final class Benchmark {
+    private static final OperatingSystemMXBean SYSTEM =
+            (OperatingSystemMXBean) ManagementFactory.getOperatingSystemMXBean();
+    private static final ThreadMXBean THREADS = (ThreadMXBean) ManagementFactory.getThreadMXBean();
+    /** A job is warmed up for so many seconds, and twice at least. */
+    private static final double WARM_UP_SECONDS = 3;
+    /** Short jobs are run so many seconds per measurement: the clock of the processor ticks slowly. */
+    private static final double SECONDS_AT_ONCE = 0.3;
+
+    private List<String> kernels = List.of("pole-mass", "adler", "static-potential-r", "bjorken-gls", "cusp");
+    private List<String> sizes = List.of("20x50", "100x100", "300x300", "1000x1000", "2000x2000");
+    private List<String> exactLengths = List.of("20", "30", "40");
+    private int repeat = 5;
+
+    private Benchmark() {}
+
+    /** What one job cost, each number the median of its runs. */
+    private record Cost(double processor, double wall, double megabytes) {
+        static Cost median(List<Cost> runs) {
+            return new Cost(
+                    middle(runs.stream().mapToDouble(Cost::processor).toArray()),
+                    middle(runs.stream().mapToDouble(Cost::wall).toArray()),
+                    middle(runs.stream().mapToDouble(Cost::megabytes).toArray()));
+        }
+
+        private static double middle(double[] values) {
+            Arrays.sort(values);
+            return values[values.length / 2];
+        }
+    }
+
+    public static void main(String[] arguments) {
+        Benchmark benchmark = new Benchmark();
+        for (int i = 0; i + 1 < arguments.length; i += 2) {
+            benchmark.option(arguments[i], arguments[i + 1]);
+        }
+        if (arguments.length % 2 != 0) {
+            throw new IllegalArgumentException("an option without a value: " + arguments[arguments.length - 1]);
+        }
+        benchmark.run();
+    }
+
+    private void option(String name, String value) {
+        List<String> list = List.of(value.split(","));
+        switch (name) {
+            case "--kernels" -> kernels = list;
+            case "--sizes" -> sizes = list;
+            case "--exact" -> exactLengths = value.equals("none") ? List.of() : list;
+            case "--repeat" -> repeat = Integer.parseInt(value);
+            default -> throw new IllegalArgumentException("no option " + name + "; there are --kernels, --sizes, --exact, --repeat");
+        }
+    }
+
+    private void run() {
+        System.out.println("kernel               coefficients  digits  processor ms   wall ms  allocated MB   growth");
+        for (String kernel : kernels) {
+            Chain chain = Chain.of(KernelLibrary.load(kernel));
+            double before = 0;
+            for (String size : sizes) {
+                int loops = Integer.parseInt(size.split("x")[0]);
+                int digits = Integer.parseInt(size.split("x")[1]);
+                Cost cost = measure(() -> chain.certified(loops, digits).size());
+                print(kernel, loops, String.valueOf(digits), cost, before);
+                before = cost.processor();
+            }
+        }
+        Chain chain = Chain.of(KernelLibrary.load(kernels.get(0)));
+        double before = 0;
+        for (String length : exactLengths) {
+            int loops = Integer.parseInt(length);
+            Cost cost = measure(() -> chain.exact(loops).size());
+            print(kernels.get(0), loops, "exact", cost, before);
+            before = cost.processor();
+        }
+    }
+
+    private static void print(String kernel, int loops, String digits, Cost cost, double before) {
+        String growth = before == 0 ? "" : String.format(Locale.ROOT, "%9.1f", cost.processor() / before);
+        System.out.println(String.format(
+                Locale.ROOT,
+                "%-20s %12d  %6s  %12.1f  %8.1f  %12.1f %s",
+                kernel,
+                loops,
+                digits,
+                cost.processor(),
+                cost.wall(),
+                cost.megabytes(),
+                growth));
+    }
+
+    /** A job that gives the number of its results, which must not be zero. */
+    private interface Job {
+        int run();
+    }
+
+    private Cost measure(Job job) {
+        long start = System.nanoTime();
+        int runs = 0;
+        while (runs < 2 || seconds(start) < WARM_UP_SECONDS) {
+            consume(job);
+            runs++;
+        }
+        int atOnce = (int) Math.max(1, Math.ceil(SECONDS_AT_ONCE * runs / seconds(start)));
+        List<Cost> costs = new ArrayList<>();
+        for (int i = 0; i < repeat; i++) {
+            costs.add(average(job, atOnce));
+        }
+        return Cost.median(costs);
+    }
+
+    private static double seconds(long since) {
+        return (System.nanoTime() - since) / 1e9;
+    }
+
+    private static void consume(Job job) {
+        if (job.run() == 0) {
+            throw new IllegalStateException("no coefficients");
+        }
+    }
+
+    private static Cost average(Job job, int runs) {
+        long processor = SYSTEM.getProcessCpuTime();
+        long allocated = THREADS.getThreadAllocatedBytes(Thread.currentThread().getId());
+        long wall = System.nanoTime();
+        for (int i = 0; i < runs; i++) {
+            consume(job);
+        }
+        return new Cost(
+                (SYSTEM.getProcessCpuTime() - processor) / 1e6 / runs,
+                (System.nanoTime() - wall) / 1e6 / runs,
+                (THREADS.getThreadAllocatedBytes(Thread.currentThread().getId()) - allocated) / 1e6 / runs);
+    }
+}
