@@ -51,21 +51,28 @@ final class Wrapping {
 
     private static List<String> greedy(String text, int width, boolean formula) {
         List<String> lines = new ArrayList<>();
-        String rest = text;
-        while (width(rest) > width) {
-            int limit = rest.offsetByCodePoints(0, width);
-            int end = formula ? lastBreak(rest, limit, limit / 2, Wrapping::startsTerm) : 0;
+        int start = 0;
+        // two characters a code point: a window this long shows whether the rest fits, without a look at all of it
+        int reach = 2 * width + 2;
+        String window = text.substring(0, Math.min(text.length(), reach));
+        while (width(window) > width) {
+            int limit = window.offsetByCodePoints(0, width);
+            int end = formula ? lastBreak(window, limit, limit / 2, Wrapping::startsTerm) : 0;
             if (end == 0) {
-                end = lastBreak(rest, limit, 0, formula ? Wrapping::splitsFormula : Wrapping::splitsWords);
+                end = lastBreak(window, limit, 0, formula ? Wrapping::splitsFormula : Wrapping::splitsWords);
             }
             if (end == 0) {
                 end = limit;
             }
-            lines.add(rest.substring(0, end).stripTrailing());
-            rest = rest.substring(end).stripLeading();
+            lines.add(window.substring(0, end).stripTrailing());
+            start += end;
+            while (start < text.length() && Character.isWhitespace(text.codePointAt(start))) {
+                start += Character.charCount(text.codePointAt(start));
+            }
+            window = text.substring(start, Math.min(text.length(), start + reach));
         }
-        if (!rest.isEmpty() || lines.isEmpty()) {
-            lines.add(rest);
+        if (!window.isEmpty() || lines.isEmpty()) {
+            lines.add(window);
         }
         return lines;
     }
