@@ -2,6 +2,7 @@ package bubblechain.analytic;
 
 import bubblechain.exact.Ball;
 import bubblechain.exact.ExactConstant;
+import bubblechain.exact.GradedSum;
 import bubblechain.exact.Rational;
 import bubblechain.series.BallRing;
 import bubblechain.series.CoefficientRing;
@@ -10,6 +11,7 @@ import bubblechain.series.ExactRing;
 import bubblechain.series.LaurentSeries;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.IntFunction;
 
 /**
@@ -19,6 +21,9 @@ import java.util.function.IntFunction;
  * asked for, however much cancels between terms.
  */
 public final class Expansion {
+    /** Shorter expansions start sooner through series. */
+    private static final int ENUMERATED_LENGTH = 7;
+
     private final List<LocalTerm> terms = new ArrayList<>();
 
     private Expansion(NormalForm form, Rational point) {
@@ -34,9 +39,54 @@ public final class Expansion {
         return terms.stream().mapToInt(LocalTerm::valuation).min().orElse(0);
     }
 
-    /** Exact coefficients of all powers below {@code end}; a formal zero is dropped at the start. */
+    /**
+     * Exact coefficients of all powers below {@code end}; a formal zero is dropped at the start.
+     *
+     * @throws bubblechain.exact.DomainException if a coefficient has more than {@link bubblechain.exact.GradedSeries#LARGEST_SIZE} terms
+     */
     public LaurentSeries<ExactConstant> exact(int end) {
+        return end - lowestPower() < ENUMERATED_LENGTH
+                ? exactBySeries(end)
+                : exactByMonomials(end).orElseGet(() -> exactBySeries(end));
+    }
+
+    /** The same through series whose coefficients are exact constants. */
+    LaurentSeries<ExactConstant> exactBySeries(int end) {
         return sum(end, length -> ExactRing.INSTANCE);
+    }
+
+    /** The same monomial by monomial; empty if that does not apply to a term. */
+    Optional<LaurentSeries<ExactConstant>> exactByMonomials(int end) {
+        return graded(end).map(graded -> {
+            GradedSum sum = GradedSum.of(graded.stream().map(GradedTerm::summand).toList());
+            List<ExactConstant> coefficients = new ArrayList<>();
+            int lowest = lowestPower();
+            for (int n = lowest; n < end; n++) {
+                int power = n;
+                ExactConstant coefficient = sum.combine((h, weight) -> graded.get(h).factor(power - weight));
+                if (coefficients.isEmpty() && coefficient.isZero()) {
+                    lowest++;
+                } else {
+                    coefficients.add(coefficient);
+                }
+            }
+            return new LaurentSeries<>(coefficients.isEmpty() ? end : lowest, coefficients);
+        });
+    }
+
+    /** This as graded terms that hold all powers below {@code end}; empty if a term has none. */
+    public Optional<List<GradedTerm>> graded(int end) {
+        List<GradedTerm> result = new ArrayList<>();
+        for (LocalTerm term : terms) {
+            if (term.valuation() < end) {
+                Optional<List<GradedTerm>> parts = GradedTerm.of(term, end);
+                if (parts.isEmpty()) {
+                    return Optional.empty();
+                }
+                result.addAll(parts.get());
+            }
+        }
+        return Optional.of(result);
     }
 
     /** Balls that enclose the coefficients of all powers below {@code end}. */

@@ -31,7 +31,7 @@ final class LocalTerm {
     private int valuation;
 
     /** Gamma(shift + slope x)^power with shift in (0,1]. */
-    private record GammaPower(Rational shift, Rational slope, int power) {}
+    record GammaPower(Rational shift, Rational slope, int power) {}
 
     LocalTerm(TermKey key, RationalFunction factor, Rational point) {
         this.key = key;
@@ -43,7 +43,7 @@ final class LocalTerm {
         below.add(local.denominator().dividedByPower(local.denominator().valuation()));
         key.gammas().forEach(this::addGamma);
         key.polygammas().forEach((p, power) -> {
-            if (isPole(argument(p.shift(), p.slope()))) {
+            if (isPole(p)) {
                 valuation -= (p.n() + 1) * power;
             }
         });
@@ -54,8 +54,33 @@ final class LocalTerm {
         return valuation;
     }
 
+    TermKey key() {
+        return key;
+    }
+
+    /** What is left of the constants; the polynomials and series are not normalised to 1 at x = 0. */
+    ExactConstant constant() {
+        return constant;
+    }
+
+    List<Polynomial> above() {
+        return above;
+    }
+
+    List<Polynomial> below() {
+        return below;
+    }
+
+    List<GammaPower> gammas() {
+        return gammas;
+    }
+
     private Rational argument(Rational shift, Rational slope) {
         return shift.add(slope.multiply(point));
+    }
+
+    boolean isPole(PolygammaFactor factor) {
+        return isPole(argument(factor.shift(), factor.slope()));
     }
 
     private static boolean isPole(Rational argument) {
@@ -112,7 +137,7 @@ final class LocalTerm {
         int poles = 0;
         for (Map.Entry<PolygammaFactor, Integer> entry : key.polygammas().entrySet()) {
             S power = algebra.power(polygamma(algebra, entry.getKey()), entry.getValue());
-            if (isPole(argument(entry.getKey().shift(), entry.getKey().slope()))) {
+            if (isPole(entry.getKey())) {
                 poles += (entry.getKey().n() + 1) * entry.getValue();
             }
             result = algebra.multiply(result, power);
@@ -140,23 +165,37 @@ final class LocalTerm {
                 : algebra.multiply(exponential, algebra.constant(constant));
     }
 
-    /** psi^(n)(z + b x) = psi^(n)(s + b x) plus or minus (-1)^n n! sum (s + j + b x)^(-n-1). */
-    private <S> S polygamma(SeriesAlgebra<S> algebra, PolygammaFactor factor) {
+    /**
+     * psi^(n)(z + b x) = psi^(n)(s + b x) + factor sum_v (v + b x)^(-n-1), s in (0,1].
+     *
+     * @param values the v = s, s+1, ..., z-1 with factor (-1)^n n!, or v = s-1, ..., z with the opposite sign
+     */
+    record Recurrence(Rational s, List<Rational> values, Rational factor) {}
+
+    Recurrence recurrence(PolygammaFactor factor) {
         Rational z = argument(factor.shift(), factor.slope());
         Rational s = z.subtract(Rational.of(z.ceiling())).add(1);
         int n = factor.n();
         int steps = steps(z, s, n + 1);
-        BigInteger factorial = ExactFunctions.factorial(n);
-        Rational scale = Rational.of(n % 2 == 0 ? factorial : factorial.negate());
-        S sum = algebra.polygammaTail(n, s, factor.slope());
-        ExactConstant slope = ExactConstant.of(factor.slope());
+        List<Rational> values = new ArrayList<>();
         for (int j = 0; j < steps; j++) {
-            S argument = algebra.linear(ExactConstant.of(s.add(j)), slope);
-            sum = algebra.add(sum, algebra.multiply(algebra.power(argument, -n - 1), scale));
+            values.add(s.add(j));
         }
         for (int j = 1; j <= -steps; j++) {
-            S argument = algebra.linear(ExactConstant.of(s.subtract(j)), slope);
-            sum = algebra.add(sum, algebra.multiply(algebra.power(argument, -n - 1), scale.negate()));
+            values.add(s.subtract(j));
+        }
+        BigInteger factorial = ExactFunctions.factorial(n);
+        return new Recurrence(s, values, Rational.of((n % 2 == 0) == (steps >= 0) ? factorial : factorial.negate()));
+    }
+
+    private <S> S polygamma(SeriesAlgebra<S> algebra, PolygammaFactor factor) {
+        Recurrence recurrence = recurrence(factor);
+        S sum = algebra.polygammaTail(factor.n(), recurrence.s(), factor.slope());
+        ExactConstant slope = ExactConstant.of(factor.slope());
+        for (Rational value : recurrence.values()) {
+            S argument = algebra.linear(ExactConstant.of(value), slope);
+            sum = algebra.add(
+                    sum, algebra.multiply(algebra.power(argument, -factor.n() - 1), recurrence.factor()));
         }
         return sum;
     }

@@ -19,7 +19,11 @@ public final class Chain {
     /** Largest number of coefficients by the ball route. */
     public static final int LARGEST_LOOPS = 10_000;
     /** Largest number of coefficients in exact form. */
-    public static final int LARGEST_EXACT_LOOPS = 40;
+    public static final int LARGEST_EXACT_LOOPS = 80;
+    /** Largest number of terms that exact coefficients may have together. */
+    public static final int LARGEST_EXACT_TERMS = 2_000_000;
+    /** Largest number of exact coefficients that need series of constants, and that settle a doubtful decimal. */
+    static final int LARGEST_SERIES_LOOPS = 40;
     /** Terms of an exact coefficient up to which longer exact lists stay cheap. */
     private static final int FEW_TERMS = 20;
     /** Largest number of digits. */
@@ -72,11 +76,15 @@ public final class Chain {
     /**
      * c_0 .. c_(loops-1) in closed form.
      *
-     * @param loops between 1 and {@link #LARGEST_EXACT_LOOPS}
+     * @param loops between 1 and {@link #LARGEST_EXACT_LOOPS}; of a kernel with a sine of rational slope, or outside the
+     *     admissible class, 40
+     * @throws DomainException if the coefficients have more than {@link #LARGEST_EXACT_TERMS} terms together, which
+     *     for the pole mass happens above 72 loops
+     * @implNote about two microseconds for each term of the result
      */
     public List<ExactConstant> exact(int loops) {
         requireRange("the number of loops in exact form", loops, LARGEST_EXACT_LOOPS);
-        return new ExactCoefficients().coefficients(kernel, loops, scales);
+        return new ExactCoefficients(LARGEST_SERIES_LOOPS).coefficients(kernel, loops, scales);
     }
 
     /** Balls for c_0 .. c_(loops-1) at a working precision in bits. */
@@ -120,7 +128,7 @@ public final class Chain {
                 return numbers.stream().flatMap(Optional::stream).toList();
             }
             // what more bits do not settle is a zero or a tie, which exact arithmetic decides where it is affordable
-            if (2 * guard > LARGEST_GUARD_BITS || open <= LARGEST_EXACT_LOOPS && guard >= 2 * FIRST_GUARD_BITS) {
+            if (2 * guard > LARGEST_GUARD_BITS || open <= LARGEST_SERIES_LOOPS && guard >= 2 * FIRST_GUARD_BITS) {
                 return settled(balls, numbers, rendering.applyToExact(affordable(open)), digits, bits);
             }
         }
@@ -136,13 +144,18 @@ public final class Chain {
         return 0;
     }
 
-    /** At most {@code loops} exact coefficients: beyond the general limit only while they have few terms. */
+    /** At most {@code loops} exact coefficients: long lists only while they have few terms. */
     private List<ExactConstant> affordable(int loops) {
-        int reached = Math.min(loops, LARGEST_EXACT_LOOPS);
-        List<ExactConstant> exact = exact(reached);
+        int reached = Math.min(loops, LARGEST_SERIES_LOOPS);
+        List<ExactConstant> exact;
+        try {
+            exact = exact(reached);
+        } catch (DomainException tooManyTerms) {
+            return List.of();
+        }
         while (reached < loops && exact.stream().allMatch(c -> c.size() <= FEW_TERMS)) {
             reached = Math.min(loops, 2 * reached);
-            exact = new ExactCoefficients().coefficients(kernel, reached, scales);
+            exact = new ExactCoefficients(LARGEST_LOOPS).coefficients(kernel, reached, scales);
         }
         return exact;
     }

@@ -49,8 +49,15 @@ public record Rendering(ExactConstant factor, ExactConstant ratio, boolean byFir
         return new Rendering(factor, ratio, normalisation == Normalisation.FIRST);
     }
 
+    private boolean isPlain() {
+        return factor.equals(ExactConstant.ONE) && ratio.equals(ExactConstant.ONE) && !byFirst;
+    }
+
     /** Applies this to exact coefficients c_0, c_1, ... */
     public List<ExactConstant> applyToExact(List<ExactConstant> coefficients) {
+        if (coefficients.isEmpty() || isPlain()) {
+            return coefficients;
+        }
         List<ExactConstant> result = new ArrayList<>();
         ExactConstant weight = factor.multiply(ratio);
         for (ExactConstant c : coefficients) {
@@ -66,7 +73,7 @@ public record Rendering(ExactConstant factor, ExactConstant ratio, boolean byFir
 
     /** Applies this to balls. */
     public List<Ball> applyToBalls(List<Ball> coefficients, int bits) {
-        if (factor.equals(ExactConstant.ONE) && ratio.equals(ExactConstant.ONE) && !byFirst) {
+        if (isPlain()) {
             return coefficients;
         }
         List<Ball> result = new ArrayList<>();

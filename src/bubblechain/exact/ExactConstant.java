@@ -49,6 +49,15 @@ public final class ExactConstant {
         return coefficient.isZero() ? ZERO : new ExactConstant(Map.of(monomial, coefficient));
     }
 
+    /** The sum of the terms of a map that nobody changes any more; no coefficient is zero. */
+    static ExactConstant ofTerms(Map<Monomial, Rational> terms) {
+        return wrap(terms);
+    }
+
+    Map<Monomial, Rational> terms() {
+        return terms;
+    }
+
     /**
      * A number known only by its balls.
      *
@@ -69,6 +78,11 @@ public final class ExactConstant {
             return Optional.of(Rational.ZERO);
         }
         return terms.size() == 1 ? Optional.ofNullable(terms.get(Monomial.ONE)) : Optional.empty();
+    }
+
+    /** The rational term of the canonical form. */
+    public Rational rationalPart() {
+        return terms.getOrDefault(Monomial.ONE, Rational.ZERO);
     }
 
     /** True if no opaque number occurs, so that {@link #toString} is a closed form. */
@@ -128,7 +142,7 @@ public final class ExactConstant {
         return wrap(product);
     }
 
-    private static void accumulate(Map<Monomial, Rational> sum, Monomial monomial, Rational coefficient) {
+    static void accumulate(Map<Monomial, Rational> sum, Monomial monomial, Rational coefficient) {
         Rational total = sum.merge(monomial, coefficient, Rational::add);
         if (total.isZero()) {
             sum.remove(monomial);
@@ -316,23 +330,21 @@ public final class ExactConstant {
         if (isZero()) {
             return "0";
         }
-        Map<String, Integer> weights = new HashMap<>();
-        List<String> texts = new ArrayList<>();
-        terms.forEach((monomial, coefficient) -> {
-            String text = termText(monomial, coefficient);
-            texts.add(text);
-            weights.put(text, monomial.doubledWeight());
-        });
-        texts.sort(Comparator.comparing((String text) -> -weights.get(text)).thenComparing(Comparator.naturalOrder()));
+        List<Printed> printed = new ArrayList<>(terms.size());
+        terms.forEach((monomial, coefficient) ->
+                printed.add(new Printed(monomial.doubledWeight(), termText(monomial, coefficient))));
+        printed.sort(Comparator.comparingInt(Printed::weight).reversed().thenComparing(Printed::text));
         StringBuilder result = new StringBuilder();
-        for (String text : texts) {
-            if (result.length() > 0 && !text.startsWith("-")) {
+        for (Printed term : printed) {
+            if (result.length() > 0 && term.text().charAt(0) != '-') {
                 result.append('+');
             }
-            result.append(text);
+            result.append(term.text());
         }
         return result.toString();
     }
+
+    private record Printed(int weight, String text) {}
 
     private static String termText(Monomial monomial, Rational coefficient) {
         List<String> above = new ArrayList<>();

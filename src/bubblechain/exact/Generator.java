@@ -26,12 +26,14 @@ final class Generator implements Comparable<Generator> {
     private final BigInteger index;
     private final String text;
     private final IntFunction<Ball> value;
+    private final int hash;
 
     private Generator(Kind kind, BigInteger index, String text, IntFunction<Ball> value) {
         this.kind = kind;
         this.index = index;
         this.text = text;
         this.value = value;
+        this.hash = Objects.hash(kind.ordinal(), index, text);
     }
 
     /** zeta(k) for odd k of at least 3. */
@@ -94,7 +96,7 @@ final class Generator implements Comparable<Generator> {
 
     @Override
     public int hashCode() {
-        return Objects.hash(kind, index, text);
+        return hash;
     }
 
     @Override

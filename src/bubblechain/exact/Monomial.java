@@ -65,6 +65,11 @@ final class Monomial {
                 0, Rational.ZERO, Rational.ZERO, ONE.roots, new Generator[] {generator}, new int[] {1});
     }
 
+    /** pi^piPower times powers of generators, which are in their order; the powers are not zero. */
+    static Monomial of(int piPower, Generator[] generators, int[] powers) {
+        return new Monomial(2 * piPower, Rational.ZERO, Rational.ZERO, ONE.roots, generators, powers);
+    }
+
     /** A product with the rational factor that carries over when fractional powers of a prime add to one or more. */
     record Product(Monomial monomial, Rational factor) {}
 
@@ -133,6 +138,21 @@ final class Monomial {
         int[] negated = Arrays.stream(powers).map(k -> -k).toArray();
         return new Product(
                 new Monomial(-halfPi, exponent.negate(), eulerExponent.negate(), inverted, generators, negated), factor);
+    }
+
+    Monomial timesPi(int power) {
+        return power == 0
+                ? this
+                : new Monomial(halfPi + 2 * power, exponent, eulerExponent, roots, generators, powers);
+    }
+
+    /** True for pi^power alone. */
+    boolean isPiPower(int power) {
+        return halfPi == 2 * power
+                && generators.length == 0
+                && exponent.isZero()
+                && eulerExponent.isZero()
+                && roots.isEmpty();
     }
 
     boolean isOne() {

@@ -34,7 +34,7 @@ class RefusalTest {
         "coefficients pole-mass --loops 0 | the number of loops lies between 1 and 10000, got 0",
         "coefficients pole-mass --loops 10001 | the number of loops lies between 1 and 10000, got 10001",
         "coefficients pole-mass --loops -1 | the number of loops lies between 1 and 10000, got -1",
-        "coefficients pole-mass --exact --loops 41 | the number of loops in exact form lies between 1 and 40, got 41",
+        "coefficients pole-mass --exact --loops 81 | the number of loops in exact form lies between 1 and 80, got 81",
         "coefficients pole-mass --digits 0 | the number of digits lies between 1 and 10000, got 0",
         "coefficients pole-mass --digits 10001 | the number of digits lies between 1 and 10000, got 10001",
         "poles pole-mass --digits 0 | the number of digits lies between 1 and 10000, got 0",
