@@ -39,8 +39,8 @@ public final class ResidueReport {
                 .request("nf", String.valueOf(result.request().beta().nf()))
                 .request("loops", String.valueOf(result.loops()))
                 .request("power", result.request().power().toString())
-                .request("exponent-shift", shift(result.request()))
-                .request("beta-loops", String.valueOf(result.request().beta().loops()))
+                .request("exponent_shift", shift(result.request()))
+                .request("beta_loops", String.valueOf(result.request().beta().loops()))
                 .normalisation(result.request().inWords());
         blocks(result).forEach(builder::add);
         sources(result).forEach(builder::source);
