@@ -9,7 +9,7 @@ import org.junit.jupiter.api.Test;
 
 /** Digits against big integers: values are exact, errors stay below the units that the comments promise. */
 class FixedDigitsTest {
-    private static final int[] SIZES = {0, 1, 2, 3, 5, 17, 61, 62, 63, 64, 65, 126, 127, 128, 129, 200};
+    private static final int[] SIZES = {0, 1, 2, 3, 5, 17, 61, 62, 63, 64, 65, 126, 127, 128, 129, 200, 540};
     private static final long SAFE = 1L << 40;
 
     private static void assertBalanced(long[] digits) {

@@ -21,7 +21,7 @@ final class RandomDigits {
     /** Balanced digits, the integer digit at most {@code largest} in size. */
     long[] any(int limbs, long largest) {
         long[] digits = new long[limbs + 1];
-        int kind = random.nextInt(6);
+        int kind = random.nextInt(7);
         for (int k = 0; k <= limbs; k++) {
             digits[k] = digit(kind);
         }
@@ -37,6 +37,7 @@ final class RandomDigits {
             case 0 -> EDGE;
             case 1 -> -EDGE;
             case 2 -> -1;
+            case 5 -> 1;
             case 3 -> random.nextBoolean() ? EDGE : -EDGE;
             case 4 -> random.nextInt(4) == 0 ? random.nextLong() >> (Long.SIZE - FixedDigits.BITS) : 0;
             default -> random.nextLong() >> (Long.SIZE - FixedDigits.BITS);

@@ -18,6 +18,7 @@ import java.util.Random;
  */
 record SampledSeries(FixedSeries series, List<BigInteger> points, int scale) {
     private static final int STEP_BITS = 20;
+    private static final int SHOWN_BITS = 60;
 
     /** Balanced random digits, the integer part below {@code largest}, errors zero or up to 2^errorBits units. */
     static SampledSeries random(RandomDigits random, int length, int limbs, long largest, int errorBits) {
@@ -110,7 +111,8 @@ record SampledSeries(FixedSeries series, List<BigInteger> points, int scale) {
         int bits = FixedSeries.bits(result.limbs());
         for (int k = 0; k < result.length(); k++) {
             BigInteger difference = result.integer(k).shiftLeft(scale - bits).subtract(points.get(k)).abs();
-            double units = Rational.of(difference, BigInteger.ONE.shiftLeft(scale - bits)).toDouble();
+            // to 2^-60 of a unit
+            double units = Math.scalb(difference.shiftRight(scale - bits - SHOWN_BITS).doubleValue(), -SHOWN_BITS);
             // the points of the results are themselves rounded, far below the last place
             assertThat(units).as("coefficient %d of %d, %d limbs", k, result.length(), result.limbs())
                     .isLessThanOrEqualTo(result.error(k) * (1 + 0x1p-40) + 0x1p-40);
