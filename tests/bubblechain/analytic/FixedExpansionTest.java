@@ -3,7 +3,7 @@ package bubblechain.analytic;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import bubblechain.exact.Ball;
-import bubblechain.exact.ExactConstant;
+import bubblechain.exact.Magnitude;
 import bubblechain.exact.Rational;
 import bubblechain.series.FixedSeries;
 import bubblechain.series.LaurentSeries;
@@ -213,7 +213,8 @@ class FixedExpansionTest {
     @ParameterizedTest
     @CsvSource(delimiter = '|', value = {
         "gamma(1+u)*gamma(1-2*u)/gamma(1-u) | 1/2 | 120 | 6", "gamma(1+u)*gamma(1-2*u)/gamma(1-u) | 1/2 | 60 | 30",
-        "gamma(1/4+u)^3*gamma(2/3-u/5)      | 1/4 | 90  | 4", "gamma(1-u)^9/gamma(1+u/3)^5        | 1   | 80  | 13"
+        "gamma(1+u)*gamma(1-2*u)/gamma(1-u) | 1/2 | 90  | 1", "gamma(1+u)*gamma(1-2*u)/gamma(1-u) | 1/2 | 180 | 3",
+        "gamma(1/4+u)^3*gamma(2/3-u/5)      | 1/4 | 120 | 2", "gamma(1-u)^9/gamma(1+u/3)^5        | 1   | 80  | 13"
     })
     void exponentialsWithoutTheirNearestPolesAreWithinTheirBounds(String formula, String rho, int length, int limbs) {
         Map.Entry<TermKey, RationalFunction> term =
@@ -233,6 +234,23 @@ class FixedExpansionTest {
             assertThat(got.midpoint().subtract(expected.midpoint()).abs())
                     .as("%s, [v^%d]", formula, n)
                     .isLessThanOrEqualTo(got.radius().add(expected.radius()).toRational());
+        }
+    }
+
+    @Test
+    void gatheredBallsAreWithinTheErrorsOfTheSeriesWithSeed33() {
+        Random random = new Random(33);
+        List<Ball> balls = new ArrayList<>();
+        FixedValues values = new FixedValues(200, 2);
+        for (int k = 0; k < 200; k++) {
+            Ball middle = Ball.of(Rational.of(random.nextInt(2_001) - 1_000, 1 + random.nextInt(1_000)), 400);
+            Magnitude radius = Magnitude.of(random.nextInt(1 << 20)).scale(-30 - random.nextInt(110));
+            balls.add(random.nextInt(5) == 0 ? middle : middle.addError(radius));
+            values.set(k, balls.get(k));
+        }
+        FixedSeries series = values.series();
+        for (int k = 0; k < 200; k++) {
+            assertThat(series.coefficient(k).contains(balls.get(k))).as("%s in %s", balls.get(k), series.coefficient(k)).isTrue();
         }
     }
 

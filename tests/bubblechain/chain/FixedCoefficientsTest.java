@@ -110,6 +110,9 @@ class FixedCoefficientsTest {
         List<Ball> low = route.coefficients(kernel, loops, scales).orElseThrow();
         List<Ball> high = fixed(kernel, loops, 2 * bits, scales);
         assertThat(median(compare("pole-mass", low, high))).isLessThan(LARGEST_MEDIAN + 12);
+        for (int n = 0; n < loops; n++) {
+            assertThat(low.get(n).accuracyBits()).as("bits of c_%d", n).isGreaterThan(bits - 80);
+        }
     }
 
     /** What the cut leaves out, from the coefficients themselves and from the bound it rests on. */
