@@ -19,6 +19,7 @@ import bubblechain.report.Value;
 import bubblechain.sumrule.ResidueReport;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 
 /**
  * One quantity on one page: how the chain grows, which power corrections it implies, what the published series says about
@@ -30,6 +31,8 @@ public final class AssessmentReport {
 
     private static final int DIGITS = 12;
     private static final int POLE_DIGITS = 10;
+    /** Parts of a cross-check that stand at the top of the page or in the part on the sum rule. */
+    private static final Set<String> SHOWN_ELSEWHERE = Set.of("comparison", "published_orders");
 
     private AssessmentReport() {}
 
@@ -55,13 +58,18 @@ public final class AssessmentReport {
                 .request("range", range.toString());
         report.normalisation(options.words(kernel));
         report.add(defaults(kernel, series, nf));
+        Optional<CrossCheck> check = kernel.isAnomalousDimension()
+                ? Optional.empty()
+                : series.map(s -> CrossCheck.of(kernel, s, nf, Optional.empty()));
+        // the result comes first, how it came about afterwards
+        check.ifPresent(c -> report.add(CrossCheckReport.comparison(c)));
         add(report, CoefficientReport.of(kernel, options, loops, DIGITS, false, false), "chain_coefficients");
         addPoles(report, kernel, options, range, loops);
         kernel.sources().forEach(report::source);
         kernel.cautions().forEach(report::caution);
         report.caution(CoefficientReport.MODEL_CAUTION);
-        if (series.isPresent() && !kernel.isAnomalousDimension()) {
-            addSeries(report, CrossCheck.of(kernel, series.get(), nf, Optional.empty()));
+        if (check.isPresent()) {
+            addSeries(report, check.get());
         } else {
             report.add(new Note("No published series of this quantity is at hand: the chain stands alone, and nothing"
                     + " here is measured."));
@@ -112,7 +120,7 @@ public final class AssessmentReport {
             report.add(block);
         }
         CrossCheckReport.blocks(check).stream()
-                .filter(block -> !Keys.of(block).equals("published_orders"))
+                .filter(block -> !SHOWN_ELSEWHERE.contains(Keys.of(block)))
                 .forEach(report::add);
         CrossCheckReport.sourcesOf(check).forEach(report::source);
         CrossCheckReport.cautionsOf(check).forEach(report::caution);

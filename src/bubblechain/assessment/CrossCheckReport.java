@@ -56,7 +56,8 @@ public final class CrossCheckReport {
         return cautions;
     }
 
-    private static Facts comparison(CrossCheck check) {
+    /** The three determinations and the verdict. */
+    static Facts comparison(CrossCheck check) {
         SumRuleResult measured = check.measured();
         double error = measured.normalisationErrors().combined();
         Facts facts = Facts.titled(

@@ -66,16 +66,24 @@ public final class PolesReport {
         return report.build();
     }
 
+    /** For a reader simple poles have their residue in the row; JSON and CSV always have the list of Laurent coefficients. */
     private static Table table(List<BorelPole> poles, Kernel kernel, int digits) {
-        List<Column> columns = List.of(
+        boolean simple = poles.stream().allMatch(p -> p.pole().order() == 1);
+        List<Column> columns = new ArrayList<>(List.of(
                 Column.of("u", "u0"), Column.of("order", "order"), Column.of("status", "status"),
                 Column.of("kind", "kind"), Column.of("power", "p"),
-                Column.of("power_correction", "relative power correction"), Column.of("operator", "operator"),
-                Column.of("laurent", "Laurent coefficients"));
+                Column.of("power_correction", "relative power correction"), Column.of("operator", "operator")));
+        Column coefficients = Column.of("laurent", "Laurent coefficients");
+        columns.add(simple ? coefficients.dataOnly() : coefficients);
+        if (simple) {
+            columns.add(3, Column.of("residue_exact", "residue").textOnly());
+            columns.add(4, Column.of("residue", "").textOnly());
+        }
         List<List<Value>> rows = new ArrayList<>();
         for (BorelPole pole : poles) {
             Optional<String> operator = pole.note().flatMap(SingularityNote::operator);
-            rows.add(List.of(
+            Table laurent = laurent(pole, digits);
+            List<Value> row = new ArrayList<>(List.of(
                     Value.exact(pole.u().toString()),
                     Value.count(pole.pole().order()),
                     Value.text(pole.pole().status().text()),
@@ -83,7 +91,12 @@ public final class PolesReport {
                     Value.exact(pole.u().multiply(2).toString()),
                     Value.text(pole.power(kernel.scale())),
                     operator.map(Value::text).orElse(Value.absent()),
-                    Value.rows(laurent(pole, digits))));
+                    Value.rows(laurent)));
+            if (simple) {
+                row.add(3, laurent.rows().get(0).get(1));
+                row.add(4, laurent.rows().get(0).get(2));
+            }
+            rows.add(row);
         }
         return new Table("poles", "Poles of B(u); p = 2 u0", columns, rows);
     }
@@ -126,7 +139,8 @@ public final class PolesReport {
             report.add(new Table(
                     "algebraic_poles", "Poles at irrational points, with isolating intervals",
                     List.of(
-                            Column.of("u", "u0"), Column.of("equation", "root of"), Column.of("lower", "above"), Column.of("upper", "below"),
+                            Column.of("u", "u0"), Column.of("equation", "root of"), Column.of("lower", "above"),
+                            Column.of("upper", "below"),
                             Column.of("order", "order"), Column.of("status", "status"),
                             Column.of("leading", "leading coefficient")),
                     rows));
