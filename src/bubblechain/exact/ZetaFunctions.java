@@ -120,21 +120,7 @@ final class ZetaFunctions {
         }
         int spare = 32 - Integer.numberOfLeadingZeros(n);
         BigInteger[] weights = suffixSums(n);
-        BigInteger[] sums = new BigInteger[(last - first) / 2 + 1];
-        Arrays.fill(sums, BigInteger.ZERO);
-        for (int k = 0; k < n; k++) {
-            BigInteger base = BigInteger.valueOf(k + 1L);
-            BigInteger divisor = base.multiply(base);
-            BigInteger weight = weights[k + 1].shiftLeft(spare);
-            // the first power may be far longer than the weight: then every term is below one unit
-            BigInteger term = (double) first * (base.bitLength() - 1) > weight.bitLength()
-                    ? BigInteger.ZERO
-                    : weight.divide(base.pow(first));
-            for (int i = 0; i < sums.length && term.signum() > 0; i++) {
-                sums[i] = k % 2 == 0 ? sums[i].add(term) : sums[i].subtract(term);
-                term = k == 0 ? term : term.divide(divisor);
-            }
-        }
+        BigInteger[] sums = powerSums(weights, spare, first, (last - first) / 2 + 1);
         Ball scale = Ball.of(weights[0].shiftLeft(spare));
         Magnitude error = Magnitude.of(n).add(Magnitude.powerOfTwo(spare));
         Ball[] result = new Ball[sums.length];
@@ -143,6 +129,34 @@ final class ZetaFunctions {
             result[i] = fromEta(eta, first + 2 * i, working);
         }
         return result;
+    }
+
+    /** sum_k (-1)^k floor(weights_(k+1) 2^spare/(k+1)^(first + 2i)) for i = 0 .. count-1. */
+    private static BigInteger[] powerSums(BigInteger[] weights, int spare, int first, int count) {
+        int n = weights.length - 1;
+        DivisionSweep sweep = new DivisionSweep(count, weights[0].bitLength() + spare + 1);
+        BigInteger[] sums = new BigInteger[count];
+        Arrays.fill(sums, BigInteger.ZERO);
+        for (int k = 0; k < n; k++) {
+            BigInteger base = BigInteger.valueOf(k + 1L);
+            BigInteger weight = weights[k + 1].shiftLeft(spare);
+            // the first power may be far longer than the weight: then every term is below one unit
+            BigInteger term = (double) first * (base.bitLength() - 1) > weight.bitLength()
+                    ? BigInteger.ZERO
+                    : weight.divide(base.pow(first));
+            long divisor = (k + 1L) * (k + 1L);
+            if (divisor < DivisionSweep.DIVISOR_LIMIT) {
+                sweep.add(term, (int) divisor);
+            } else {
+                for (int i = 0; i < count && term.signum() > 0; i++) {
+                    sums[i] = k % 2 == 0 ? sums[i].add(term) : sums[i].subtract(term);
+                    term = term.divide(BigInteger.valueOf(divisor));
+                }
+            }
+        }
+        BigInteger[] swept = sweep.results();
+        Arrays.setAll(sums, i -> sums[i].add(swept[i]));
+        return sums;
     }
 
     /** So many that 1/d_n < 2^(1 - 5n/2) is below 2^-(bits + GUARD). */
