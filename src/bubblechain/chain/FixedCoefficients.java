@@ -27,10 +27,11 @@ final class FixedCoefficients {
     private static final double LN2 = Math.log(2);
     private static final Rational INSIDE = Rational.of(15, 16);
     private static final int GUARD_BITS = 16;
-    private static final int STAGES = 5;
-    /** Below this precision, or so few terms, shortening the anomalous part costs more than it saves. */
-    private static final int STAGED_BITS = 1_200;
+    /** The anomalous part is computed in at most so many stages, one for each so many bits: measured, and flat. */
+    private static final int STAGES = 8;
 
+    private static final int BITS_PER_STAGE = 300;
+    /** Lists below this length are not worth a bound where to cut. */
     private static final int CUT_TERMS = 150;
     private static final int ESTIMATE_BITS = 64;
 
@@ -140,7 +141,7 @@ final class FixedCoefficients {
         List<FixedExpansion.Stage> stages = new ArrayList<>();
         double worth = bits;
         int from = 0;
-        int parts = bits < STAGED_BITS ? 1 : STAGES;
+        int parts = Math.max(1, Math.min(STAGES, bits / BITS_PER_STAGE));
         for (int part = parts; part >= 1; part--) {
             double start = worth;
             while (from < last && (part == 1 || worth > (double) bits * (part - 1) / parts)) {
