@@ -5,15 +5,16 @@ import bubblechain.kernel.KernelLibrary;
 import com.sun.management.OperatingSystemMXBean;
 import com.sun.management.ThreadMXBean;
 import java.lang.management.ManagementFactory;
+import java.lang.reflect.Field;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 
 /**
- * Prints what lists of certified coefficients cost in a warm virtual machine: processor time of all its threads, time on the
- * clock, bytes allocated, medians of several runs. Run it with {@code mvn -q -B -P bench test}; options in
- * {@code -Dbench.args="..."}:
+ * Prints what lists of certified coefficients cost in a warm virtual machine. Run it with {@code mvn -q -B -P bench test};
+ * options in {@code -Dbench.args="..."}:
  *
  * <pre>
  *   --kernels pole-mass,adler   which kernels
@@ -21,6 +22,10 @@ import java.util.Locale;
  *   --exact 20,30,40            lengths of exact lists, of the first kernel; "none" for none
  *   --repeat 5                  measurements of each, after a warm-up
  * </pre>
+ *
+ * <p>Medians of processor milliseconds of the computing thread and of all threads (the collector and the compiler too), time
+ * on the clock, megabytes allocated; growth is the ratio of thread times to the row above. The program keeps zeta values
+ * between lists of coefficients; they are forgotten before every run, so that each pays for its own.
  */
 public final class Benchmark {
     private static final OperatingSystemMXBean SYSTEM =
@@ -31,6 +36,8 @@ public final class Benchmark {
     /** Short jobs are run so many seconds per measurement: the clock of the processor ticks slowly. */
     private static final double SECONDS_AT_ONCE = 0.3;
 
+    private static final Map<?, ?> ZETA_TABLES = zetaTables();
+
     private List<String> kernels = List.of("pole-mass", "adler", "static-potential-r", "bjorken-gls", "cusp");
     private List<String> sizes = List.of("20x50", "100x100", "300x300", "1000x1000", "2000x2000");
     private List<String> exactLengths = List.of("20", "30", "40", "60");
@@ -38,13 +45,14 @@ public final class Benchmark {
 
     private Benchmark() {}
 
-    /** What one job cost, each number the median of its runs. */
-    private record Cost(double processor, double wall, double megabytes) {
-        static Cost median(List<Cost> runs) {
+    /** What one run cost: milliseconds, and megabytes. */
+    private record Cost(double thread, double process, double wall, double megabytes) {
+        static Cost median(List<Cost> costs) {
             return new Cost(
-                    middle(runs.stream().mapToDouble(Cost::processor).toArray()),
-                    middle(runs.stream().mapToDouble(Cost::wall).toArray()),
-                    middle(runs.stream().mapToDouble(Cost::megabytes).toArray()));
+                    middle(costs.stream().mapToDouble(Cost::thread).toArray()),
+                    middle(costs.stream().mapToDouble(Cost::process).toArray()),
+                    middle(costs.stream().mapToDouble(Cost::wall).toArray()),
+                    middle(costs.stream().mapToDouble(Cost::megabytes).toArray()));
         }
 
         private static double middle(double[] values) {
@@ -76,7 +84,7 @@ public final class Benchmark {
     }
 
     private void run() {
-        System.out.println("kernel               coefficients  digits  processor ms   wall ms  allocated MB   growth");
+        System.out.println("kernel               coefficients  digits  thread ms process ms   wall ms  allocated MB   growth");
         for (String kernel : kernels) {
             Chain chain = Chain.of(KernelLibrary.load(kernel));
             double before = 0;
@@ -85,7 +93,7 @@ public final class Benchmark {
                 int digits = Integer.parseInt(size.split("x")[1]);
                 Cost cost = measure(() -> chain.certified(loops, digits).size());
                 print(kernel, loops, String.valueOf(digits), cost, before);
-                before = cost.processor();
+                before = cost.thread();
             }
         }
         Chain chain = Chain.of(KernelLibrary.load(kernels.get(0)));
@@ -94,19 +102,20 @@ public final class Benchmark {
             int loops = Integer.parseInt(length);
             Cost cost = measure(() -> chain.exact(loops).size());
             print(kernels.get(0), loops, "exact", cost, before);
-            before = cost.processor();
+            before = cost.thread();
         }
     }
 
     private static void print(String kernel, int loops, String digits, Cost cost, double before) {
-        String growth = before == 0 ? "" : String.format(Locale.ROOT, "%9.1f", cost.processor() / before);
+        String growth = before == 0 ? "" : String.format(Locale.ROOT, "%9.1f", cost.thread() / before);
         System.out.println(String.format(
                 Locale.ROOT,
-                "%-20s %12d  %6s  %12.1f  %8.1f  %12.1f %s",
+                "%-20s %12d  %6s  %9.1f  %9.1f %9.1f  %12.1f %s",
                 kernel,
                 loops,
                 digits,
-                cost.processor(),
+                cost.thread(),
+                cost.process(),
                 cost.wall(),
                 cost.megabytes(),
                 growth));
@@ -117,11 +126,18 @@ public final class Benchmark {
         int run();
     }
 
+    private static void once(Job job) {
+        ZETA_TABLES.clear();
+        if (job.run() == 0) {
+            throw new IllegalStateException("no coefficients");
+        }
+    }
+
     private Cost measure(Job job) {
         long start = SYSTEM.getProcessCpuTime();
         int runs = 0;
         while (runs < 2 || processorSeconds(start) < WARM_UP_SECONDS) {
-            consume(job);
+            once(job);
             runs++;
         }
         int atOnce = (int) Math.max(1, Math.ceil(SECONDS_AT_ONCE * runs / processorSeconds(start)));
@@ -132,26 +148,32 @@ public final class Benchmark {
         return Cost.median(costs);
     }
 
+    private static Cost average(Job job, int runs) {
+        long allocated = THREADS.getThreadAllocatedBytes(Thread.currentThread().getId());
+        long clock = System.nanoTime();
+        long process = SYSTEM.getProcessCpuTime();
+        long thread = THREADS.getCurrentThreadCpuTime();
+        for (int i = 0; i < runs; i++) {
+            once(job);
+        }
+        return new Cost(
+                (THREADS.getCurrentThreadCpuTime() - thread) / 1e6 / runs,
+                processorSeconds(process) * 1e3 / runs,
+                (System.nanoTime() - clock) / 1e6 / runs,
+                (THREADS.getThreadAllocatedBytes(Thread.currentThread().getId()) - allocated) / 1e6 / runs);
+    }
+
     private static double processorSeconds(long since) {
         return (SYSTEM.getProcessCpuTime() - since) / 1e9;
     }
 
-    private static void consume(Job job) {
-        if (job.run() == 0) {
-            throw new IllegalStateException("no coefficients");
+    private static Map<?, ?> zetaTables() {
+        try {
+            Field tables = Class.forName("bubblechain.exact.ZetaFunctions").getDeclaredField("TABLES");
+            tables.setAccessible(true);
+            return (Map<?, ?>) tables.get(null);
+        } catch (ReflectiveOperationException e) {
+            throw new IllegalStateException("the zeta tables have moved", e);
         }
-    }
-
-    private static Cost average(Job job, int runs) {
-        long processor = SYSTEM.getProcessCpuTime();
-        long allocated = THREADS.getThreadAllocatedBytes(Thread.currentThread().getId());
-        long wall = System.nanoTime();
-        for (int i = 0; i < runs; i++) {
-            consume(job);
-        }
-        return new Cost(
-                (SYSTEM.getProcessCpuTime() - processor) / 1e6 / runs,
-                (System.nanoTime() - wall) / 1e6 / runs,
-                (THREADS.getThreadAllocatedBytes(Thread.currentThread().getId()) - allocated) / 1e6 / runs);
     }
 }
