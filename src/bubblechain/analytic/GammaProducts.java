@@ -13,6 +13,7 @@ import bubblechain.series.PowerSums;
 import java.util.Arrays;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.Optional;
 
 /**
  * e^(alpha u) prod Gamma(s + b u)^m as fixed-point series in v = u/rho, the poles and zeros with |u| &lt; r rho taken out.
@@ -23,6 +24,7 @@ import java.util.Map;
  */
 final class GammaProducts {
     private static final int GUARD_BITS = 32;
+    private static final double LN2 = Math.log(2);
 
     private final Rational radius;
     private final int length;
@@ -31,6 +33,8 @@ final class GammaProducts {
     private final int removal;
     private final BallRing ring;
     private final Map<TermKey, Known> products = new HashMap<>();
+    /** Polygammas want zeta values up to the last order, products of gammas do not. */
+    private Optional<BallRing> polygammaRing = Optional.empty();
 
     /** @param extraBits precision of the logarithms beyond the limbs, where large parts of them cancel */
     GammaProducts(Rational radius, int length, int limbs, int extraBits) {
@@ -39,7 +43,7 @@ final class GammaProducts {
         this.limbs = limbs;
         this.bits = FixedSeries.bits(limbs) + GUARD_BITS + extraBits;
         this.removal = removalRadius(limbs);
-        this.ring = BallRing.of(bits, length + 2);
+        this.ring = BallRing.of(bits, Math.min(length + 2, (int) (bits * LN2 / Math.log(removal)) + GUARD_BITS));
     }
 
     /**
@@ -187,6 +191,8 @@ final class GammaProducts {
     FixedSeries polygamma(PolygammaFactor factor, Stage stage) {
         FixedValues values = new FixedValues(length, limbs);
         int n = factor.n();
+        BallRing ring = polygammaRing.orElseGet(() -> BallRing.of(bits, length + n + 2));
+        polygammaRing = Optional.of(ring);
         Rational step = factor.slope().multiply(radius);
         Ball weight = Ball.of(ExactFunctions.factorial(n));
         for (int k = 0; k < length; k++) {

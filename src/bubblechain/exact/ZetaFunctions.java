@@ -10,6 +10,8 @@ import java.util.TreeMap;
 /** Riemann's zeta function at integers: Bernoulli numbers at small even arguments, otherwise Borwein's sum. */
 final class ZetaFunctions {
     private static final int GUARD = 24;
+    /** A new table has this part more bits than asked for. */
+    private static final int ROOM = 6;
     /** Up to here the Bernoulli numbers are cheaper than the alternating sum. */
     private static final int LARGEST_BERNOULLI_INDEX = 1000;
     /** Tables by precision, from index 0; guarded by itself. */
@@ -43,9 +45,11 @@ final class ZetaFunctions {
                     return rounded(known, max, bits);
                 }
             }
-            Ball[] fresh = freshTable(max, bits);
-            forgetSmaller(max, bits);
-            TABLES.put(bits, fresh);
+            // a little more than asked for: the next request is often for a few more bits
+            int roomy = bits + bits / ROOM + GUARD;
+            Ball[] fresh = freshTable(max, roomy);
+            forgetSmaller(max, roomy);
+            TABLES.put(roomy, fresh);
             return rounded(fresh, max, bits);
         }
     }
