@@ -27,7 +27,7 @@ import java.util.Optional;
  */
 public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift) {
     /** Bits that may be lost on the way: error bounds are doubles and end at 2^1023 units. */
-    private static final int LARGEST_LOSS = 400;
+    private static final int LARGEST_LOSS = 900;
 
     public FixedExpansion {
         coefficients = List.copyOf(coefficients);

@@ -11,7 +11,7 @@ import java.util.TreeMap;
 final class ZetaFunctions {
     private static final int GUARD = 24;
     /** A new table has this part more bits than asked for. */
-    private static final int ROOM = 6;
+    private static final int ROOM = 8;
     /** Up to here the Bernoulli numbers are cheaper than the alternating sum. */
     private static final int LARGEST_BERNOULLI_INDEX = 1000;
     /** Tables by precision, from index 0; guarded by itself. */
