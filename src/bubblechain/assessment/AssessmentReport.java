@@ -52,7 +52,7 @@ public final class AssessmentReport {
         ChainOptions options = ChainOptions.DEFAULT.withFlavours(nf);
         Report.Builder report = Report.builder("assess")
                 .request("kernel", kernel.name())
-                .request("series", series.map(PerturbativeSeries::name).orElse(none(kernel)))
+                .request("series", series.map(PerturbativeSeries::name).orElse("none"))
                 .request("nf", Integer.toString(nf))
                 .request("loops", Integer.toString(loops))
                 .request("range", range.toString());

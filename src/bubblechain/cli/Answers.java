@@ -45,25 +45,25 @@ final class Answers {
         return KernelReport.list(search);
     }
 
-    static Report kernel(String name) {
-        return KernelReport.describe(KernelLibrary.load(name));
+    static Report kernel(String name, FamilyOption family) {
+        return asked(KernelReport.describe(KernelLibrary.load(name, parameters(family))), parameterEntries(family));
     }
 
     static Report coefficients(CoefficientsCommand c) {
         ChainOptions options = options(c.scales, Coupling.parse(c.coupling), Normalisation.parse(c.normalise));
-        Kernel kernel = KernelLibrary.load(c.name, parameters(c.scales));
+        Kernel kernel = KernelLibrary.load(c.name, parameters(c.family));
         Report report = CoefficientReport.of(
                 c.anomalousDimension ? kernel.anomalousDimensionAsKernel() : kernel, options, c.loops, c.digits, c.exact,
                 c.flavourTerms);
-        return asked(report, parameterEntries(c.scales));
+        return asked(report, parameterEntries(c.family));
     }
 
     static Report poles(PolesCommand c) {
         ChainOptions options = options(c.scales, Coupling.A, Normalisation.PREFACTOR);
-        Kernel kernel = KernelLibrary.load(c.name, parameters(c.scales));
+        Kernel kernel = KernelLibrary.load(c.name, parameters(c.family));
         Report report = PolesReport.of(
                 kernel, options, rational("--from", c.from), rational("--to", c.to), c.digits, c.shareOf);
-        return asked(report, parameterEntries(c.scales));
+        return asked(report, parameterEntries(c.family));
     }
 
     static Report residue(ResidueCommand c) {
@@ -72,8 +72,10 @@ final class Answers {
         if (!c.chain) {
             return asked(ResidueReport.of(SumRule.evaluate(seriesRequest(c))), flags);
         }
-        Kernel kernel = KernelLibrary.load(c.name);
-        return asked(ChainSumRule.report(kernel, chainRequest(c, kernel)), flags);
+        Kernel kernel = KernelLibrary.load(c.name, parameters(c.family));
+        Map<String, String> entries = new TreeMap<>(flags);
+        entries.putAll(parameterEntries(c.family));
+        return asked(ChainSumRule.report(kernel, chainRequest(c, kernel)), entries);
     }
 
     /** A report with more entries in its request. */
@@ -84,13 +86,16 @@ final class Answers {
                 report.command(), request, report.normalisation(), report.blocks(), report.sources(), report.cautions());
     }
 
-    private static Map<String, String> parameterEntries(ScaleOptions s) {
+    private static Map<String, String> parameterEntries(FamilyOption family) {
         Map<String, String> entries = new LinkedHashMap<>();
-        s.parameters.forEach((name, value) -> entries.put("parameter_" + name, value));
+        family.parameters.forEach((name, value) -> entries.put("parameter_" + name, value));
         return entries;
     }
 
     private static SumRuleRequest seriesRequest(ResidueCommand c) {
+        if (!c.family.parameters.isEmpty()) {
+            throw new DomainException("--parameter needs --chain: a published series has no parameters");
+        }
         if (c.removeNearer) {
             throw new DomainException("--remove-nearer needs --chain: only there are the residues of nearer poles exact");
         }
@@ -117,13 +122,14 @@ final class Answers {
     }
 
     static Report crosscheck(CrosscheckCommand c) {
-        Kernel kernel = KernelLibrary.load(chosen(c.kernel, c.name, "--kernel"));
+        Kernel kernel = KernelLibrary.load(chosen(c.kernel, c.name, "--kernel"), parameters(c.family));
         String series = c.series != null || c.name != null
                 ? chosen(c.series, c.name, "--series")
                 : kernel.series().orElseThrow(() -> new DomainException(
                         "the kernel " + kernel.name() + " names no series; give --series"));
-        return CrossCheckReport.of(
+        Report report = CrossCheckReport.of(
                 CrossCheck.of(kernel, SeriesLibrary.find(series), c.nf, optionalRational("--power", c.power)));
+        return asked(report, parameterEntries(c.family));
     }
 
     private static String chosen(@Nullable String given, @Nullable String name, String option) {
@@ -134,11 +140,12 @@ final class Answers {
     }
 
     static Report assess(AssessCommand c) {
-        Kernel kernel = KernelLibrary.load(c.name);
+        Kernel kernel = KernelLibrary.load(c.name, parameters(c.family));
         Optional<PerturbativeSeries> published = c.series == null
                 ? kernel.series().flatMap(SeriesLibrary::builtIn)
                 : Optional.of(SeriesLibrary.find(c.series));
-        return AssessmentReport.of(kernel, published, c.nf, c.loops, rational("--range", c.range));
+        Report report = AssessmentReport.of(kernel, published, c.nf, c.loops, rational("--range", c.range));
+        return asked(report, parameterEntries(c.family));
     }
 
     static Report validate(@Nullable String path) {
@@ -161,9 +168,9 @@ final class Answers {
                 optional(s.couplingNf));
     }
 
-    private static Map<String, Rational> parameters(ScaleOptions s) {
+    private static Map<String, Rational> parameters(FamilyOption family) {
         Map<String, Rational> values = new LinkedHashMap<>();
-        s.parameters.forEach((name, value) -> values.put(name, rational("--parameter " + name, value)));
+        family.parameters.forEach((name, value) -> values.put(name, rational("--parameter " + name, value)));
         return values;
     }
 

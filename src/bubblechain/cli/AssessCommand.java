@@ -4,6 +4,7 @@ import bubblechain.report.Report;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -39,6 +40,9 @@ final class AssessCommand extends ReportCommand {
 
     @Option(names = "--series", paramLabel = "FILE", description = "published series; default: the one the kernel names")
     @Nullable String series;
+
+    @Mixin
+    FamilyOption family = new FamilyOption();
 
     @Override
     List<Example> examples() {

@@ -62,6 +62,9 @@ final class CoefficientsCommand extends ReportCommand {
     @Mixin
     ScaleOptions scales = new ScaleOptions();
 
+    @Mixin
+    FamilyOption family = new FamilyOption();
+
     @Override
     List<Example> examples() {
         return List.of(

@@ -4,6 +4,7 @@ import bubblechain.report.Report;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -35,6 +36,9 @@ final class CrosscheckCommand extends ReportCommand {
 
     @Option(names = "--power", paramLabel = "p", description = "p = 2 u0; default: the leading singularity of the series")
     @Nullable String power;
+
+    @Mixin
+    FamilyOption family = new FamilyOption();
 
     @Override
     List<Example> examples() {

@@ -4,6 +4,7 @@ import bubblechain.report.Report;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -20,6 +21,9 @@ final class KernelsCommand extends ReportCommand {
     @Option(names = "--search", paramLabel = "WORD", defaultValue = "", description = "list only kernels with this word")
     String search = "";
 
+    @Mixin
+    FamilyOption family = new FamilyOption();
+
     @Override
     List<Example> examples() {
         return List.of(
@@ -28,6 +32,6 @@ final class KernelsCommand extends ReportCommand {
 
     @Override
     Report report() {
-        return name == null ? Answers.kernels(search) : Answers.kernel(name);
+        return name == null ? Answers.kernels(search) : Answers.kernel(name, family);
     }
 }

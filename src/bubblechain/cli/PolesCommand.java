@@ -47,6 +47,9 @@ final class PolesCommand extends ReportCommand {
     @Mixin
     ScaleOptions scales = new ScaleOptions();
 
+    @Mixin
+    FamilyOption family = new FamilyOption();
+
     @Override
     List<Example> examples() {
         return List.of(new Example("poles pole-mass --from -4 --to 6", "all poles from u = -4 to u = 6"));

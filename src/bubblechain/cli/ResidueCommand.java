@@ -4,6 +4,7 @@ import bubblechain.report.Report;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -53,6 +54,9 @@ final class ResidueCommand extends ReportCommand {
 
     @Option(names = "--remove-nearer", description = "with --chain: take out all nearer poles exactly first")
     boolean removeNearer;
+
+    @Mixin
+    FamilyOption family = new FamilyOption();
 
     @Override
     List<Example> examples() {

@@ -1,7 +1,5 @@
 package bubblechain.cli;
 
-import java.util.LinkedHashMap;
-import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Option;
 
@@ -41,10 +39,4 @@ final class ScaleOptions {
             defaultValue = "msbar",
             description = "scheme of the coupling: msbar or v; default ${DEFAULT-VALUE}")
     String scheme = "msbar";
-
-    @Option(
-            names = "--parameter",
-            paramLabel = "NAME=VALUE",
-            description = "value of a parameter of a family, such as moment=4; may be repeated")
-    Map<String, String> parameters = new LinkedHashMap<>();
 }
