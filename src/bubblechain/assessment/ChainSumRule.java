@@ -2,6 +2,7 @@ package bubblechain.assessment;
 
 import bubblechain.borel.BorelPlane;
 import bubblechain.borel.BorelPole;
+import bubblechain.borel.ChainPole;
 import bubblechain.chain.Chain;
 import bubblechain.chain.ChainOptions;
 import bubblechain.chain.CoefficientReport;
@@ -14,7 +15,6 @@ import bubblechain.kernel.Kernel;
 import bubblechain.kernel.SingularityNote;
 import bubblechain.qcd.Theory;
 import bubblechain.report.Report;
-import bubblechain.sumrule.ChainPole;
 import bubblechain.sumrule.Obstacle;
 import bubblechain.sumrule.ResidueReport;
 import bubblechain.sumrule.SumRule;
@@ -115,8 +115,8 @@ public final class ChainSumRule {
     private static List<ChainPole> laurentTerms(List<BorelPole> poles, Rational u) {
         List<ChainPole> terms = new ArrayList<>();
         for (BorelPole pole : poles) {
-            for (int k = 1; k <= pole.pole().order() && isNearer(pole, u); k++) {
-                terms.add(new ChainPole(pole.u(), k, pole.pole().coefficient(-k)));
+            if (isNearer(pole, u)) {
+                terms.addAll(pole.terms());
             }
         }
         return terms;
@@ -125,7 +125,7 @@ public final class ChainSumRule {
     /** The strongest Laurent term of a pole stands for it. */
     private static Obstacle obstacle(BorelPole pole, boolean removed) {
         int order = pole.pole().order();
-        ChainPole leading = new ChainPole(pole.u(), order, pole.pole().coefficient(-order));
+        ChainPole leading = pole.terms().get(order - 1);
         Singularity.Kind kind = pole.kind() == SingularityNote.Kind.IR ? Singularity.Kind.IR : Singularity.Kind.UV;
         String operator = pole.note().flatMap(SingularityNote::operator).orElse("");
         return new Obstacle(

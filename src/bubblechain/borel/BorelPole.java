@@ -3,10 +3,9 @@ package bubblechain.borel;
 import bubblechain.analytic.Pole;
 import bubblechain.exact.Ball;
 import bubblechain.exact.ExactConstant;
-import bubblechain.exact.ExactFunctions;
 import bubblechain.exact.Rational;
 import bubblechain.kernel.SingularityNote;
-import java.math.BigInteger;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
@@ -43,35 +42,26 @@ public record BorelPole(Pole pole, Optional<SingularityNote> note) {
         return "(" + hard + ")^" + (exponent.isInteger() ? exponent.toString() : "(" + exponent + ")");
     }
 
+    /** Its Laurent terms, those of (u - u0)^(-1), (u - u0)^(-2), ... in this order. */
+    public List<ChainPole> terms() {
+        List<ChainPole> terms = new ArrayList<>();
+        for (int k = 1; k <= pole.order(); k++) {
+            terms.add(new ChainPole(u(), k, pole.coefficient(-k)));
+        }
+        return terms;
+    }
+
     /** K, the strength of K (1 - u/u0)^(-1) for a simple pole: K = -R/u0. */
     public Optional<ExactConstant> strength() {
-        return pole.order() == 1
-                ? Optional.of(pole.residue().divide(u()).negate())
-                : Optional.empty();
+        return pole.order() == 1 ? Optional.of(terms().get(0).strength()) : Optional.empty();
     }
 
-    /**
-     * The share of this pole in c_n: n! [u^n] sum_k R_k (u - u0)^(-k) = n! sum_k R_k (-1)^k C(n+k-1, n) u0^(-n-k).
-     */
+    /** The share of this pole in c_n, the sum of the parts of its Laurent terms. */
     public Ball share(int n, int bits) {
-        List<Ball> laurent = pole.balls(bits);
-        Rational factorial = Rational.of(ExactFunctions.factorial(n));
         Ball sum = Ball.ZERO;
-        for (int k = 1; k <= pole.order(); k++) {
-            Rational weight = Rational.of(binomial(n + k - 1, k - 1))
-                    .multiply(u().power(-n - k))
-                    .multiply(factorial);
-            Ball term = laurent.get(pole.order() - k).multiply(k % 2 == 0 ? weight : weight.negate(), bits);
-            sum = sum.add(term, bits);
+        for (ChainPole term : terms()) {
+            sum = sum.add(term.part(n).toBall(bits), bits);
         }
         return sum;
-    }
-
-    private static BigInteger binomial(int n, int k) {
-        BigInteger result = BigInteger.ONE;
-        for (int j = 1; j <= k; j++) {
-            result = result.multiply(BigInteger.valueOf(n - k + j)).divide(BigInteger.valueOf(j));
-        }
-        return result;
     }
 }

@@ -16,7 +16,7 @@ import java.util.Optional;
  * and rounding; that the chain is a model of the full series it does not cover.
  */
 public final class Chain {
-    /** Largest number of coefficients by the ball route. */
+    /** Largest number of coefficients as decimals. */
     public static final int LARGEST_LOOPS = 10_000;
     /** Largest number of coefficients in exact form. */
     public static final int LARGEST_EXACT_LOOPS = 80;

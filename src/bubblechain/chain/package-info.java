@@ -3,9 +3,9 @@
  *
  * <p>{@link bubblechain.chain.Chain} is the entry. {@link bubblechain.chain.Scales} says where the coupling and the
  * operator are renormalised: changing the coupling's scale multiplies all of B(u) by e^(L u), changing the operator's
- * scale with it multiplies only the unsubtracted part. {@link bubblechain.chain.ExactCoefficients} and
- * {@link bubblechain.chain.BallCoefficients} are two routes to the same numbers; {@link bubblechain.chain.Rendering}
- * turns them into the coupling and normalisation asked for.
+ * scale with it multiplies only the unsubtracted part. {@link bubblechain.chain.ExactCoefficients},
+ * {@link bubblechain.chain.BallCoefficients} and {@link bubblechain.chain.FixedCoefficients} are three routes to the same
+ * numbers, for closed forms, short lists and long ones; {@link bubblechain.chain.Rendering} turns them into the coupling and normalisation asked for.
  */
 @NullMarked
 package bubblechain.chain;

@@ -20,7 +20,7 @@ final class FixedDigits {
     private static final long WORD_MASK = (1L << WORD) - 1;
     /**
      * The integer digit must stay within this; beyond it the computation is given up. 64 times as much, which
-     * {@link #combination} can make of it,, still fits a long.
+     * {@link #combination} can make of it, still fits a long.
      */
     static final long LARGEST = 1L << 56;
 

@@ -72,10 +72,6 @@ public final class FixedSeries {
         return new FixedSeries(limbs, digits, new double[length]);
     }
 
-    public static FixedSeries zero(int length, int limbs) {
-        return new FixedSeries(limbs, new long[length][limbs + 1], new double[length]);
-    }
-
     public int length() {
         return digits.length;
     }

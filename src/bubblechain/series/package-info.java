@@ -6,6 +6,9 @@
  * {@link bubblechain.series.CoefficientwiseAlgebra} works coefficient by coefficient over a
  * {@link bubblechain.series.CoefficientRing}: exact constants or balls. {@link bubblechain.series.DualAlgebra} adds to
  * any algebra a second variable t with t^2 = 0.
+ *
+ * <p>{@link bubblechain.series.FixedSeries} is the fast representation for long lists: fixed-point numbers at one common
+ * scale with an error bound beside each.
  */
 @NullMarked
 package bubblechain.series;

@@ -256,7 +256,6 @@ class FixedSeriesBoundsTest {
             assertThat(moved.error(k)).isEqualTo(k < 3 ? 0 : a.series().error(k - 3));
         }
         assertThat(a.series().first(4).length()).isEqualTo(4);
-        assertThat(FixedSeries.zero(3, 2).integer(2)).isZero();
     }
 
     @Test

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
+import bubblechain.borel.ChainPole;
 import bubblechain.exact.Ball;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;

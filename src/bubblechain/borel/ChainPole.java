@@ -1,4 +1,4 @@
-package bubblechain.sumrule;
+package bubblechain.borel;
 
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
