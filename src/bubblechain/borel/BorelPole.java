@@ -32,7 +32,7 @@ public record BorelPole(Pole pole, Optional<SingularityNote> note) {
             return note.get().power().get();
         }
         if (u().signum() < 0) {
-            return "none (sign-alternating growth)";
+            return "none";
         }
         Rational exponent = u().multiply(2);
         String hard = scale.startsWith("1/") ? "Lambda*" + scale.substring(2) : "Lambda/" + scale;

@@ -66,11 +66,12 @@ public final class PolesReport {
         return report.build();
     }
 
-    /** For a reader simple poles have their residue in the row; JSON and CSV always have the list of Laurent coefficients. */
+    /** For a reader simple poles have their residue in the row; JSON and CSV have order and Laurent coefficients always. */
     private static Table table(List<BorelPole> poles, Kernel kernel, int digits) {
-        boolean simple = poles.stream().allMatch(p -> p.pole().order() == 1);
+        boolean simple = !poles.isEmpty() && poles.stream().allMatch(p -> p.pole().order() == 1);
+        Column order = Column.of("order", "order");
         List<Column> columns = new ArrayList<>(List.of(
-                Column.of("u", "u0"), Column.of("order", "order"), Column.of("status", "status"),
+                Column.of("u", "u0"), simple ? order.dataOnly() : order, Column.of("status", "status"),
                 Column.of("kind", "kind"), Column.of("power", "p"),
                 Column.of("power_correction", "relative power correction"), Column.of("operator", "operator")));
         Column coefficients = Column.of("laurent", "Laurent coefficients");
@@ -98,7 +99,7 @@ public final class PolesReport {
             }
             rows.add(row);
         }
-        return new Table("poles", "Poles of B(u); p = 2 u0", columns, rows);
+        return new Table("poles", simple ? "Poles of B(u), all simple; p = 2 u0" : "Poles of B(u); p = 2 u0", columns, rows);
     }
 
     private static Table laurent(BorelPole pole, int digits) {
