@@ -4,10 +4,9 @@ Usage: python3 kernel_coefficients.py OUTPUT.csv
 Two computations: PARI/GP power series about u = 0, and mpmath from values on a circle. Only numbers on which both agree to
 the digits printed are written; a disagreement stops the program."""
 import sys
-import mpmath
 from mpmath import mp, mpf
+import agreement
 import kernels
-import pari
 
 DIGITS = 100
 ORDERS = list(range(31)) + [40, 60]
@@ -63,15 +62,6 @@ def value(text):
     return mp.exp(-mp.euler) if "euler" in text else mpf(int(text.split("/")[0])) / int((text + "/1").split("/")[1])
 
 
-def exponential_weights(x):
-    """Taylor coefficients of (x^2)^u."""
-    return [(2 * mp.log(x)) ** n / mp.factorial(n) for n in range(TERMS)]
-
-
-def multiplied(a, b):
-    return [mp.fsum(a[k] * b[n - k] for k in range(n + 1)) for n in range(TERMS)]
-
-
 def by_circle(job, cache):
     """c_0 .. c_60 from mpmath."""
     name, x_text, y_text, _, function, radius = job
@@ -82,14 +72,14 @@ def by_circle(job, cache):
             anomalous = kernels.borel_weights(kernels.taylor(kernels.gamma_m_half, mpf(5) / 4, 640, TERMS))
             cache[name] = (on_shell, anomalous)
         on_shell, anomalous = cache[name]
-        whole = multiplied(exponential_weights(x), on_shell)
-        counter = multiplied(exponential_weights(x / y), anomalous)
+        whole = agreement.multiplied(agreement.exponential_weights(x, TERMS), on_shell)
+        counter = agreement.multiplied(agreement.exponential_weights(x / y, TERMS), anomalous)
         borel = [a - b for a, b in zip(whole[1:], counter[1:])]
     else:
         if name not in cache:
             plain = kernels.taylor(function, radius or mpf(5) / 4, 640, TERMS)
             cache[name] = plain if radius else kernels.borel_weights(plain)
-        borel = multiplied(exponential_weights(x), cache[name])
+        borel = agreement.multiplied(agreement.exponential_weights(x, TERMS), cache[name])
     return [mp.factorial(n) * borel[n] for n in range(61)]
 
 
@@ -107,24 +97,7 @@ HEADER = """# Bubble-chain coefficients c_n of seven kernels, 100 significant di
 
 def main(path):
     mp.dps = 220
-    source = "PARI/GP %s power series and mpmath %s circle agree; tests/referee/kernel_coefficients.py" % (
-        pari.version(), mpmath.__version__)
-    work = jobs()
-    output = pari.run(SCRIPT + "\n".join("show(%s);" % j[3] for j in work) + "\n")
-    rows, cache, worst = [], {}, mpf(0)
-    for job, line in zip(work, output.strip().split("\n")):
-        series = [mpf(s.replace(" E", "e")) for s in line.strip("[]").split(", ")]
-        circle = by_circle(job, cache)
-        for n in ORDERS:
-            difference = abs(series[n] - circle[n]) / abs(series[n])
-            worst = max(worst, difference)
-            if difference > mpf(10) ** -(DIGITS + 8):
-                raise ValueError("%s n=%d: relative difference %s" % (job[:3], n, mp.nstr(difference, 5)))
-            text = mp.nstr(series[n], DIGITS, strip_zeros=False, min_fixed=-4, max_fixed=99)
-            rows.append("%s,%s,%s,%d,%s,%s" % (job[0], job[1], job[2], n, text, source))
-    with open(path, "w") as out:
-        out.write(HEADER + "kernel,mu_over_scale,operator_mu_over_scale,n,value,source\n" + "\n".join(rows) + "\n")
-    print(len(rows), "rows, largest relative difference", mp.nstr(worst, 3))
+    agreement.write(path, HEADER, "kernel_coefficients.py", SCRIPT, jobs(), by_circle, ORDERS, DIGITS)
 
 
 if __name__ == "__main__":

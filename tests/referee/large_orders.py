@@ -4,10 +4,9 @@ Usage: python3 large_orders.py OUTPUT.csv
 Two computations: PARI/GP power series about u = 0, and mpmath from values on a circle. Only numbers on which both agree to
 the digits printed are written; a disagreement stops the program."""
 import sys
-import mpmath
 from mpmath import mp, mpf
+import agreement
 import kernels
-import pari
 
 DIGITS = 211
 ORDERS = [0, 1, 19, 20, 40, 41, 100, 135, 136]
@@ -51,15 +50,6 @@ def value(text):
     return mpf(int(text.split("/")[0])) / int((text + "/1").split("/")[1])
 
 
-def exponential_weights(x):
-    """Taylor coefficients of (x^2)^u."""
-    return [(2 * mp.log(x)) ** n / mp.factorial(n) for n in range(TERMS)]
-
-
-def multiplied(a, b):
-    return [mp.fsum(a[k] * b[n - k] for k in range(n + 1)) for n in range(TERMS)]
-
-
 def by_circle(job, cache):
     """c_0 .. c_136 from mpmath."""
     name, x_text, y_text, _, function, radius = job
@@ -69,13 +59,13 @@ def by_circle(job, cache):
             cache[name] = (kernels.taylor(kernels.pole_mass_on_shell, mpf(1) / 4, POINTS, TERMS),
                            kernels.borel_weights(kernels.taylor(kernels.gamma_m_half, mpf(5) / 4, POINTS, TERMS)))
         on_shell, anomalous = cache[name]
-        whole = multiplied(exponential_weights(x), on_shell)
-        counter = multiplied(exponential_weights(x / y), anomalous)
+        whole = agreement.multiplied(agreement.exponential_weights(x, TERMS), on_shell)
+        counter = agreement.multiplied(agreement.exponential_weights(x / y, TERMS), anomalous)
         borel = [a - b for a, b in zip(whole[1:], counter[1:])]
     elif name == "cusp":
         borel = kernels.borel_weights(kernels.taylor(kernels.cusp, mpf(5) / 4, POINTS, TERMS))
     else:
-        borel = multiplied(exponential_weights(x), kernels.taylor(function, radius, POINTS, TERMS))
+        borel = agreement.multiplied(agreement.exponential_weights(x, TERMS), kernels.taylor(function, radius, POINTS, TERMS))
     return [mp.factorial(n) * borel[n] for n in range(ORDERS[-1] + 1)]
 
 
@@ -87,23 +77,7 @@ HEADER = """# Bubble-chain coefficients c_n of six kernels at high orders, 211 s
 
 def main(path):
     mp.dps = 500
-    source = "PARI/GP %s power series and mpmath %s circle agree; tests/referee/large_orders.py" % (
-        pari.version(), mpmath.__version__)
-    output = pari.run(SCRIPT + "\n".join("show(%s);" % j[3] for j in JOBS) + "\n")
-    rows, cache, worst = [], {}, mpf(0)
-    for job, line in zip(JOBS, output.strip().split("\n")):
-        series = [mpf(s.replace(" E", "e")) for s in line.strip("[]").split(", ")]
-        circle = by_circle(job, cache)
-        for n in ORDERS:
-            difference = abs(series[n] - circle[n]) / abs(series[n])
-            worst = max(worst, difference)
-            if difference > mpf(10) ** -(DIGITS + 8):
-                raise ValueError("%s n=%d: relative difference %s" % (job[:3], n, mp.nstr(difference, 5)))
-            text = mp.nstr(series[n], DIGITS, strip_zeros=False, min_fixed=-4, max_fixed=99)
-            rows.append("%s,%s,%s,%d,%s,%s" % (job[0], job[1], job[2], n, text, source))
-    with open(path, "w") as out:
-        out.write(HEADER + "kernel,mu_over_scale,operator_mu_over_scale,n,value,source\n" + "\n".join(rows) + "\n")
-    print(len(rows), "rows, largest relative difference", mp.nstr(worst, 3))
+    agreement.write(path, HEADER, "large_orders.py", SCRIPT, JOBS, by_circle, ORDERS, DIGITS)
 
 
 if __name__ == "__main__":
