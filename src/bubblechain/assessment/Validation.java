@@ -14,6 +14,7 @@ import bubblechain.fixedorder.SeriesLibrary;
 import bubblechain.kernel.Kernel;
 import bubblechain.kernel.KernelCheck;
 import bubblechain.kernel.KernelLibrary;
+import bubblechain.kernel.SudakovSubtraction;
 import bubblechain.toml.TomlFile;
 import java.io.IOException;
 import java.io.UncheckedIOException;
@@ -158,7 +159,9 @@ public final class Validation {
         KernelCheck.SameAs same = (KernelCheck.SameAs) check;
         Kernel other = KernelLibrary.load(same.kernel());
         boolean equal = equal(kernel.transform(), other.transform())
-                && equal(kernel.anomalousDimension(), other.anomalousDimension());
+                && equal(kernel.anomalousDimension(), other.anomalousDimension())
+                && equal(kernel.sudakov().map(SudakovSubtraction::cusp), other.sudakov().map(SudakovSubtraction::cusp))
+                && equal(kernel.sudakov().map(SudakovSubtraction::slope), other.sudakov().map(SudakovSubtraction::slope));
         return new Finding(
                 file, "the same as " + same.kernel(), equal, equal ? "identical normal forms" : "the normal forms differ");
     }

@@ -66,7 +66,7 @@ public record PoleShares(
 
     /** c_n minus n! [u^n] e^(L u) T(u): what the entire subtraction contributes. */
     private static Ball entirePart(Kernel kernel, Scales scales, Ball total, int n, int bits) {
-        if (kernel.anomalousDimension().isEmpty() || kernel.transform().isEmpty()) {
+        if (!kernel.isRenormalised() || kernel.transform().isEmpty()) {
             return Ball.ZERO;
         }
         LaurentSeries<Ball> transform = kernel.transform().get()

@@ -68,7 +68,7 @@ public record ChainOptions(
     /** The logarithms of the two scales. @throws DomainException if a ratio is not positive or flavours do not fit */
     public Scales scales(Kernel kernel) {
         Scales scales = Scales.of(ratio("--mu-over-scale", muOverScale), ratio("--operator-mu-over-scale", operatorMuOverScale));
-        if (!scales.operatorLog().isZero() && (kernel.anomalousDimension().isEmpty() || kernel.isAnomalousDimension())) {
+        if (!scales.operatorLog().isZero() && (!kernel.isRenormalised() || kernel.isAnomalousDimension())) {
             throw new DomainException("the kernel " + kernel.name() + " has no operator to renormalise;"
                     + " --operator-mu-over-scale must stay 1");
         }
@@ -185,7 +185,7 @@ public record ChainOptions(
         String front = normalisation == Normalisation.FULL
                 ? ""
                 : normalisation == Normalisation.FIRST ? "(first coefficient) " : kernel.prefactor().words() + " ";
-        String operator = operatorMuOverScale.equals("1") || kernel.anomalousDimension().isEmpty()
+        String operator = operatorMuOverScale.equals("1") || !kernel.isRenormalised()
                 ? ""
                 : "; operator renormalised at " + scaled(operatorMuOverScale, kernel.scale()) + " instead";
         String decoupling = countsHeavyQuark(kernel)

@@ -57,6 +57,9 @@ final class EnumeratedCoefficients {
      * @throws DomainException if there are more terms
      */
     static Optional<List<ExactConstant>> of(Kernel kernel, int loops, Scales scales, int mostTerms) {
+        if (kernel.sudakov().isPresent()) {
+            return Optional.empty();
+        }
         EnumeratedCoefficients coefficients = new EnumeratedCoefficients(loops, mostTerms);
         boolean graded = kernel.transform().isPresent()
                 ? coefficients.addTransform(kernel.transform().get().timesExponential(scales.couplingLog()))

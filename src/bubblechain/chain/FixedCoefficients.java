@@ -10,9 +10,11 @@ import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Magnitude;
 import bubblechain.exact.Rational;
 import bubblechain.kernel.Kernel;
+import bubblechain.kernel.SudakovSubtraction;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
 
 /**
  * Coefficients as balls on the fixed-point route. With T(rho v) = sum x_n v^n and
@@ -44,12 +46,7 @@ final class FixedCoefficients {
     /** Empty if this route cannot take the kernel. */
     Optional<List<Ball>> coefficients(Kernel kernel, int loops, Scales scales) {
         if (kernel.transform().isEmpty()) {
-            return scales.couplingLog().isZero()
-                    ? kernel.anomalousDimension()
-                            .flatMap(AnalyticFunction::normalForm)
-                            .flatMap(form -> FixedExpansion.of(form, loops, bits))
-                            .map(expansion -> unscaled(expansion, loops))
-                    : Optional.empty();
+            return scales.couplingLog().isZero() ? anomalousDimension(kernel, loops) : Optional.empty();
         }
         Optional<NormalForm> form = kernel.transform().get()
                 .timesExponential(scales.couplingLog())
@@ -62,9 +59,12 @@ final class FixedCoefficients {
         for (int n = 0; n < loops; n++) {
             scaled.add(transform.get().scaled(n));
         }
-        if (kernel.anomalousDimension().isPresent()) {
-            Optional<List<Ball>> subtraction = subtraction(
-                    kernel.anomalousDimension().get(), loops, scales.subtractionLog(), transform.get().radius());
+        if (kernel.isRenormalised()) {
+            Optional<List<Ball>> subtraction = kernel.sudakov().isPresent()
+                    ? doubleSubtraction(kernel.sudakov().get(), loops, scales, transform.get().radius())
+                    : subtraction(
+                            kernel.anomalousDimension().orElseThrow(), loops, scales.subtractionLog(),
+                            transform.get().radius());
             if (subtraction.isEmpty()) {
                 return Optional.empty();
             }
@@ -73,6 +73,18 @@ final class FixedCoefficients {
             }
         }
         return Optional.of(weighted(scaled, transform.get().radius()));
+    }
+
+    private Optional<List<Ball>> anomalousDimension(Kernel kernel, int loops) {
+        if (kernel.sudakov().isPresent()) {
+            return FixedSudakov.of(kernel.sudakov().get(), bits)
+                    .flatMap(s -> s.coefficients(loops + 1))
+                    .map(s -> s.anomalousDimension(loops));
+        }
+        return kernel.anomalousDimension()
+                .flatMap(AnalyticFunction::normalForm)
+                .flatMap(form -> FixedExpansion.of(form, loops, bits))
+                .map(expansion -> unscaled(expansion, loops, bits));
     }
 
     /** c_n = n! rho^(-n) times the scaled coefficients. */
@@ -88,7 +100,8 @@ final class FixedCoefficients {
         return result;
     }
 
-    private List<Ball> unscaled(FixedExpansion expansion, int loops) {
+    /** The coefficients themselves. */
+    static List<Ball> unscaled(FixedExpansion expansion, int loops, int bits) {
         List<Ball> result = new ArrayList<>();
         Rational step = expansion.radius().inverse();
         Ball weight = Ball.ONE;
@@ -126,12 +139,49 @@ final class FixedCoefficients {
             }
             y.add(expansion.get().scaled(k).multiply(weight, bits));
         }
+        return Optional.of(subtracted(y, tail.get(), loops, log, radius));
+    }
+
+    /** -(1/rho) [v^(n+1)] e^(L rho v) sum y_k v^k. */
+    private List<Ball> subtracted(List<Ball> y, Tail tail, int loops, ExactConstant log, Rational radius) {
         Rational factor = radius.inverse().negate();
         List<Ball> product = log.isZero() ? y : timesExponential(y, log.multiply(radius), loops + 1);
         List<Ball> result = new ArrayList<>();
         for (int n = 0; n < loops; n++) {
             Ball value = n + 1 < product.size() ? product.get(n + 1) : Ball.ZERO;
-            result.add(value.addError(tail.get().size()).multiply(factor, bits));
+            result.add(value.addError(tail.size()).multiply(factor, bits));
+        }
+        return result;
+    }
+
+    /** The same with y_k = s_k rho^k/k!, and -g_0 (L rho)^(n+2)/((n+2)! rho^2). */
+    private Optional<List<Ball>> doubleSubtraction(
+            SudakovSubtraction subtraction, int loops, Scales scales, Rational radius) {
+        Optional<FixedSudakov> sudakov = FixedSudakov.of(subtraction, bits);
+        if (sudakov.isEmpty()) {
+            return Optional.empty();
+        }
+        ExactConstant log = scales.subtractionLog();
+        Tail tail = cut(() -> sudakov.get().bound(scales.operatorLog()), sudakov.get().radius(), loops + 1, radius, log);
+        int last = tail.last();
+        Optional<SudakovCoefficients<Ball>> coefficients = sudakov.get().coefficients(last + 1);
+        if (coefficients.isEmpty()) {
+            return Optional.empty();
+        }
+        List<Ball> y = new ArrayList<>();
+        Ball weight = Ball.ONE;
+        for (Ball s : coefficients.get().subtraction(scales.operatorLog().toBall(bits), last)) {
+            y.add(s.multiply(weight, bits));
+            weight = weight.multiply(radius.divide(y.size()), bits);
+        }
+        List<Ball> result = subtracted(y, tail, loops, log, radius);
+        if (!log.isZero()) {
+            Ball step = log.multiply(radius).toBall(bits);
+            Ball power = step.multiply(coefficients.get().cusp(), bits).divide(radius.power(2).negate(), bits);
+            for (int n = 0; n < loops; n++) {
+                power = power.multiply(step, bits).divide(Rational.of(n + 2L), bits);
+                result.set(n, result.get(n).add(power, bits));
+            }
         }
         return Optional.of(result);
     }
@@ -187,24 +237,31 @@ final class FixedCoefficients {
      * K exceeds 2 rho/R. With the exponential in front the loss is at most e^|l| times that, l = L rho.
      */
     Optional<Tail> tail(NormalForm form, int count, Rational radius, ExactConstant log) {
-        Optional<Rational> own = FixedExpansion.radius(form);
-        if (own.isEmpty()) {
-            return Optional.empty();
-        }
+        return FixedExpansion.radius(form)
+                .map(own -> cut(() -> ArcBound.remainder(form, insideOf(own)), own, count, radius, log));
+    }
+
+    /** The radius of a circle on which a function without a singular point up to {@code own} is bounded. */
+    static double insideOf(Rational own) {
+        return own.multiply(INSIDE).toDouble();
+    }
+
+    /** @param circle the bound of |gamma|, asked for only where cutting may pay */
+    private Tail cut(Supplier<ArcBound.Bound> circle, Rational own, int count, Rational radius, ExactConstant log) {
         Tail none = new Tail(count, Magnitude.ZERO);
-        double ratioOnly = radius.toDouble() / own.get().toDouble();
+        double ratioOnly = radius.toDouble() / own.toDouble();
         double falls = 0;
         for (int k = 1; k < count; k++) {
             falls += Math.log(ratioOnly) - Math.log(k);
         }
         if (count < CUT_TERMS || falls > -bits * LN2) {
-            return Optional.of(none);
+            return none;
         }
         ArcBound.Bound bound;
         try {
-            bound = ArcBound.remainder(form, own.get().multiply(INSIDE).toDouble());
+            bound = circle.get();
         } catch (DomainException noCircle) {
-            return Optional.of(none);
+            return none;
         }
         double ratio = radius.toDouble() / bound.radius();
         double logarithm =
@@ -213,9 +270,9 @@ final class FixedCoefficients {
             logarithm += Math.log(ratio) - Math.log(k);
             if (k > 2 * ratio && logarithm < -(bits + GUARD_BITS) * LN2) {
                 // one bit more for the rounding of the logarithms
-                return Optional.of(new Tail(k, Magnitude.powerOfTwo((long) Math.ceil(logarithm / LN2) + 1)));
+                return new Tail(k, Magnitude.powerOfTwo((long) Math.ceil(logarithm / LN2) + 1));
             }
         }
-        return Optional.of(none);
+        return none;
     }
 }

@@ -75,6 +75,11 @@ public sealed interface Formula {
         return Substitution.apply(this, values);
     }
 
+    /** The partial derivative, unsimplified. @throws FormulaException if zeta or polylog contain the variable */
+    default Formula derivative(String variable) {
+        return Derivative.of(this, variable);
+    }
+
     /** The names that occur free, constants included, in alphabetical order. */
     default Set<String> names() {
         Set<String> found = new TreeSet<>();

@@ -20,6 +20,7 @@ import java.util.Optional;
  * @param transform    T(u) at mu = scale, with every singularity of B(u); empty if the quantity is an anomalous
  *                     dimension, whose Borel transform is entire
  * @param anomalousDimension gamma(a) in d ln O/d ln mu = prefactor x a gamma(a); the quantity itself if there is no T(u)
+ * @param sudakov    instead of the anomalous dimension, what subtracts a quantity with double logarithms
  * @param definingEquation what the anomalous dimension is, such as "d ln(M/mbar(mu))/d ln mu = CF/beta0 * a * gamma(a)"
  * @param heavyQuark   true if the scale is the mass of a quark heavier than those in the bubbles, so that the coupling may
  *                     count that quark too
@@ -40,6 +41,7 @@ public record Kernel(
         KernelForm form,
         Optional<AnalyticFunction> transform,
         Optional<AnalyticFunction> anomalousDimension,
+        Optional<SudakovSubtraction> sudakov,
         Optional<String> definingEquation,
         boolean heavyQuark,
         Optional<String> series,
@@ -59,13 +61,18 @@ public record Kernel(
         return transform.isEmpty();
     }
 
+    /** True if a subtraction makes the quantity finite, so that it has an anomalous dimension. */
+    public boolean isRenormalised() {
+        return anomalousDimension.isPresent() || sudakov.isPresent();
+    }
+
     /**
      * The anomalous dimension as a quantity of its own.
      *
      * @throws KernelException if there is none
      */
     public Kernel anomalousDimensionAsKernel() {
-        if (anomalousDimension.isEmpty()) {
+        if (!isRenormalised()) {
             throw new KernelException("the kernel " + name + " has no anomalous dimension");
         }
         if (isAnomalousDimension()) {
@@ -76,7 +83,7 @@ public record Kernel(
                 .orElse("d ln O/d ln mu (O: " + quantity + ")");
         return new Kernel(
                 name, "Anomalous dimension of: " + title, derivative, "mu", theory, prefactor, Rational.ZERO, form,
-                Optional.empty(), anomalousDimension, definingEquation, false, Optional.empty(), List.of(), sources,
+                Optional.empty(), anomalousDimension, sudakov, definingEquation, false, Optional.empty(), List.of(), sources,
                 List.of(), List.of());
     }
 

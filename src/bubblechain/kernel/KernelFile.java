@@ -24,7 +24,8 @@ import java.util.TreeSet;
  *
  * <p>Keys: {@code name}, {@code title}, {@code quantity}, {@code scale}, {@code theory} (QCD or QED, default QCD),
  * {@code prefactor} (formula in CF, CA, TF, nf, beta0, default CF/beta0), {@code prefactor_words},
- * {@code mass_dimension}, {@code form}, {@code T} (form borel), {@code G} (form d-dimensional),
+ * {@code mass_dimension}, {@code form}, {@code T} (form borel), {@code G} and {@code subtraction} ("single" or "double",
+ * form d-dimensional), {@code result} ("series" or "anomalous-dimension"), {@code [[part]]} (form combination),
  * {@code anomalous_dimension} with {@code defining_equation}, {@code heavy_quark} ("yes" or "no"), {@code series},
  * {@code sources}, {@code cautions}, {@code [definitions]}, {@code [parameters]}, {@code [[singularity]]} (u, kind,
  * operator, power, anomalous_dimension, source) and {@code [[check]]} (kind, n, u, power, value, kernel, source).
@@ -32,7 +33,7 @@ import java.util.TreeSet;
 final class KernelFile {
     private static final List<String> TOP_KEYS = List.of(
             "name", "title", "quantity", "scale", "theory", "prefactor", "prefactor_words", "mass_dimension", "form",
-            "T", "G", "anomalous_dimension", "defining_equation", "heavy_quark", "series", "sources", "cautions",
+            "T", "G", "subtraction", "result", "part", "anomalous_dimension", "defining_equation", "heavy_quark", "series", "sources", "cautions",
             "definitions", "parameters", "singularity", "check");
     private static final List<String> SINGULARITY_KEYS =
             List.of("u", "kind", "operator", "power", "anomalous_dimension", "source");
@@ -41,9 +42,11 @@ final class KernelFile {
     private final TomlSection top;
     private final ParameterValues parameters;
     private final Definitions definitions;
+    private final Combination.Parts loader;
 
-    private KernelFile(TomlSection top, Map<String, Rational> parameterValues) {
+    private KernelFile(TomlSection top, Map<String, Rational> parameterValues, Combination.Parts loader) {
         this.top = top;
+        this.loader = loader;
         top.requireKnown(TOP_KEYS);
         this.parameters = ParameterValues.read(top, parameterValues);
         this.definitions = readDefinitions();
@@ -53,10 +56,11 @@ final class KernelFile {
      * The kernel of a file.
      *
      * @param parameterValues values for the parameters of a family
+     * @param loader          finds the parts of a combination
      * @throws bubblechain.toml.TomlException with file, line, column and reason
      */
-    static Kernel read(TomlSection top, Map<String, Rational> parameterValues) {
-        return new KernelFile(top, parameterValues).kernel();
+    static Kernel read(TomlSection top, Map<String, Rational> parameterValues, Combination.Parts loader) {
+        return new KernelFile(top, parameterValues, loader).kernel();
     }
 
     private Definitions readDefinitions() {
@@ -83,13 +87,21 @@ final class KernelFile {
     private Kernel kernel() {
         KernelForm form = oneOf("form", KernelForm::parse);
         Theory theory = top.optionalText("theory").isPresent() ? oneOf("theory", Theory::parse) : Theory.QCD;
-        KernelFunctions functions = form == KernelForm.BOREL ? borel() : dDimensional();
+        refuseForeignKeys(form);
+        Optional<Combination> combination = form == KernelForm.COMBINATION
+                ? Optional.of(Combination.read(top, definitions, theory, loader))
+                : Optional.empty();
+        KernelFunctions functions = combination
+                .map(Combination::functions)
+                .orElseGet(() -> form == KernelForm.BOREL ? borel() : dDimensional());
         Kernel kernel = new Kernel(
                 name(), parameters.titled(top.text("title")), parameters.titled(top.text("quantity")),
                 top.text("scale"), theory, prefactor(), top.rational("mass_dimension"), form, functions.transform(),
-                functions.anomalousDimension(), definingEquation(), flag("heavy_quark"), top.optionalText("series"), singularities(),
-                top.texts("sources"), top.texts("cautions"), new CheckEntries(top).read());
-        requireFinite(kernel, form == KernelForm.BOREL ? "T" : "G");
+                functions.anomalousDimension(), functions.sudakov(), definingEquation(), flag("heavy_quark"), top.optionalText("series"), singularities(),
+                combination.map(Combination::sources).orElseGet(() -> top.texts("sources")),
+                combination.map(Combination::cautions).orElseGet(() -> top.texts("cautions")),
+                new CheckEntries(top).read());
+        requireFinite(kernel, form == KernelForm.BOREL ? "T" : form == KernelForm.COMBINATION ? "form" : "G");
         return kernel;
     }
 
@@ -129,8 +141,25 @@ final class KernelFile {
                 .orElse(false);
     }
 
+    /** Keys that belong to other forms. */
+    private void refuseForeignKeys(KernelForm form) {
+        if (form != KernelForm.BOREL) {
+            refuse("T", "form \"" + form.text() + "\" takes " + (form == KernelForm.COMBINATION ? "[[part]]" : "G") + ", not T");
+            refuse("anomalous_dimension", form == KernelForm.COMBINATION
+                    ? "the anomalous dimension of a combination follows from its parts"
+                    : "form \"d-dimensional\" derives the anomalous dimension from G");
+        }
+        if (form != KernelForm.D_DIMENSIONAL) {
+            refuse("G", "form \"" + form.text() + "\" takes " + (form == KernelForm.COMBINATION ? "[[part]]" : "T") + ", not G");
+            refuse("subtraction", "subtraction belongs to form \"d-dimensional\"");
+            refuse("result", "result belongs to form \"d-dimensional\"; form \"borel\" without T is an anomalous dimension");
+        }
+        if (form != KernelForm.COMBINATION) {
+            refuse("part", "[[part]] belongs to form \"combination\"");
+        }
+    }
+
     private KernelFunctions borel() {
-        refuse("G", "form \"borel\" takes T, not G");
         Optional<AnalyticFunction> transform = optionalFunction("T", "u");
         Optional<AnalyticFunction> anomalous = optionalFunction("anomalous_dimension", "a");
         if (transform.isEmpty() && anomalous.isEmpty()) {
@@ -139,19 +168,31 @@ final class KernelFile {
         if (anomalous.isPresent()) {
             top.text("defining_equation");
         }
-        return new KernelFunctions(transform, anomalous);
+        return new KernelFunctions(transform, anomalous, Optional.empty());
     }
 
     private KernelFunctions dDimensional() {
-        refuse("T", "form \"d-dimensional\" takes G, not T");
-        refuse("anomalous_dimension", "form \"d-dimensional\" derives the anomalous dimension from G");
+        boolean twice = choice("subtraction", "single", "double");
+        boolean alone = choice("result", "series", "anomalous-dimension");
         Formula diagram = resolved("G");
         requireNames("G", diagram, Set.of("u", "eps"));
         try {
-            return KernelFunctions.ofDiagram(diagram);
+            KernelFunctions functions = twice
+                    ? KernelFunctions.ofDoubleLogarithms(diagram)
+                    : KernelFunctions.ofDiagram(diagram);
+            return alone ? functions.withoutTransform() : functions;
         } catch (FormulaException e) {
             throw top.rethrown("G", e);
         }
+    }
+
+    /** True for the second of two words, false for the first or if the key is absent. */
+    private boolean choice(String key, String first, String second) {
+        String word = top.optionalText(key).orElse(first);
+        if (!word.equals(first) && !word.equals(second)) {
+            throw top.error(key, key + " is \"" + first + "\" or \"" + second + "\", got \"" + word + "\"");
+        }
+        return word.equals(second);
     }
 
     private void refuse(String key, String reason) {

@@ -9,7 +9,9 @@ public enum KernelForm {
     /** T(u), the Borel transform before subtraction, and the anomalous dimension where one is needed. */
     BOREL("borel"),
     /** G(eps, u), the one-loop diagram in d = 4 - 2 eps with gluon index 1 + u - eps. */
-    D_DIMENSIONAL("d-dimensional");
+    D_DIMENSIONAL("d-dimensional"),
+    /** A weighted sum of other kernels. */
+    COMBINATION("combination");
 
     private final String text;
 

@@ -43,7 +43,7 @@ public final class KernelLibrary {
      * @throws bubblechain.toml.TomlException if the file is malformed
      */
     public static Kernel load(String nameOrPath, Map<String, Rational> parameters) {
-        return KernelFile.read(open(nameOrPath), parameters);
+        return new NestedLoading().load(nameOrPath, parameters);
     }
 
     /** True if this is the name of a built-in kernel. */
@@ -51,8 +51,8 @@ public final class KernelLibrary {
         return resources().containsKey(name);
     }
 
-    private static TomlSection open(String nameOrPath) {
-        if (nameOrPath.endsWith(ENDING) || nameOrPath.contains("/") || nameOrPath.contains("\\")) {
+    static TomlSection open(String nameOrPath) {
+        if (isPath(nameOrPath)) {
             return TomlFile.read(TomlFile.path(nameOrPath));
         }
         SortedMap<String, String> resources = resources();
@@ -71,6 +71,11 @@ public final class KernelLibrary {
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
+    }
+
+    /** True if this is the path of a file and not a built-in name. */
+    static boolean isPath(String nameOrPath) {
+        return nameOrPath.endsWith(ENDING) || nameOrPath.contains("/") || nameOrPath.contains("\\");
     }
 
     /** Name to resource: the file name without its ending, in any folder below kernels/. */

@@ -79,7 +79,7 @@ public final class KernelReport {
             return ", gamma(a) = sum_{n>=0} c_n a^n";
         }
         return "; B(u) = sum_{n>=0} c_n u^n/n! = T(u)"
-                + (kernel.anomalousDimension().isPresent() ? " minus the subtraction that gamma(a) implies" : "");
+                + (kernel.isRenormalised() ? " minus the subtraction that the anomalous dimension implies" : "");
     }
 
     private static Value formula(AnalyticFunction function) {

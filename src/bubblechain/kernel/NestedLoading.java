@@ -1,0 +1,48 @@
+package bubblechain.kernel;
+
+import bubblechain.exact.Rational;
+import bubblechain.toml.TomlSection;
+import java.nio.file.InvalidPathException;
+import java.nio.file.Path;
+import java.util.ArrayDeque;
+import java.util.Deque;
+import java.util.Map;
+
+/** Loading of one kernel with all the kernels it is combined of, which may not contain it again. */
+final class NestedLoading {
+    /** Files that one combination may read in all, so that a few short files cannot ask for millions. */
+    private static final int LARGEST_COUNT = 100;
+
+    private final Deque<String> open = new ArrayDeque<>();
+    private int count;
+
+    /** @throws KernelException if there is no such kernel, or it contains itself */
+    Kernel load(String nameOrPath, Map<String, Rational> parameters) {
+        String place = place(nameOrPath);
+        if (open.contains(place)) {
+            throw new KernelException("the combination " + open.getLast() + " contains itself: " + open.getFirst()
+                    + " has the part " + nameOrPath);
+        }
+        if (++count > LARGEST_COUNT) {
+            throw new KernelException("the combination " + open.getLast() + " has more than " + LARGEST_COUNT + " parts in all");
+        }
+        TomlSection file = KernelLibrary.open(place);
+        open.push(place);
+        Kernel kernel = KernelFile.read(file, parameters, this::load);
+        open.pop();
+        return kernel;
+    }
+
+    /** A built-in name, or a path, relative ones from the folder of the file that mentions it. */
+    private String place(String nameOrPath) {
+        if (!KernelLibrary.isPath(nameOrPath) || open.isEmpty() || !KernelLibrary.isPath(open.getFirst())) {
+            return nameOrPath;
+        }
+        try {
+            String path = Path.of(open.getFirst()).resolveSibling(nameOrPath).normalize().toString();
+            return KernelLibrary.isPath(path) ? path : "./" + path;
+        } catch (InvalidPathException e) {
+            throw new KernelException("'" + nameOrPath + "' is not a path");
+        }
+    }
+}
