@@ -65,7 +65,7 @@ record FactoredTerm(
 
     /** The exponential and the gammas alone, which terms can share. */
     TermKey functions() {
-        return new TermKey(ExactConstant.ONE, key.slope(), key.gammas(), Map.of(), Map.of());
+        return TermKey.gammas(key.slope(), key.gammas());
     }
 
     /** A radius within which the term has no singular point but u = 0; empty if it has none at all. */
@@ -82,6 +82,9 @@ record FactoredTerm(
                 .min(Rational::compareTo);
         for (TermKey.PolygammaFactor p : key.polygammas().keySet()) {
             nearest = smaller(nearest, p.shift().divide(p.slope()).abs());
+        }
+        for (TermKey.UnitFactor w : key.units().keySet()) {
+            nearest = smaller(nearest, UnitFunctions.distance(w));
         }
         Polynomial squarefree = below.divideExactly(below.gcd(below.derivative()));
         for (Interval interval : RealRoots.of(squarefree)) {

@@ -51,7 +51,7 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
      * the worth of the coefficients must fall faster.
      *
      * @param stages falling precision for growing orders
-     * @return empty if the form has no singular point to set the scale, or a number leaves the fixed-point range
+     * @return empty if the form has no singular point to set the scale or a hypergeometric function a pole at u = 0, or a number leaves the fixed-point range
      */
     public static Optional<FixedExpansion> of(NormalForm form, List<Stage> stages) {
         return of(form, stages, false);
@@ -60,7 +60,7 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
     private static Optional<FixedExpansion> of(NormalForm form, List<Stage> stages, boolean makeUp) {
         List<FactoredTerm> terms = factored(form);
         Optional<Rational> radius = radius(terms);
-        if (radius.isEmpty()) {
+        if (radius.isEmpty() || terms.stream().anyMatch(t -> UnitFunctions.poleAtZero(t.key()))) {
             return Optional.empty();
         }
         int shift = Math.max(0, terms.stream().mapToInt(t -> -t.valuation()).max().orElse(0));
@@ -151,7 +151,7 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
         /** The sum of terms with one product of gammas and one constant, that constant left out. */
         private FixedSeries members(List<FactoredTerm> members, GammaProducts.Product product) {
             boolean elementary = members.stream()
-                    .allMatch(t -> t.key().polygammas().isEmpty() && t.key().sines().isEmpty());
+                    .allMatch(t -> t.key().isInvertible());
             if (elementary) {
                 return members.stream()
                         .map(t -> t.applyTo(product.series(), product.removed(), radius, shift))
@@ -171,6 +171,13 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
             boolean first = true;
             for (Map.Entry<PolygammaFactor, Integer> factor : term.key().polygammas().entrySet()) {
                 FixedSeries series = gammas.polygamma(factor.getKey(), stage);
+                for (int k = 0; k < factor.getValue(); k++) {
+                    result = first ? series : result.multiply(series);
+                    first = false;
+                }
+            }
+            for (Map.Entry<TermKey.UnitFactor, Integer> factor : term.key().units().entrySet()) {
+                FixedSeries series = gammas.unit3f2(factor.getKey(), stage);
                 for (int k = 0; k < factor.getValue(); k++) {
                     result = first ? series : result.multiply(series);
                     first = false;

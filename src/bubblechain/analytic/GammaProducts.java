@@ -2,11 +2,13 @@ package bubblechain.analytic;
 
 import bubblechain.analytic.TermKey.GammaFactor;
 import bubblechain.analytic.TermKey.PolygammaFactor;
+import bubblechain.analytic.TermKey.UnitFactor;
 import bubblechain.exact.Ball;
 import bubblechain.exact.BallFunctions;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.ExactFunctions;
 import bubblechain.exact.Rational;
+import bubblechain.exact.UnitHypergeometric;
 import bubblechain.series.BallRing;
 import bubblechain.series.FixedSeries;
 import bubblechain.series.PowerSums;
@@ -33,6 +35,7 @@ final class GammaProducts {
     private final int removal;
     private final BallRing ring;
     private final Map<TermKey, Known> products = new HashMap<>();
+    private final Map<Rational, Ball[]> unit3f2Tables = new HashMap<>();
     /** Polygammas want zeta values up to the last order, products of gammas do not. */
     private Optional<BallRing> polygammaRing = Optional.empty();
 
@@ -204,6 +207,27 @@ final class GammaProducts {
                     ? BallFunctions.digamma(Ball.of(factor.shift(), bits), bits)
                     : ring.hurwitz(m + 1, factor.shift()).multiply(weight, bits);
             values.set(k, m == 0 || m % 2 == 1 ? value : value.negate());
+        }
+        return values.series().truncated(stage.length(), stage.limbs());
+    }
+
+    /** W^(n)(s + b rho v) = sum_k (n+k)!/k! w_(n+k) (b rho)^k v^k, w_k the Taylor coefficients of W at s. */
+    FixedSeries unit3f2(UnitFactor factor, Stage stage) {
+        int n = factor.n();
+        Ball[] taylor = unit3f2Tables.computeIfAbsent(
+                factor.shift(), s -> UnitHypergeometric.taylor(Ball.of(s, 2 * bits), length + n, bits));
+        if (taylor.length < length + n) {
+            taylor = UnitHypergeometric.taylor(Ball.of(factor.shift(), 2 * bits), length + n, bits);
+            unit3f2Tables.put(factor.shift(), taylor);
+        }
+        FixedValues values = new FixedValues(length, limbs);
+        Rational step = factor.slope().multiply(radius);
+        Ball weight = Ball.of(ExactFunctions.factorial(n));
+        for (int k = 0; k < length; k++) {
+            if (k > 0) {
+                weight = weight.multiply(step.multiply(n + k).divide(k), bits);
+            }
+            values.set(k, taylor[n + k].multiply(weight, bits));
         }
         return values.series().truncated(stage.length(), stage.limbs());
     }

@@ -51,7 +51,7 @@ public final class GradedTerm {
     /**
      * The terms of one term of a normal form, with all powers of x below {@code end}.
      *
-     * @return empty if there is a sine of rational slope, a slope that is not rational plus multiples of single constants
+     * @return empty if there is a sine of rational slope, a hypergeometric function, a slope that is not rational plus multiples of single constants
      *     of weight one, or a large product of polygammas
      */
     static Optional<List<GradedTerm>> of(LocalTerm term, int end) {
@@ -67,7 +67,7 @@ public final class GradedTerm {
                 return Optional.empty();
             }
         }
-        if (!key.sines().isEmpty()) {
+        if (!key.sines().isEmpty() || !key.units().isEmpty()) {
             return Optional.empty();
         }
         int length = Math.max(1, end - start + lowered);

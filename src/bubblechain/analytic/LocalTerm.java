@@ -3,6 +3,7 @@ package bubblechain.analytic;
 import bubblechain.analytic.TermKey.GammaFactor;
 import bubblechain.analytic.TermKey.PolygammaFactor;
 import bubblechain.analytic.TermKey.SineFactor;
+import bubblechain.analytic.TermKey.UnitFactor;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.ExactFunctions;
@@ -47,6 +48,7 @@ final class LocalTerm {
                 valuation -= (p.n() + 1) * power;
             }
         });
+        key.units().forEach((w, power) -> valuation -= UnitFunctions.poleOrder(w, point) * power);
     }
 
     /** Lowest power of x this term can have; a sine that vanishes at the point is not counted. */
@@ -142,10 +144,15 @@ final class LocalTerm {
             }
             result = algebra.multiply(result, power);
         }
+        for (Map.Entry<UnitFactor, Integer> entry : key.units().entrySet()) {
+            poles += UnitFunctions.poleOrder(entry.getKey(), point) * entry.getValue();
+            S power = algebra.power(UnitFunctions.about(point, entry.getKey(), algebra), entry.getValue());
+            result = algebra.multiply(result, power);
+        }
         for (Map.Entry<SineFactor, Integer> entry : key.sines().entrySet()) {
             result = algebra.multiply(result, algebra.power(sine(algebra, entry.getKey()), entry.getValue()));
         }
-        // The poles of the polygammas are already in the series, the other powers of x are not.
+        // The poles of the polygammas and hypergeometric functions are already in the series, the other powers of x are not.
         return algebra.shift(result, valuation + poles);
     }
 

@@ -3,19 +3,23 @@ package bubblechain.analytic;
 import bubblechain.analytic.TermKey.GammaFactor;
 import bubblechain.analytic.TermKey.PolygammaFactor;
 import bubblechain.analytic.TermKey.SineFactor;
+import bubblechain.analytic.TermKey.UnitFactor;
 import bubblechain.exact.ConstantFunctions;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.ExactFunctions;
 import bubblechain.exact.Rational;
+import bubblechain.exact.UnitRecurrence;
 import bubblechain.formula.Formula;
 import java.math.BigInteger;
+import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 
 /**
- * A function of u as a sum of terms R(u) c e^(alpha u) prod Gamma(s + b u)^m prod psi^(n)(s + b u)^k, with R over Q(u),
+ * A function of u as a sum of terms R(u) c e^(alpha u) prod Gamma(s + b u)^m prod psi^(n)(s + b u)^k prod W^(n)(s + b u)^k, with R over Q(u),
  * c a product of exact constants and s in (0,1]; terms with the same transcendental part are one term. Immutable.
  *
  * <p>sin(pi z) is pi/(Gamma(z) Gamma(1-z)); a sine of rational slope stays as a factor. A form that vanishes formally
@@ -32,6 +36,7 @@ public final class NormalForm {
     public static final NormalForm VARIABLE = of(Polynomial.linear(Rational.ZERO, Rational.ONE));
 
     private static final int SHIFT_LIMIT = 2_000;
+    private static final int UNIT_SHIFT_LIMIT = 100;
 
     private final Map<TermKey, RationalFunction> terms;
 
@@ -67,7 +72,7 @@ public final class NormalForm {
 
     /** e^(constant + slope u). */
     public static NormalForm exponential(ExactConstant constant, ExactConstant slope) {
-        TermKey key = new TermKey(ExactConstant.ONE, slope, Map.of(), Map.of(), Map.of());
+        TermKey key = TermKey.exponential(slope);
         return of(key, RationalFunction.ONE).multiply(constant(constant.exp()));
     }
 
@@ -86,7 +91,7 @@ public final class NormalForm {
         RationalFunction factor =
                 steps >= 0 ? RationalFunction.of(product) : RationalFunction.of(Polynomial.ONE, product);
         Map<GammaFactor, Integer> gammas = Map.of(new GammaFactor(slope, shift), 1);
-        return of(new TermKey(ExactConstant.ONE, ExactConstant.ZERO, gammas, Map.of(), Map.of()), factor);
+        return of(TermKey.gammas(ExactConstant.ZERO, gammas), factor);
     }
 
     /** psi^(n)(constant + slope u); the shift by integers becomes a rational term, DLMF 5.15.5. */
@@ -110,9 +115,34 @@ public final class NormalForm {
             Polynomial argument = Polynomial.linear(shift.subtract(j), slope);
             rest = rest.add(RationalFunction.of(argument).power(-n - 1).multiply(sign.negate()));
         }
-        Map<PolygammaFactor, Integer> polygammas = Map.of(new PolygammaFactor(n, slope, shift), 1);
-        TermKey key = new TermKey(ExactConstant.ONE, ExactConstant.ZERO, Map.of(), polygammas, Map.of());
+        TermKey key = TermKey.of(new PolygammaFactor(n, slope, shift));
         return of(key, RationalFunction.ONE).add(of(TermKey.ONE, rest));
+    }
+
+    /**
+     * The n-th derivative of {@link bubblechain.exact.UnitHypergeometric} at constant + slope u; the shift by integers becomes
+     * lower derivatives with rational factors and a rational term.
+     */
+    public static NormalForm unit3f2(int n, Rational constant, Rational slope) {
+        if (slope.isZero()) {
+            return constant(ConstantFunctions.unit3f2(n, ExactConstant.of(constant)));
+        }
+        Rational shift = reduced(constant);
+        int steps = steps(constant, shift);
+        if (Math.abs(steps) > UNIT_SHIFT_LIMIT) {
+            throw new DomainException("the constant " + constant + " in the argument of unit_3f2 is larger than "
+                    + UNIT_SHIFT_LIMIT);
+        }
+        List<NormalForm> atShift = new ArrayList<>();
+        for (int k = 0; k <= n; k++) {
+            atShift.add(of(TermKey.of(new UnitFactor(k, slope, shift)), RationalFunction.ONE));
+        }
+        return new UnitRecurrence<>(
+                        NormalForm::add, NormalForm::multiply, q -> constant(ExactConstant.of(q)),
+                        (c, power) -> of(
+                                TermKey.ONE, RationalFunction.of(Polynomial.linear(c, slope)).power(-power)))
+                .from(atShift, shift, steps)
+                .get(n);
     }
 
     /** sin(constant + slope u) for a slope that is rational or a rational multiple of pi. */
@@ -138,9 +168,7 @@ public final class NormalForm {
     }
 
     private static NormalForm sineOfRationalSlope(ExactConstant constant, Rational slope) {
-        Map<SineFactor, Integer> sines = Map.of(new SineFactor(constant, slope), 1);
-        return of(
-                new TermKey(ExactConstant.ONE, ExactConstant.ZERO, Map.of(), Map.of(), sines), RationalFunction.ONE);
+        return of(TermKey.of(new SineFactor(constant, slope)), RationalFunction.ONE);
     }
 
     /** sin(pi z) = pi/(Gamma(z) Gamma(1-z)), z = constant + slope u, DLMF 5.5.3. */

@@ -144,6 +144,8 @@ final class NormalFormCompiler {
             case DIGAMMA -> NormalForm.polygamma(0, rational(linear.constant(), last), rational(linear.slope(), last));
             case POLYGAMMA -> NormalForm.polygamma(
                     ConstantValue.polygammaOrder(c.arguments().get(0), indices), rational(linear.constant(), last), rational(linear.slope(), last));
+            case UNIT_3F2 -> NormalForm.unit3f2(
+                    ConstantValue.unit3f2Order(c.arguments().get(0), indices), rational(linear.constant(), last), rational(linear.slope(), last));
             case EXP -> NormalForm.exponential(linear.constant(), linear.slope());
             case SIN -> sine(linear.constant(), linear.slope(), last);
             case COS -> sine(
@@ -162,7 +164,7 @@ final class NormalFormCompiler {
     private static Rational rational(ExactConstant value, Formula place) {
         return value.asRational()
                 .orElseThrow(() -> new InadmissibleFormulaException(
-                        place.span(), "a gamma function needs an argument s + b*u with rational s and b"));
+                        place.span(), "a gamma or hypergeometric function needs an argument s + b*u with rational s and b"));
     }
 
     private boolean dependsOnVariable(Formula formula) {

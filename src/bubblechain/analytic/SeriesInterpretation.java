@@ -8,6 +8,7 @@ import bubblechain.formula.ConstantValue;
 import bubblechain.formula.Formula;
 import bubblechain.formula.FormulaException;
 import bubblechain.formula.FormulaLimits;
+import bubblechain.formula.Function;
 import bubblechain.series.SeriesAlgebra;
 import java.util.HashMap;
 import java.util.Map;
@@ -156,7 +157,28 @@ public final class SeriesInterpretation<S> {
         return total;
     }
 
+    /** W^(n) has an expansion at arguments linear in one variable. */
+    private S unit3f2(Formula.Call c) {
+        Formula argument = c.arguments().get(1);
+        Optional<LinearForm> form = LinearForm.of(argument, variables.keySet(), indices);
+        Optional<Rational> constant = form.flatMap(f -> f.constant().asRational());
+        if (constant.isEmpty() || form.get().slopes().size() != 1) {
+            throw FormulaException.at(argument.span(), "unit_3f2 needs an argument s + b*u with rational s and b");
+        }
+        Map.Entry<String, ExactConstant> term = form.get().slopes().entrySet().iterator().next();
+        Optional<Rational> slope = term.getValue().asRational();
+        Rational point = points.get(term.getKey());
+        if (slope.isEmpty() || point == null) {
+            throw FormulaException.at(argument.span(), "unit_3f2 needs an argument s + b*u with rational s and b");
+        }
+        int n = ConstantValue.unit3f2Order(c.arguments().get(0), indices);
+        return UnitFunctions.at(n, constant.get().add(slope.get().multiply(point)), slope.get(), algebra);
+    }
+
     private S call(Formula.Call c) {
+        if (c.function() == Function.UNIT_3F2) {
+            return unit3f2(c);
+        }
         S argument = exactIfLinear(c.arguments().get(c.arguments().size() - 1));
         return switch (c.function()) {
             case GAMMA -> algebra.gamma(argument);
@@ -168,7 +190,7 @@ public final class SeriesInterpretation<S> {
             case EXP -> algebra.exp(argument);
             case SIN -> algebra.sin(argument);
             case COS -> algebra.cos(argument);
-            case ZETA, POLYLOG -> throw FormulaException.at(
+            case ZETA, POLYLOG, UNIT_3F2 -> throw FormulaException.at(
                     c.span(), c.function().text() + " needs a constant argument");
         };
     }

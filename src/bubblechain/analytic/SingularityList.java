@@ -57,6 +57,10 @@ public final class SingularityList {
                 }
             });
             key.polygammas().keySet().forEach(p -> addPoles(p.shift(), p.slope(), from, to, points));
+            key.units().keySet().forEach(w -> {
+                addPoles(w.shift(), w.slope(), from, to, points);
+                addPoles(w.shift().subtract(Rational.HALF), w.slope(), from, to, points);
+            });
         }
         for (Interval root : RealRoots.of(radical)) {
             if (root.isPoint() && root.lower().compareTo(from) >= 0 && root.lower().compareTo(to) <= 0) {

@@ -14,6 +14,7 @@ final class TermDisc {
     private final RationalDisc factor;
     private final List<GammaPower> gammas = new ArrayList<>();
     private final List<PolygammaPower> polygammas = new ArrayList<>();
+    private final List<UnitPower> units = new ArrayList<>();
     private final List<SinePower> sines = new ArrayList<>();
 
     /** constant + slope u. */
@@ -35,6 +36,8 @@ final class TermDisc {
 
     private record PolygammaPower(PolygammaDisc function, Argument argument, int power) {}
 
+    private record UnitPower(UnitDisc function, Argument argument, int power) {}
+
     private record SinePower(Argument argument, int power) {}
 
     private TermDisc(TermKey key, RationalFunction rational) {
@@ -45,6 +48,9 @@ final class TermDisc {
         key.polygammas()
                 .forEach((p, power) -> polygammas.add(
                         new PolygammaPower(PolygammaDisc.of(p.n()), Argument.of(p.shift(), p.slope()), power)));
+        key.units()
+                .forEach((w, power) -> units.add(
+                        new UnitPower(UnitDisc.of(w.n()), Argument.of(w.shift(), w.slope()), power)));
         key.sines().forEach((s, power) -> sines.add(new SinePower(Argument.of(s.constant(), s.slope()), power)));
     }
 
@@ -61,6 +67,9 @@ final class TermDisc {
         gammas.forEach(g -> multiplyGamma(product, g));
         for (PolygammaPower p : polygammas) {
             product.multiply(p.function().over(p.argument().over(u)).power(p.power()));
+        }
+        for (UnitPower w : units) {
+            product.multiply(w.function().over(w.argument().over(u)).power(w.power()));
         }
         sines.forEach(s -> multiplySine(product, s));
         return product.total();

@@ -7,12 +7,13 @@ import java.util.Map;
 
 /**
  * The transcendental part of one term of a {@link NormalForm}:
- * constant e^(slope u) prod Gamma(shift + b u)^m prod psi^(n)(shift + b u)^k prod sin(c + b u)^k.
+ * constant e^(slope u) prod Gamma(shift + b u)^m prod psi^(n)(shift + b u)^k prod W^(n)(shift + b u)^k prod sin(c + b u)^k.
  *
  * @param constant   a single product of constants, with coefficient one
  * @param slope      coefficient of u in the exponent
  * @param gammas     powers of gamma functions, never zero
  * @param polygammas positive powers of polygamma functions
+ * @param units     positive powers of derivatives of {@link bubblechain.exact.UnitHypergeometric}
  * @param sines      positive powers of sines whose slope is rational (not a multiple of pi)
  */
 record TermKey(
@@ -20,8 +21,9 @@ record TermKey(
         ExactConstant slope,
         Map<GammaFactor, Integer> gammas,
         Map<PolygammaFactor, Integer> polygammas,
+        Map<UnitFactor, Integer> units,
         Map<SineFactor, Integer> sines) {
-    static final TermKey ONE = new TermKey(ExactConstant.ONE, ExactConstant.ZERO, Map.of(), Map.of(), Map.of());
+    static final TermKey ONE = exponential(ExactConstant.ZERO);
 
     /** Gamma(shift + slope u) with shift in (0,1] and slope not zero. */
     record GammaFactor(Rational slope, Rational shift) {}
@@ -29,13 +31,39 @@ record TermKey(
     /** psi^(n)(shift + slope u) with shift in (0,1] and slope not zero. */
     record PolygammaFactor(int n, Rational slope, Rational shift) {}
 
+    /** W^(n)(shift + slope u) with shift in (0,1] and slope not zero. */
+    record UnitFactor(int n, Rational slope, Rational shift) {}
+
     /** sin(constant + slope u) with slope not zero. */
     record SineFactor(ExactConstant constant, Rational slope) {}
 
     TermKey {
         gammas = Map.copyOf(gammas);
         polygammas = Map.copyOf(polygammas);
+        units = Map.copyOf(units);
         sines = Map.copyOf(sines);
+    }
+
+    /** e^(slope u). */
+    static TermKey exponential(ExactConstant slope) {
+        return gammas(slope, Map.of());
+    }
+
+    /** e^(slope u) times a product of gamma functions. */
+    static TermKey gammas(ExactConstant slope, Map<GammaFactor, Integer> gammas) {
+        return new TermKey(ExactConstant.ONE, slope, gammas, Map.of(), Map.of(), Map.of());
+    }
+
+    static TermKey of(PolygammaFactor factor) {
+        return new TermKey(ExactConstant.ONE, ExactConstant.ZERO, Map.of(), Map.of(factor, 1), Map.of(), Map.of());
+    }
+
+    static TermKey of(UnitFactor factor) {
+        return new TermKey(ExactConstant.ONE, ExactConstant.ZERO, Map.of(), Map.of(), Map.of(factor, 1), Map.of());
+    }
+
+    static TermKey of(SineFactor factor) {
+        return new TermKey(ExactConstant.ONE, ExactConstant.ZERO, Map.of(), Map.of(), Map.of(), Map.of(factor, 1));
     }
 
     /** The product of the parts that depend on u; the constants are multiplied by the caller. */
@@ -45,6 +73,7 @@ record TermKey(
                 slope.add(other.slope),
                 merged(gammas, other.gammas),
                 merged(polygammas, other.polygammas),
+                merged(units, other.units),
                 merged(sines, other.sines));
     }
 
@@ -59,22 +88,22 @@ record TermKey(
     }
 
     boolean isConstant() {
-        return slope.isZero() && gammas.isEmpty() && polygammas.isEmpty() && sines.isEmpty();
+        return slope.isZero() && gammas.isEmpty() && isInvertible();
     }
 
     /** True if only exponentials and gamma functions depend on u, so that the inverse is of the same kind. */
     boolean isInvertible() {
-        return polygammas.isEmpty() && sines.isEmpty();
+        return polygammas.isEmpty() && units.isEmpty() && sines.isEmpty();
     }
 
     /** The inverse of the parts that depend on u, with constant one. */
     TermKey inverseFunctions() {
         Map<GammaFactor, Integer> inverted = new HashMap<>();
         gammas.forEach((factor, power) -> inverted.put(factor, -power));
-        return new TermKey(ExactConstant.ONE, slope.negate(), inverted, Map.of(), Map.of());
+        return gammas(slope.negate(), inverted);
     }
 
     TermKey withConstant(ExactConstant value) {
-        return new TermKey(value, slope, gammas, polygammas, sines);
+        return new TermKey(value, slope, gammas, polygammas, units, sines);
     }
 }

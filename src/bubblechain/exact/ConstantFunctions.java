@@ -115,6 +115,17 @@ public final class ConstantFunctions {
                 "polylog(" + s + "," + x.get() + ")", bits -> BallFunctions.polylog(s, x.get(), bits));
     }
 
+    /** The n-th derivative of {@link UnitHypergeometric}. @throws DomainException at a pole, or for a number not rational */
+    public static ExactConstant unit3f2(int n, ExactConstant z) {
+        Rational q = z.asRational()
+                .orElseThrow(() -> new DomainException("unit_3f2(n, z) of a constant needs a rational z, got " + z));
+        if (q.abs().compareTo(Rational.of(UnitHypergeometric.LARGEST_ARGUMENT)) > 0) {
+            throw new DomainException("the argument of unit_3f2 lies between -" + UnitHypergeometric.LARGEST_ARGUMENT + " and "
+                    + UnitHypergeometric.LARGEST_ARGUMENT + ", got " + q);
+        }
+        return UnitHypergeometric.value(n, q);
+    }
+
     private static Rational limited(Rational q) {
         if (q.abs().compareTo(Rational.of(LARGEST_ARGUMENT)) > 0) {
             throw new DomainException("the number " + q + " is larger than the limit " + LARGEST_ARGUMENT);

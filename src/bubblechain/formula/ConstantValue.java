@@ -4,6 +4,7 @@ import bubblechain.exact.ConstantFunctions;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
+import bubblechain.exact.UnitHypergeometric;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -51,6 +52,16 @@ public final class ConstantValue {
         if (n < 0 || n > ConstantFunctions.LARGEST_ORDER) {
             throw FormulaException.at(
                     formula.span(), "the order of a polygamma lies between 0 and " + ConstantFunctions.LARGEST_ORDER);
+        }
+        return n;
+    }
+
+    /** The order of a derivative of unit_3f2, from 0 to 100. */
+    public static int unit3f2Order(Formula formula, Map<String, ExactConstant> values) {
+        int n = integer(formula, values, "the order of a derivative of unit_3f2");
+        if (n < 0 || n > UnitHypergeometric.LARGEST_ORDER) {
+            throw FormulaException.at(formula.span(), "the order of a derivative of unit_3f2 lies between 0 and "
+                    + UnitHypergeometric.LARGEST_ORDER);
         }
         return n;
     }
@@ -140,6 +151,7 @@ public final class ConstantValue {
             case ZETA -> ConstantFunctions.zeta(integer(arguments.get(0), values, "the argument of zeta"));
             case POLYLOG -> ConstantFunctions.polylog(integer(arguments.get(0), values, "the order of a polylog"), last);
             case POLYGAMMA -> ConstantFunctions.polygamma(polygammaOrder(arguments.get(0), values), last);
+            case UNIT_3F2 -> ConstantFunctions.unit3f2(unit3f2Order(arguments.get(0), values), last);
             case GAMMA -> ConstantFunctions.gamma(last);
             case DIGAMMA -> ConstantFunctions.polygamma(0, last);
             case LN -> last.ln();

@@ -62,7 +62,7 @@ final class Derivative {
         return switch (c.function()) {
             case GAMMA -> times(c, call(Function.DIGAMMA, List.of(x), c));
             case DIGAMMA -> call(Function.POLYGAMMA, List.of(number(Rational.ONE, c), x), c);
-            case POLYGAMMA -> call(Function.POLYGAMMA, List.of(next(c), x), c);
+            case POLYGAMMA, UNIT_3F2 -> call(c.function(), List.of(next(c), x), c);
             case LN -> over(number(Rational.ONE, c), x);
             case SQRT -> over(number(Rational.HALF, c), c);
             case EXP -> c;

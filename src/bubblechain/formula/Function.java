@@ -11,6 +11,7 @@ public enum Function {
     POLYGAMMA(2),
     ZETA(1),
     POLYLOG(2),
+    UNIT_3F2(2),
     LN(1),
     SQRT(1),
     EXP(1),

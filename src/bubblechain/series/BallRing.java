@@ -4,6 +4,7 @@ import bubblechain.exact.Ball;
 import bubblechain.exact.BallFunctions;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
+import bubblechain.exact.UnitHypergeometric;
 import java.math.BigInteger;
 import java.util.HashMap;
 import java.util.Map;
@@ -14,6 +15,8 @@ public final class BallRing implements CoefficientRing<Ball> {
     private final int bits;
     private final int largestOrder;
     private final Map<Rational, Ball[]> hurwitzTables = new HashMap<>();
+
+    private final Map<Rational, Ball[]> unit3f2Tables = new HashMap<>();
 
     private BallRing(int bits, int largestOrder) {
         this.bits = bits;
@@ -121,6 +124,17 @@ public final class BallRing implements CoefficientRing<Ball> {
             return s.equals(Rational.ONE) ? zeta : zeta.multiply(Rational.of(factor), bits);
         }
         return k <= largestOrder ? table(s)[k] : BallFunctions.hurwitzZeta(k, Ball.of(s, bits + 8), bits);
+    }
+
+    @Override
+    public Ball unit3f2(int k, Rational s) {
+        Ball[] known = unit3f2Tables.get(s);
+        if (known == null || known.length <= k) {
+            // the k-th coefficient is known relative to 2^k
+            known = UnitHypergeometric.taylor(Ball.of(s, 2 * bits), Math.max(k, largestOrder) + 1, bits);
+            unit3f2Tables.put(s, known);
+        }
+        return known[k];
     }
 
     private Ball[] table(Rational s) {

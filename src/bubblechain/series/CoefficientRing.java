@@ -46,4 +46,7 @@ public interface CoefficientRing<C> {
 
     /** Hurwitz zeta(k, s) for k of at least 2 and s in (0,1]. */
     C hurwitz(int k, Rational s);
+
+    /** W^(k)(s)/k! of {@link bubblechain.exact.UnitHypergeometric}, for s in [1,2). */
+    C unit3f2(int k, Rational s);
 }

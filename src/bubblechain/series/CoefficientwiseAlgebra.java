@@ -412,4 +412,18 @@ public final class CoefficientwiseAlgebra<C> implements SeriesAlgebra<LaurentSer
         }
         return series(0, coefficients);
     }
+
+    @Override
+    public LaurentSeries<C> unit3f2Tail(int n, Rational s, Rational slope) {
+        List<C> coefficients = zeros(length);
+        // (n+k)!/k! slope^k
+        Rational factor = Rational.of(ExactFunctions.factorial(n));
+        for (int k = 0; k < length; k++) {
+            if (k > 0) {
+                factor = factor.multiply(slope).multiply(n + k).divide(k);
+            }
+            coefficients.set(k, ring.multiply(ring.unit3f2(n + k, s), factor));
+        }
+        return series(0, coefficients);
+    }
 }

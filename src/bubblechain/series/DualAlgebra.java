@@ -148,4 +148,9 @@ public final class DualAlgebra<S> implements SeriesAlgebra<Dual<S>> {
     public Dual<S> polygammaTail(int n, Rational s, Rational slope) {
         return withoutDerivative(base.polygammaTail(n, s, slope));
     }
+
+    @Override
+    public Dual<S> unit3f2Tail(int n, Rational s, Rational slope) {
+        return withoutDerivative(base.unit3f2Tail(n, s, slope));
+    }
 }

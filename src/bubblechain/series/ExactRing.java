@@ -4,6 +4,7 @@ import bubblechain.exact.ConstantFunctions;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.ExactFunctions;
 import bubblechain.exact.Rational;
+import bubblechain.exact.UnitHypergeometric;
 import java.util.Optional;
 
 /** Exact constants; functions without a canonical form give opaque constants. */
@@ -90,5 +91,10 @@ public final class ExactRing implements CoefficientRing<ExactConstant> {
     @Override
     public ExactConstant hurwitz(int k, Rational s) {
         return ExactFunctions.hurwitz(k, s);
+    }
+
+    @Override
+    public ExactConstant unit3f2(int k, Rational s) {
+        return UnitHypergeometric.coefficient(k, s);
     }
 }

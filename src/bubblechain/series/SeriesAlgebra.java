@@ -68,4 +68,7 @@ public interface SeriesAlgebra<S> {
 
     /** psi^(n)(s + slope x) for s in (0,1]. */
     S polygammaTail(int n, Rational s, Rational slope);
+
+    /** The n-th derivative of {@link bubblechain.exact.UnitHypergeometric} at s + slope x, for s in [1,2). */
+    S unit3f2Tail(int n, Rational s, Rational slope);
 }

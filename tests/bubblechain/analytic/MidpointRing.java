@@ -94,4 +94,9 @@ final class MidpointRing implements CoefficientRing<Ball> {
     public Ball hurwitz(int k, Rational s) {
         return ring.hurwitz(k, s).center();
     }
+
+    @Override
+    public Ball unit3f2(int k, Rational s) {
+        return ring.unit3f2(k, s).center();
+    }
 }

@@ -14,7 +14,7 @@ import org.junit.jupiter.params.provider.MethodSource;
 
 class FormulaErrorTest {
     private static final String KNOWN =
-            "known are gamma, digamma, polygamma, zeta, polylog, ln, sqrt, exp, sin, cos, sum (for a product write ";
+            "known are gamma, digamma, polygamma, zeta, polylog, unit_3f2, ln, sqrt, exp, sin, cos, sum (for a product write ";
 
     /** Formula; reason; line; column; the last two lines of the message. */
     static Stream<Arguments> badFormulas() {

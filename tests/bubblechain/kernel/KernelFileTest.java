@@ -49,7 +49,7 @@ class KernelFileTest {
                 + " u*\u0435xp(u);  ^",
         "\uff55          | the character U+FF55 (FULLWIDTH LATIN SMALL LETTER U) has no meaning in a formula | 1 |"
                 + " \uff55;^",
-        "1+beta(u)       | no function 'beta'; known are gamma, digamma, polygamma, zeta, polylog, ln, sqrt, exp, sin,"
+        "1+beta(u)       | no function 'beta'; known are gamma, digamma, polygamma, zeta, polylog, unit_3f2, ln, sqrt, exp, sin,"
                 + " cos, sum (for a product write beta*(...)) | 3 | 1+beta(u);  ^^^^",
         "sum(k,1,3,k*v)  | the name 'v' has no meaning; the variable is u, other names are set in [definitions] or"
                 + " [parameters] | 13 | sum(k,1,3,k*v);            ^"
@@ -110,7 +110,7 @@ class KernelFileTest {
         assertRefused(good.replacing("\"0\"", "0"), "FILE, line 5, column 1: numbers are written as strings so that they stay"
                 + " exact: mass_dimension = \"0\"");
         assertRefused(good.replacing("borel", "borrel"),
-                "FILE, line 6, column 1: form 'borrel' is not one of borel, d-dimensional");
+                "FILE, line 6, column 1: form 'borrel' is not one of borel, d-dimensional, combination");
         assertRefused(good.replacing("borel", "d-dimensional"),
                 "FILE, line 7, column 1: form \"d-dimensional\" takes G, not T");
         assertRefused(good.replacing("\"mine\"", "\"My Kernel\""),

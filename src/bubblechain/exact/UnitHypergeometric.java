@@ -1,0 +1,156 @@
+package bubblechain.exact;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * W(z) = sum_{k&gt;=0} [k! Gamma(z)/Gamma(z+k+1)]^2 = z^(-2) 3F2(1, 1, 1; 1+z, 1+z; 1), the function of the inclusive
+ * widths of heavy quarks, and its derivatives.
+ *
+ * <p>W(z) = int int (x y)^(z-1)/(x + y - x y) over the unit square; the relation of neighbours
+ * W(z) = W(z+1) z/(2(2z-1)) + 3/(2z(2z-1)), iterated, gives a series that converges like 4^(-n) for every z,
+ *
+ * <p>W(z) = (3/4) sum_{n&gt;=0} 4^(-n) (z)_n/[(z-1/2)_(n+1) (z+n)],
+ *
+ * <p>with simple poles at z = 1/2, -1/2, -3/2, ... and at 0, -1, -2, ... only. From n = N on the sum is the N-th factor
+ * 4^(-N) (z)_N/(z-1/2)_(N+1) times R(z) with |R| &lt;= (4/3)/|z+N| where Re z + N &gt; 0, since |w| &lt;= |w+1/2| there;
+ * Cauchy's estimate on |y| = 1/2 bounds the Taylor coefficients of R.
+ */
+public final class UnitHypergeometric {
+    /** Largest order of a derivative in formulas. */
+    public static final int LARGEST_ORDER = 100;
+    /** Largest argument of a constant. */
+    public static final int LARGEST_ARGUMENT = 200;
+
+    private static final int GUARD_BITS = 24;
+    private static final int LEAST_BITS = 64;
+    private static final Rational HALF = Rational.HALF;
+    private static final Rational THREE_HALVES = Rational.of(3, 2);
+    /** Bound of 2^(-j) |R_j| if Re z + N &gt;= 1: (4/3)/(1/2), rounded up. */
+    private static final long TAIL_FACTOR = 3;
+
+    private UnitHypergeometric() {}
+
+    /** True at a pole of W. */
+    public static boolean isPole(Rational z) {
+        return z.signum() <= 0 && z.isInteger() || z.compareTo(HALF) <= 0 && z.add(HALF).isInteger();
+    }
+
+    /**
+     * The Taylor coefficients W^(k)(z)/k! for k below {@code count}.
+     *
+     * @param bits working precision; the precision of the k-th coefficient is relative to 2^k
+     * @throws ArithmeticException if z is a pole, or cannot be told from one
+     */
+    public static Ball[] taylor(Ball z, int count, int bits) {
+        int working = bits + GUARD_BITS;
+        long first = Math.max(0, 1 - z.midpoint().subtract(z.radius().toRational()).floor().longValueExact());
+        long last = Math.max(first, 1) + working / 2 + 2L * count;
+        Ball[] factor = new Ball[count];
+        Arrays.fill(factor, Ball.ZERO);
+        factor[0] = Ball.of(Rational.of(3, 4), working);
+        overLinear(factor, z.subtract(Ball.of(HALF, working), working), working);
+        Ball[] sum = new Ball[count];
+        Arrays.fill(sum, Ball.ZERO);
+        for (long n = 0; ; n++) {
+            // the terms fall like 4^(-n), and with them the digits that are needed
+            int current = (int) Math.max(LEAST_BITS, working - 2 * Math.max(0, n - first));
+            Ball shifted = z.add(Rational.of(n), working);
+            if (n == last) {
+                return withTail(sum, factor);
+            }
+            Ball[] term = factor.clone();
+            overLinear(term, shifted, current);
+            for (int k = 0; k < count; k++) {
+                sum[k] = sum[k].add(term[k], working);
+            }
+            timesLinear(factor, shifted, current);
+            overLinear(factor, shifted.add(HALF, working), current);
+            for (int k = 0; k < count; k++) {
+                factor[k] = factor[k].shift(-2);
+            }
+        }
+    }
+
+    /** series (c + y). */
+    private static void timesLinear(Ball[] series, Ball c, int bits) {
+        for (int k = series.length - 1; k >= 0; k--) {
+            Ball product = series[k].multiply(c, bits);
+            series[k] = k == 0 ? product : product.add(series[k - 1], bits);
+        }
+    }
+
+    /** series/(c + y). */
+    private static void overLinear(Ball[] series, Ball c, int bits) {
+        Ball inverse = Ball.ONE.divide(c, bits);
+        for (int k = 0; k < series.length; k++) {
+            Ball value = k == 0 ? series[k] : series[k].subtract(series[k - 1], bits);
+            series[k] = value.multiply(inverse, bits);
+        }
+    }
+
+    private static Ball[] withTail(Ball[] sum, Ball[] factor) {
+        Magnitude convolution = Magnitude.ZERO;
+        Ball[] result = new Ball[sum.length];
+        for (int k = 0; k < sum.length; k++) {
+            convolution = convolution.scale(1).add(factor[k].upperBound());
+            result[k] = sum[k].addError(convolution.multiply(Magnitude.of(TAIL_FACTOR)));
+        }
+        return result;
+    }
+
+    /**
+     * W^(n)(z) exactly, in terms of its Taylor coefficients at a point of [1, 2).
+     *
+     * @throws DomainException at a pole
+     */
+    static ExactConstant value(int n, Rational z) {
+        if (isPole(z)) {
+            throw new DomainException("unit_3f2 has a pole at " + z);
+        }
+        Rational anchor = anchor(z);
+        List<ExactConstant> values = new ArrayList<>();
+        for (int k = 0; k <= n; k++) {
+            values.add(coefficient(k, anchor).multiply(Rational.of(ExactFunctions.factorial(k))));
+        }
+        return new UnitRecurrence<>(
+                        ExactConstant::add, ExactConstant::multiply, ExactConstant::of,
+                        (c, power) -> ExactConstant.of(c.power(-power)))
+                .from(values, anchor, z.subtract(anchor).intValueExact())
+                .get(n);
+    }
+
+    /** The point of [1, 2) that differs from z by an integer. */
+    public static Rational anchor(Rational z) {
+        return z.subtract(Rational.of(z.floor())).add(1);
+    }
+
+    /**
+     * W^(k)(s)/k!, for s in [1, 2). In closed form W(1) = zeta(2), W'(1) = -2 sum H_n/n^2 = -4 zeta(3),
+     * W''(1) = sum (4 H_n^2 + 2 H_n^(2))/n^2 = 41 zeta(4)/2 by the sums of Euler, and W(3/2) = 4 pi - 12, since the residue
+     * of W at 1/2 is pi/2 (the terms of the sum over k go like Gamma(z)^2 k^(-2z)).
+     */
+    public static ExactConstant coefficient(int k, Rational s) {
+        return closedForm(k, s).orElseGet(() -> ExactConstant.opaque(
+                        "unit_3f2(" + k + "," + s + ")",
+                        bits -> taylor(Ball.of(s, bits + GUARD_BITS), k + 1, bits + 2 * k)[k].multiply(
+                                Rational.of(ExactFunctions.factorial(k)), bits))
+                .divide(Rational.of(ExactFunctions.factorial(k))));
+    }
+
+    private static Optional<ExactConstant> closedForm(int k, Rational s) {
+        if (s.equals(THREE_HALVES) && k == 0) {
+            return Optional.of(ExactConstant.PI.multiply(Rational.of(4)).subtract(ExactConstant.of(12)));
+        }
+        if (!s.equals(Rational.ONE) || k > 2) {
+            return Optional.empty();
+        }
+        return Optional.of(switch (k) {
+            case 0 -> ExactFunctions.zeta(2);
+            case 1 -> ExactFunctions.zeta(3).multiply(Rational.of(-4));
+            default -> ExactFunctions.zeta(4).multiply(Rational.of(41, 4));
+        });
+    }
+}
