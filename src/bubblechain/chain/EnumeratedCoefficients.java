@@ -29,15 +29,10 @@ import java.util.stream.IntStream;
  * @implNote the cost is that of one rational number for each term of the result; series are never multiplied
  */
 final class EnumeratedCoefficients {
-    /** The factor of a monomial of some weight in order n. */
-    private interface Factor {
-        Rational at(int n, int weight);
-    }
-
     private final int loops;
     private final int mostTerms;
     private final List<GradedSum.Summand> summands = new ArrayList<>();
-    private final List<Factor> factors = new ArrayList<>();
+    private final List<GradedCoefficients.Factor> factors = new ArrayList<>();
     private final List<BigInteger> factorials = new ArrayList<>();
 
     private EnumeratedCoefficients(int loops, int mostTerms) {
@@ -57,21 +52,15 @@ final class EnumeratedCoefficients {
      * @throws DomainException if there are more terms
      */
     static Optional<List<ExactConstant>> of(Kernel kernel, int loops, Scales scales, int mostTerms) {
-        if (kernel.sudakov().isPresent()) {
-            return Optional.empty();
-        }
         EnumeratedCoefficients coefficients = new EnumeratedCoefficients(loops, mostTerms);
         boolean graded = kernel.transform().isPresent()
                 ? coefficients.addTransform(kernel.transform().get().timesExponential(scales.couplingLog()))
-                        && (kernel.anomalousDimension().isEmpty()
-                                || coefficients.addSubtraction(
-                                        kernel.anomalousDimension().get(), scales.subtractionLog()))
-                : coefficients.addAnomalousDimension(
-                        kernel.anomalousDimension().orElseThrow(), scales.couplingLog());
+                        && (!kernel.isRenormalised() || coefficients.addSubtraction(kernel, scales))
+                : coefficients.addAnomalousDimension(kernel, scales.couplingLog());
         return graded ? Optional.of(coefficients.sums()) : Optional.empty();
     }
 
-    private static Optional<List<GradedTerm>> graded(AnalyticFunction function, int end) {
+    static Optional<List<GradedTerm>> graded(AnalyticFunction function, int end) {
         Optional<NormalForm> form = function.normalForm();
         return form.flatMap(f -> Expansion.about(Rational.ZERO, f).graded(end));
     }
@@ -90,31 +79,49 @@ final class EnumeratedCoefficients {
         return value.isZero() ? value : value.multiply(Rational.of(factorial));
     }
 
-    private boolean addSubtraction(AnalyticFunction gamma, ExactConstant log) {
-        return addRescaled(gamma, log, 1, Rational.of(-1, 2));
+    private boolean addSubtraction(Kernel kernel, Scales scales) {
+        ExactConstant log = scales.subtractionLog();
+        if (kernel.anomalousDimension().isPresent()) {
+            return addRescaled(coefficients(kernel.anomalousDimension().get(), loops + 1), log, 1, Rational.of(-1, 2));
+        }
+        Optional<GradedSudakov> sudakov = GradedSudakov.of(kernel.sudakov().orElseThrow(), loops + 2);
+        return sudakov.isPresent()
+                && addRescaled(Optional.of(sudakov.get().subtraction(scales.operatorLog())), log, 1, Rational.of(-1))
+                && (log.isZero() || addRescaled(Optional.of(sudakov.get().cuspAtZero()), log, 2, Rational.of(-1)));
     }
 
-    private boolean addAnomalousDimension(AnalyticFunction gamma, ExactConstant log) {
-        return addRescaled(gamma, log, 0, Rational.ONE);
+    private boolean addAnomalousDimension(Kernel kernel, ExactConstant log) {
+        if (kernel.anomalousDimension().isPresent()) {
+            return addRescaled(coefficients(kernel.anomalousDimension().get(), loops), log, 0, Rational.ONE);
+        }
+        return addRescaled(
+                GradedSudakov.of(kernel.sudakov().orElseThrow(), loops + 1).map(GradedSudakov::anomalousDimension),
+                log, 0, Rational.TWO);
+    }
+
+    private static Optional<List<GradedCoefficients>> coefficients(AnalyticFunction function, int end) {
+        return graded(function, end).map(list -> list.stream().map(GradedCoefficients::of).toList());
     }
 
     /** scale n! [u^(n+offset)] e^(log u) sum_k (gamma_k/k!) u^k. */
-    private boolean addRescaled(AnalyticFunction gamma, ExactConstant log, int offset, Rational scale) {
-        int end = loops + offset;
-        Optional<List<GradedTerm>> terms = graded(gamma, end);
+    private boolean addRescaled(
+            Optional<List<GradedCoefficients>> terms, ExactConstant log, int offset, Rational scale) {
         if (terms.isEmpty()) {
             return false;
         }
+        int end = loops + offset;
         Rational r = log.rationalPart();
         List<ExactConstant> exponent = new ArrayList<>();
-        for (int k = 0; k < end; k++) {
+        // a monomial may have a larger weight than its order: nothing of it is cut off by the product
+        int longest = terms.get().stream().mapToInt(t -> t.summand().series().length()).max().orElse(0);
+        for (int k = 0; k < Math.max(end, longest); k++) {
             exponent.add(k == 1 ? log.subtract(ExactConstant.of(r)) : ExactConstant.ZERO);
         }
         Optional<GradedSeries> powers = GradedSeries.exp(exponent);
         if (powers.isEmpty()) {
             return false;
         }
-        for (GradedTerm term : terms.get()) {
+        for (GradedCoefficients term : terms.get()) {
             RescaledFactors rescaled = new RescaledFactors(term, r);
             int count = log.equals(ExactConstant.of(r)) ? 1 : end;
             for (int m = 0; m < count; m++) {
@@ -137,12 +144,12 @@ final class EnumeratedCoefficients {
 
     /** V_w(q) of a term, kept once it is known. */
     private final class RescaledFactors {
-        private final GradedTerm term;
+        private final GradedCoefficients term;
         private final List<Rational> powers = new ArrayList<>(List.of(Rational.ONE));
         private final Rational r;
         private final Map<Integer, List<Rational>> known = new HashMap<>();
 
-        RescaledFactors(GradedTerm term, Rational r) {
+        RescaledFactors(GradedCoefficients term, Rational r) {
             this.term = term;
             this.r = r;
         }
@@ -161,7 +168,7 @@ final class EnumeratedCoefficients {
             }
             Rational sum = Rational.ZERO;
             for (int k = r.isZero() ? q : 0; k <= q; k++) {
-                Rational value = term.factor(k - weight);
+                Rational value = term.factors().at(k, weight);
                 if (!value.isZero()) {
                     sum = sum.add(value.divide(Rational.of(factorials.get(k))).multiply(powers.get(q - k)));
                 }
@@ -178,7 +185,7 @@ final class EnumeratedCoefficients {
                 .toList();
     }
 
-    /** c_n has at most the monomials through weight n + 1, or n without an anomalous dimension. */
+    /** c_n has at most the monomials through weight n + 1, n without an anomalous dimension, n + 2 with double logarithms. */
     private void requireSize(int[] sizes) {
         long total = 0;
         long one = sizes.length > 0 ? sizes[0] : 0;

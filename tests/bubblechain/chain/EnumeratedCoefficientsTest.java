@@ -47,7 +47,8 @@ class EnumeratedCoefficientsTest {
 
     private static List<ExactConstant> bySeries(Kernel kernel, int loops, Scales scales) {
         return new RingCoefficients<>(ExactRing.INSTANCE, (function, end) -> {
-                    boolean anomalous = kernel.anomalousDimension().filter(function::equals).isPresent();
+                    boolean anomalous = kernel.anomalousDimension().filter(function::equals).isPresent()
+                            || kernel.sudakov().filter(s -> s.cusp() == function || s.slope() == function).isPresent();
                     return anomalous
                             ? tree(function, "a", ExactConstant.ZERO, end)
                             : tree(function, "u", scales.couplingLog(), end);
@@ -60,7 +61,8 @@ class EnumeratedCoefficientsTest {
     }
 
     static List<String> kernels() {
-        return KernelLibrary.names();
+        // the widths hold numbers known by their balls only
+        return KernelLibrary.names().stream().filter(name -> !name.contains("width")).toList();
     }
 
     @ParameterizedTest
