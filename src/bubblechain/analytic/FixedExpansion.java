@@ -7,6 +7,7 @@ import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import bubblechain.series.FixedSeries;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -158,12 +159,29 @@ public record FixedExpansion(Rational radius, List<Ball> coefficients, int shift
                         .reduce(FixedSeries::add)
                         .orElseThrow();
             }
-            // the linear factors taken out of the gammas are common to all: they are put back last
+            // the linear factors taken out of the gammas are common to all: they are put back last, but for those that
+            // every member cancels, which would cost digits if they were multiplied in and out again
+            Map<Rational, Integer> cancelled = cancelled(members, product.removed());
+            Map<Rational, Integer> left = new HashMap<>(product.removed());
+            cancelled.forEach((root, power) -> left.merge(root, -power, Integer::sum));
             FixedSeries sum = members.stream()
-                    .map(t -> t.applyTo(transcendental(t), Map.of(), radius, shift))
+                    .map(t -> t.applyTo(transcendental(t), cancelled, radius, shift))
                     .reduce(FixedSeries::add)
                     .orElseThrow();
-            return LinearFactors.apply(sum.multiply(product.series()), product.removed(), radius);
+            return LinearFactors.apply(sum.multiply(product.series()), left, radius);
+        }
+
+        /** The poles among the factors that are zeros of the rational functions of all members, with negative powers. */
+        private static Map<Rational, Integer> cancelled(List<FactoredTerm> members, Map<Rational, Integer> removed) {
+            Map<Rational, Integer> result = new HashMap<>();
+            removed.forEach((root, power) -> {
+                int zeros = members.stream().mapToInt(t -> t.roots().getOrDefault(root, 0)).min().orElse(0);
+                int common = Math.min(zeros, -power);
+                if (common > 0) {
+                    result.put(root, -common);
+                }
+            });
+            return result;
         }
 
         private FixedSeries transcendental(FactoredTerm term) {

@@ -4,7 +4,6 @@ import bubblechain.analytic.TermKey.GammaFactor;
 import bubblechain.analytic.TermKey.PolygammaFactor;
 import bubblechain.analytic.TermKey.UnitFactor;
 import bubblechain.exact.Ball;
-import bubblechain.exact.BallFunctions;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.ExactFunctions;
 import bubblechain.exact.Rational;
@@ -204,7 +203,7 @@ final class GammaProducts {
             }
             int m = n + k;
             Ball value = m == 0
-                    ? BallFunctions.digamma(Ball.of(factor.shift(), bits), bits)
+                    ? ExactFunctions.digamma(factor.shift()).toBall(bits)
                     : ring.hurwitz(m + 1, factor.shift()).multiply(weight, bits);
             values.set(k, m == 0 || m % 2 == 1 ? value : value.negate());
         }

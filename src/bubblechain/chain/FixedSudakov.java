@@ -9,8 +9,10 @@ import bubblechain.exact.Rational;
 import bubblechain.kernel.SudakovSubtraction;
 import bubblechain.series.BallRing;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /**
  * The subtraction of double logarithms on the fixed-point route.
@@ -27,32 +29,36 @@ record FixedSudakov(NormalForm cusp, NormalForm slope, Rational radius, int bits
     /** H_k for k up to {@link Chain#LARGEST_LOOPS}. */
     private static final double HARMONIC = 10;
 
-    /** Empty if a function has no normal form or no singular point. */
+    /** Empty if a function has no normal form. */
     static Optional<FixedSudakov> of(SudakovSubtraction subtraction, int bits) {
         Optional<NormalForm> cusp = subtraction.cusp().normalForm();
         Optional<NormalForm> slope = subtraction.slope().normalForm();
         if (cusp.isEmpty() || slope.isEmpty()) {
             return Optional.empty();
         }
-        Optional<Rational> first = FixedExpansion.radius(cusp.get());
-        Optional<Rational> second = FixedExpansion.radius(slope.get());
-        if (first.isEmpty() || second.isEmpty()) {
-            return Optional.empty();
-        }
-        Rational radius = List.of(first.get(), second.get(), Rational.ONE).stream().min(Rational::compareTo).orElseThrow();
+        Rational radius = Stream.of(cusp.get(), slope.get())
+                .flatMap(form -> FixedExpansion.radius(form).stream())
+                .min(Rational::compareTo)
+                .filter(r -> r.compareTo(Rational.ONE) < 0)
+                .orElse(Rational.ONE);
         return Optional.of(new FixedSudakov(cusp.get(), slope.get(), radius, bits));
     }
 
     /** The coefficients below order {@code count}; empty if a number leaves the fixed-point range. */
     Optional<SudakovCoefficients<Ball>> coefficients(int count) {
-        Optional<FixedExpansion> first = FixedExpansion.of(cusp, count, bits);
-        Optional<FixedExpansion> second = FixedExpansion.of(slope, count, bits);
+        Optional<List<Ball>> first = expanded(cusp, count);
+        Optional<List<Ball>> second = expanded(slope, count);
         if (first.isEmpty() || second.isEmpty()) {
             return Optional.empty();
         }
-        return Optional.of(SudakovCoefficients.of(
-                BallRing.of(bits, 2), FixedCoefficients.unscaled(first.get(), count, bits),
-                FixedCoefficients.unscaled(second.get(), count, bits), logarithm(count)));
+        return Optional.of(SudakovCoefficients.of(BallRing.of(bits, 2), first.get(), second.get(), logarithm(count)));
+    }
+
+    /** The cusp part of a combination may vanish identically. */
+    private Optional<List<Ball>> expanded(NormalForm form, int count) {
+        return form.isZero()
+                ? Optional.of(Collections.nCopies(count, Ball.ZERO))
+                : FixedExpansion.of(form, count, bits).map(e -> FixedCoefficients.unscaled(e, count, bits));
     }
 
     /** {@link SudakovCoefficients#bubbleLogarithm} as balls; 2^k (1 - zeta(k)) is small, so it takes k bits more. */

@@ -2,6 +2,7 @@ package bubblechain.kernel;
 
 import bubblechain.exact.Rational;
 import bubblechain.toml.TomlSection;
+import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.ArrayDeque;
@@ -25,6 +26,9 @@ final class NestedLoading {
         }
         if (++count > LARGEST_COUNT) {
             throw new KernelException("the combination " + open.getLast() + " has more than " + LARGEST_COUNT + " parts in all");
+        }
+        if (!open.isEmpty() && KernelLibrary.isPath(place) && !Files.isReadable(Path.of(place))) {
+            throw new KernelException("the part " + nameOrPath + " cannot be read: there is no readable file " + place);
         }
         TomlSection file = KernelLibrary.open(place);
         open.push(place);

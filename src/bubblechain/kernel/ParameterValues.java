@@ -4,7 +4,6 @@ import bubblechain.exact.Rational;
 import bubblechain.formula.Constants;
 import bubblechain.formula.Definitions;
 import bubblechain.formula.Formula;
-import bubblechain.toml.TomlException;
 import bubblechain.toml.TomlSection;
 import java.util.List;
 import java.util.Map;
@@ -39,7 +38,7 @@ final class ParameterValues {
         for (String name : given.keySet()) {
             if (!values.containsKey(name)) {
                 String known = values.isEmpty() ? "it has none" : "it has " + String.join(", ", values.keySet());
-                throw new TomlException(top.file() + ": the kernel has no parameter '" + name + "'; " + known);
+                throw new KernelException(top.file() + ": the kernel has no parameter '" + name + "'; " + known);
             }
         }
         return new ParameterValues(values);
@@ -54,8 +53,9 @@ final class ParameterValues {
         Rational value = given.containsKey(name) ? given.get(name) : entry.rational("default");
         boolean integer = entry.optionalText("integer").orElse("no").equals("yes");
         if (value.compareTo(from) < 0 || value.compareTo(to) > 0 || integer && !value.isInteger()) {
-            throw new TomlException("the parameter " + name + " is " + (integer ? "an integer " : "") + "between " + from
-                    + " and " + to + ", got " + value);
+            String reason = "the parameter " + name + " is " + (integer ? "an integer " : "") + "between " + from + " and " + to
+                    + ", got " + value;
+            throw given.containsKey(name) ? new KernelException(reason) : entry.error("default", reason);
         }
         return value;
     }
