@@ -46,21 +46,13 @@ record FactoredTerm(
                 below.multiply(below.coefficient(0).inverse()));
     }
 
-    /** Takes the rational roots out; the rest keeps the value at u = 0. */
+    /** Takes the small rational roots out; the rest keeps the value at u = 0. */
     private static Polynomial split(Polynomial polynomial, int sign, Map<Rational, Integer> roots) {
-        Polynomial rest = polynomial;
-        List<Polynomial> factors = RealRoots.squarefreeFactors(polynomial);
-        for (int k = 0; k < factors.size(); k++) {
-            for (Interval interval : RealRoots.of(factors.get(k))) {
-                if (interval.isPoint()) {
-                    Rational root = interval.lower();
-                    roots.merge(root, sign * (k + 1), Integer::sum);
-                    Polynomial linear = Polynomial.linear(Rational.ONE, root.inverse().negate());
-                    rest = rest.divideExactly(linear.power(k + 1));
-                }
-            }
-        }
-        return rest;
+        RationalRoots.Split split = RationalRoots.of(polynomial);
+        split.roots().forEach((root, power) -> roots.merge(root, sign * power, Integer::sum));
+        Polynomial rest = split.rest();
+        // the factors (1 - u/root) are one at u = 0
+        return rest.multiply(polynomial.coefficient(0).divide(rest.coefficient(0)));
     }
 
     /** The exponential and the gammas alone, which terms can share. */

@@ -4,7 +4,9 @@ import bubblechain.exact.Rational;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Collections;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Set;
 
 /**
  * The real roots of a squarefree polynomial over Q, isolated by Sturm's theorem: rational ones exactly, the others in
@@ -36,16 +38,42 @@ final class RealRoots {
         }
     }
 
-    /** All real roots in increasing order. */
+    /** All real roots in increasing order. Small rational roots are split off first, which spares Sturm's chain most of its work. */
     static List<Interval> of(Polynomial squarefree) {
         if (squarefree.degree() < 1) {
             return List.of();
         }
+        RationalRoots.Split split = RationalRoots.of(squarefree);
+        List<Interval> found = new ArrayList<>();
+        split.roots().keySet().forEach(root -> found.add(new Interval(root, root)));
+        if (split.rest().degree() > 0) {
+            for (Interval interval : bySturm(split.rest())) {
+                found.add(apart(split.rest(), interval, split.roots().keySet()));
+            }
+        }
+        found.sort(Comparator.comparing(Interval::lower));
+        return found;
+    }
+
+    private static List<Interval> bySturm(Polynomial squarefree) {
         RealRoots roots = new RealRoots(squarefree);
         Rational bound = roots.cauchyBound();
         List<Interval> found = new ArrayList<>();
         roots.isolate(bound.negate(), bound, found);
         return found.stream().map(roots::recogniseRational).toList();
+    }
+
+    /** The interval made so narrow that it holds none of the roots of another factor. */
+    private static Interval apart(Polynomial polynomial, Interval interval, Set<Rational> others) {
+        Interval current = interval;
+        for (Rational other : others) {
+            while (!current.isPoint()
+                    && other.compareTo(current.lower()) >= 0
+                    && other.compareTo(current.upper()) <= 0) {
+                current = refine(polynomial, current, current.width());
+            }
+        }
+        return current;
     }
 
     /** The interval halved until it is narrower than {@code width}. */
