@@ -157,7 +157,7 @@ public final class Validation {
             return new Finding(file, "no pole at u = " + a.u(), absent, absent ? "none" : "there is a pole");
         }
         KernelCheck.SameAs same = (KernelCheck.SameAs) check;
-        Kernel other = KernelLibrary.load(same.kernel());
+        Kernel other = KernelLibrary.loadMentioned(same.kernel(), file);
         boolean equal = equal(kernel.transform(), other.transform())
                 && equal(kernel.anomalousDimension(), other.anomalousDimension())
                 && equal(kernel.sudakov().map(SudakovSubtraction::cusp), other.sudakov().map(SudakovSubtraction::cusp))

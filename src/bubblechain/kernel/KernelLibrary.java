@@ -46,6 +46,17 @@ public final class KernelLibrary {
         return new NestedLoading().load(nameOrPath, parameters);
     }
 
+    /**
+     * The kernel a file mentions: a built-in name, or a path, a relative one from the folder of that file.
+     *
+     * @param nameOrPath what the file says
+     * @param file       the path or the built-in name of the file
+     * @throws KernelException if there is no such kernel
+     */
+    public static Kernel loadMentioned(String nameOrPath, String file) {
+        return load(NestedLoading.place(nameOrPath, file));
+    }
+
     /** True if this is the name of a built-in kernel. */
     public static boolean contains(String name) {
         return resources().containsKey(name);

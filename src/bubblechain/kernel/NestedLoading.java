@@ -19,7 +19,7 @@ final class NestedLoading {
 
     /** @throws KernelException if there is no such kernel, or it contains itself */
     Kernel load(String nameOrPath, Map<String, Rational> parameters) {
-        String place = place(nameOrPath);
+        String place = open.isEmpty() ? nameOrPath : place(nameOrPath, open.getFirst());
         if (open.contains(place)) {
             throw new KernelException("the combination " + open.getLast() + " contains itself: " + open.getFirst()
                     + " has the part " + nameOrPath);
@@ -38,12 +38,12 @@ final class NestedLoading {
     }
 
     /** A built-in name, or a path, relative ones from the folder of the file that mentions it. */
-    private String place(String nameOrPath) {
-        if (!KernelLibrary.isPath(nameOrPath) || open.isEmpty() || !KernelLibrary.isPath(open.getFirst())) {
+    static String place(String nameOrPath, String file) {
+        if (!KernelLibrary.isPath(nameOrPath) || !KernelLibrary.isPath(file)) {
             return nameOrPath;
         }
         try {
-            String path = Path.of(open.getFirst()).resolveSibling(nameOrPath).normalize().toString();
+            String path = Path.of(file).resolveSibling(nameOrPath).normalize().toString();
             return KernelLibrary.isPath(path) ? path : "./" + path;
         } catch (InvalidPathException e) {
             throw new KernelException("'" + nameOrPath + "' is not a path");

@@ -46,6 +46,16 @@ class ValidationTest {
     }
 
     @Test
+    void aFileNamedByItsNeighbourIsFoundFromAnyFolder() throws IOException {
+        Files.writeString(folder.resolve("other.toml"), KernelText.of("1/(1-u)").text());
+        String path = KernelText.of("(1+u)/(1-u^2)")
+                .and("[[check]]\nsource = \"test\"\nkind = \"same-as\"\nkernel = \"other.toml\"")
+                .in(folder);
+        assertThat(Validation.of(path)).contains(
+                new Validation.Finding(path, "the same as other.toml", true, "identical normal forms"));
+    }
+
+    @Test
     void equalityThatOnlyBallsShowIsSaidToBeUnproved() {
         String path = KernelText.of("gamma(1/4)*gamma(3/4)")
                 .and("[[check]]\nsource = \"reflection\"\nkind = \"coefficient\"\nn = \"0\"\nvalue = \"pi*sqrt(2)\"")
