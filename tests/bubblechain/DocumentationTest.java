@@ -1,17 +1,18 @@
 package bubblechain;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import bubblechain.DocumentationPage.Block;
+import bubblechain.DocumentationPage.Shown;
 import bubblechain.assessment.Validation;
 import bubblechain.cli.Main;
 import bubblechain.fixedorder.SeriesFile;
 import bubblechain.formula.Function;
 import bubblechain.kernel.KernelLibrary;
 import java.io.ByteArrayOutputStream;
-import java.io.File;
 import java.io.IOException;
 import java.io.PrintStream;
-import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -19,8 +20,6 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.DynamicTest;
@@ -29,193 +28,108 @@ import org.junit.jupiter.api.TestFactory;
 import org.junit.jupiter.api.io.TempDir;
 
 /**
- * README.md tells the truth: its commands are run and their output compared, its files are read, its program is compiled.
- *
- * <p>A fenced block {@code console} holds commands, lines that start with "$ ", each followed by what it prints; a line
- * "..." stands for any number of lines. A fenced block {@code toml} or {@code java} whose first line is a comment with a
- * file name is a file that commands may name. With {@code -Dbubblechain.refresh=true} the output is written anew: all of
- * it, or the paragraphs whose first words stand in a comment {@code <!-- show: A | B -->} before the block.
+ * README.md and kernels/README.md tell the truth: their commands are run and the output compared, their files are read, the
+ * program is compiled. With {@code -Dbubblechain.refresh=true} the output is written anew; {@link DocumentationPage} says how
+ * the blocks of a page are written.
  */
 class DocumentationTest {
-    private static final Path README = Path.of("README.md");
-    private static final String JAR = "java -jar target/bubblechain.jar";
-    private static final String CLASS_PATH = "java -cp target/bubblechain.jar";
-    private static final String ANYTHING = "...";
-    private static final Pattern FILE_NAME = Pattern.compile("(?:#|//) (\\S+\\.(?:toml|java))");
-    private static final Pattern SHOW = Pattern.compile("<!-- show: (.*) -->");
+    private static final DocumentationPage README = new DocumentationPage(Path.of("README.md"));
+    private static final DocumentationPage OWN_KERNEL = new DocumentationPage(Path.of("kernels", "README.md"));
+    private static final List<DocumentationPage> PAGES = List.of(README, OWN_KERNEL);
 
     @TempDir
-    private static Path folder = Path.of("");
-
-    /** A fenced block: its language, the lines between the fences, and what to show of each output. */
-    private record Block(String language, int first, List<String> lines, List<String> show) {
-        Optional<String> fileName() {
-            Matcher matcher = FILE_NAME.matcher(lines.isEmpty() ? "" : lines.get(0));
-            return matcher.matches() ? Optional.of(matcher.group(1)) : Optional.empty();
-        }
-    }
-
-    /** A command and the lines shown below it. */
-    private record Shown(String command, List<String> output) {}
+    private static Path temporary = Path.of("");
 
     @BeforeAll
-    static void writeTheFilesOfTheReadme() throws IOException {
-        if (Boolean.getBoolean("bubblechain.refresh")) {
-            refresh();
-        }
-        writeFiles();
-    }
-
-    private static void writeFiles() throws IOException {
-        for (Block block : blocks(Files.readAllLines(README))) {
-            Optional<String> name = block.fileName();
-            if (name.isPresent()) {
-                Files.write(folder.resolve(name.get()), block.lines());
+    static void writeTheFilesOfThePages() throws IOException {
+        for (DocumentationPage page : PAGES) {
+            page.writeFiles(folder(page));
+            if (Boolean.getBoolean("bubblechain.refresh")) {
+                page.refresh(PageCommands.run(page, folder(page))::output);
             }
         }
     }
 
-    private static List<Block> blocks(List<String> page) {
-        List<Block> blocks = new ArrayList<>();
-        for (int i = 0; i < page.size(); i++) {
-            if (page.get(i).startsWith("```")) {
-                int end = i + 1;
-                while (!page.get(end).equals("```")) {
-                    end++;
-                }
-                Matcher show = SHOW.matcher(i == 0 ? "" : page.get(i - 1));
-                List<String> kept = show.matches() ? List.of(show.group(1).split(" \\| ")) : List.of();
-                blocks.add(new Block(page.get(i).substring(3), i + 1, List.copyOf(page.subList(i + 1, end)), kept));
-                i = end;
-            }
-        }
-        return blocks;
-    }
-
-    private static List<Block> blocks(String language) throws IOException {
-        return blocks(Files.readAllLines(README)).stream()
-                .filter(block -> block.language().equals(language))
-                .toList();
-    }
-
-    private static List<Shown> commands(Block block) {
-        List<Shown> commands = new ArrayList<>();
-        for (String line : block.lines()) {
-            if (line.startsWith("$ ")) {
-                commands.add(new Shown(line.substring(2), new ArrayList<>()));
-            } else {
-                commands.get(commands.size() - 1).output().add(line);
-            }
-        }
-        return commands;
-    }
-
-    /** The part of a command line this test can run; empty for a build alone. */
-    private static Optional<String> runnable(String command) {
-        String last = command.substring(command.lastIndexOf("&& ") + 1).replaceFirst("^& ", "");
-        return last.startsWith("mvn ") ? Optional.empty() : Optional.of(last);
-    }
-
-    /** What a command prints on both streams. */
-    private static List<String> output(String command) {
-        try {
-            String text = command.startsWith(JAR) && !command.contains(".toml") ? here(command) : elsewhere(command);
-            return text.lines().map(String::stripTrailing).toList();
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
-    }
-
-    private static String here(String command) {
-        ByteArrayOutputStream bytes = new ByteArrayOutputStream();
-        PrintStream stream = new PrintStream(bytes, true, StandardCharsets.UTF_8);
-        Main.run(stream, stream, words(command.substring(JAR.length())).toArray(new String[0]));
-        return bytes.toString(StandardCharsets.UTF_8);
-    }
-
-    /** Runs a command that names a file of the page, in the folder of these files. */
-    private static String elsewhere(String command) throws IOException {
-        List<String> words = new ArrayList<>();
-        words.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
-        words.add("-cp");
-        words.add(absoluteClassPath());
-        if (command.startsWith(JAR)) {
-            words.add(Main.class.getName());
-            words.addAll(words(command.substring(JAR.length())));
-        } else {
-            assertThat(command).startsWith(CLASS_PATH);
-            words.addAll(words(command.substring(CLASS_PATH.length())));
-        }
-        ProcessBuilder builder = new ProcessBuilder(words).directory(folder.toFile()).redirectErrorStream(true);
-        builder.environment().keySet().removeAll(List.of("COLUMNS", "JAVA_TOOL_OPTIONS", "JDK_JAVA_OPTIONS"));
-        return new String(builder.start().getInputStream().readAllBytes(), StandardCharsets.UTF_8);
-    }
-
-    private static String absoluteClassPath() {
-        String path = System.getProperty("surefire.test.class.path", System.getProperty("java.class.path"));
-        return String.join(
-                File.pathSeparator,
-                Arrays.stream(path.split(File.pathSeparator)).map(entry -> Path.of(entry).toAbsolutePath().toString()).toList());
-    }
-
-    private static List<String> words(String arguments) {
-        return List.of(arguments.strip().split(" +"));
-    }
-
-    /** True if the lines are those of the pattern, in which a line "..." stands for any number of lines. */
-    private static boolean matches(List<String> pattern, List<String> lines) {
-        if (pattern.isEmpty()) {
-            return lines.isEmpty();
-        }
-        List<String> rest = pattern.subList(1, pattern.size());
-        if (!pattern.get(0).equals(ANYTHING)) {
-            return !lines.isEmpty()
-                    && lines.get(0).equals(pattern.get(0))
-                    && matches(rest, lines.subList(1, lines.size()));
-        }
-        for (int skipped = 0; skipped <= lines.size(); skipped++) {
-            if (matches(rest, lines.subList(skipped, lines.size()))) {
-                return true;
-            }
-        }
-        return false;
+    private static Path folder(DocumentationPage page) {
+        return temporary.resolve(page == README ? "readme" : "own-kernel");
     }
 
     @TestFactory
     Stream<DynamicTest> everyCommandOfTheReadmePrintsWhatIsShown() throws IOException {
-        List<Shown> all = blocks("console").stream().flatMap(block -> commands(block).stream()).toList();
-        assertThat(all).hasSizeGreaterThan(9);
-        return all.stream().filter(shown -> runnable(shown.command()).isPresent()).map(shown -> DynamicTest.dynamicTest(
+        assertThat(README.commands()).hasSizeGreaterThan(9);
+        return comparisons(README);
+    }
+
+    @TestFactory
+    Stream<DynamicTest> everyCommandOfThePageOnKernelsPrintsWhatIsShown() throws IOException {
+        assertThat(OWN_KERNEL.commands()).hasSizeGreaterThan(5);
+        return comparisons(OWN_KERNEL);
+    }
+
+    private static Stream<DynamicTest> comparisons(DocumentationPage page) throws IOException {
+        PageCommands commands = PageCommands.run(page, folder(page));
+        return page.commands().stream().filter(shown -> shown.runnable().isPresent()).map(shown -> DynamicTest.dynamicTest(
                 shown.command(), () -> {
-                    List<String> found = output(runnable(shown.command()).orElseThrow());
-                    assertThat(matches(shown.output(), found))
-                            .as("README shows%n%s%nthe program prints%n%s%n"
+                    List<String> found = commands.output(shown);
+                    assertThat(shown.matches(found))
+                            .as("%s shows%n%s%nthe program prints%n%s%n"
                                             + "If the program is right: mvn test -Dtest=DocumentationTest -Dbubblechain.refresh=true",
-                                    String.join("\n", shown.output()), String.join("\n", found))
+                                    page.path(), String.join("\n", shown.output()), String.join("\n", found))
                             .isTrue();
                 }));
     }
 
     @Test
     void theComparisonSeesOneChangedLine() {
-        List<String> pattern = List.of("a", ANYTHING, "c", ANYTHING);
-        assertThat(matches(pattern, List.of("a", "b", "b", "c"))).isTrue();
-        assertThat(matches(pattern, List.of("a", "b", "d"))).isFalse();
-        assertThat(matches(List.of("a"), List.of("a", "b"))).isFalse();
+        Shown pattern = new Shown("command", List.of("a", "...", "c", "..."), Optional.empty());
+        assertThat(pattern.matches(List.of("a", "b", "b", "c"))).isTrue();
+        assertThat(pattern.matches(List.of("a", "b", "d"))).isFalse();
+        assertThat(new Shown("command", List.of("a"), Optional.empty()).matches(List.of("a", "b"))).isFalse();
+        Shown lines = new Shown("command", List.of("...", "b  no"), Optional.of(new DocumentationPage.Kept(false, List.of(" no"))));
+        assertThat(lines.matches(List.of("a  yes", "b  no", "c  yes"))).isTrue();
+        assertThat(lines.matches(List.of("a  yes", "b  no", "c  no"))).isFalse();
     }
 
     @Test
-    void everyFileOfTheReadmeIsReadAndKeepsItsPromises() throws IOException {
-        List<Block> files = blocks("toml");
-        assertThat(files).hasSize(2);
-        for (Block block : files) {
-            Path file = folder.resolve(block.fileName().orElseThrow());
-            String name = block.lines().contains("form = \"borel\"")
-                    ? KernelLibrary.load(file.toString()).name()
-                    : SeriesFile.read(file).name();
-            assertThat(file.getFileName()).hasToString(name + ".toml");
-            assertThat(Validation.of(file.toString())).isNotEmpty().allMatch(Validation.Finding::passed);
+    void whatIsKeptOfAnOutputAreParagraphsOrLinesWithTheirContinuations() {
+        List<String> output = List.of("head", "", "Table", "a  yes", "b  no, and", "   more", "c  yes", "", "foot");
+        assertThat(new DocumentationPage.Kept(false, List.of("^b.*no")).of(output))
+                .containsExactly("...", "b  no, and", "   more");
+        assertThat(new DocumentationPage.Kept(true, List.of("Table")).of(output))
+                .containsExactly("...", "Table", "a  yes", "b  no, and", "   more", "c  yes", "...");
+    }
+
+    @Test
+    void everyFileOfThePagesIsReadAndKeepsItsPromises() throws IOException {
+        assertThat(README.blocks("toml")).hasSize(2);
+        assertThat(OWN_KERNEL.blocks("toml")).hasSizeGreaterThan(3);
+        for (DocumentationPage page : PAGES) {
+            for (Block block : page.blocks("toml")) {
+                Optional<String> fileName = block.fileName();
+                if (fileName.isPresent()) {
+                    requireGood(folder(page).resolve(fileName.get()), block.lines());
+                }
+            }
         }
+    }
+
+    private static void requireGood(Path file, List<String> lines) {
+        String name = lines.stream().anyMatch(line -> line.startsWith("form = "))
+                ? KernelLibrary.load(file.toString()).name()
+                : SeriesFile.read(file).name();
+        assertThat(file.getFileName()).hasToString(name + ".toml");
+        assertThat(Validation.of(file.toString())).isNotEmpty().allMatch(Validation.Finding::passed);
+    }
+
+    @Test
+    void thePageInTheFolderOfTheKernelsIsNoKernelAndNotInTheProgram() throws IOException {
+        assertThat(OWN_KERNEL.path()).exists();
+        assertThat(KernelLibrary.names()).contains("pole-mass").noneMatch(name -> name.contains("README"));
+        assertThat(Main.class.getResource("/kernels/heavy-quark/pole-mass.toml")).isNotNull();
+        assertThat(Main.class.getResource("/kernels/README.md")).isNull();
+        Path alone = Files.createDirectories(temporary.resolve("alone"));
+        Files.copy(OWN_KERNEL.path(), alone.resolve("README.md"));
+        assertThatThrownBy(() -> Validation.of(alone.toString())).hasMessageStartingWith("there is no .toml file below");
     }
 
     @Test
@@ -234,7 +148,7 @@ class DocumentationTest {
                     .toList();
             assertThat(examples).as(command).isNotEmpty();
             for (String example : examples) {
-                assertThat(status(new ByteArrayOutputStream(), words(example).toArray(new String[0])))
+                assertThat(status(new ByteArrayOutputStream(), PageCommands.words(example).toArray(new String[0])))
                         .as(example)
                         .isZero();
             }
@@ -254,7 +168,7 @@ class DocumentationTest {
 
     @Test
     void theReadmeNamesEveryCommandKeyAndFunction() throws IOException {
-        String page = Files.readString(README);
+        String page = Files.readString(README.path());
         List<String> wanted = new ArrayList<>(Arrays.stream(Function.values()).map(Function::text).toList());
         wanted.addAll(allowedKeys("kernel.toml", "form = \"borel\"\nqqqqqqqqqqqq = \"1\"\n"));
         wanted.addAll(allowedKeys("series.toml", "qqqqqqqqqqqq = \"1\"\n"));
@@ -266,7 +180,7 @@ class DocumentationTest {
 
     /** The keys a file may have, from the complaint about one it may not have. */
     private static List<String> allowedKeys(String name, String text) throws IOException {
-        Path file = Files.writeString(folder.resolve(name), text);
+        Path file = Files.writeString(temporary.resolve(name), text);
         String complaint = Validation.of(file.toString()).get(0).detail();
         assertThat(complaint).contains("; allowed are ");
         return List.of(complaint.replaceFirst(".*; allowed are ", "").split(", "));
@@ -275,54 +189,11 @@ class DocumentationTest {
     @Test
     void theContinuousCheckRunsTheTwoCommandsOfTheReadme() throws IOException {
         String script = Files.readString(Path.of(".ci", "run"));
-        List<String> builds = blocks("console").stream()
-                .flatMap(block -> commands(block).stream())
+        List<String> builds = README.commands().stream()
                 .map(Shown::command)
                 .filter(command -> command.startsWith("mvn "))
                 .toList();
         assertThat(builds).hasSize(2);
         assertThat(script).contains(builds);
-    }
-
-    private static void refresh() throws IOException {
-        writeFiles();
-        List<String> page = new ArrayList<>(Files.readAllLines(README));
-        List<Block> blocks = blocks(page);
-        for (int i = blocks.size() - 1; i >= 0; i--) {
-            Block block = blocks.get(i);
-            if (block.language().equals("console")) {
-                List<String> place = page.subList(block.first(), block.first() + block.lines().size());
-                place.clear();
-                place.addAll(refreshed(block));
-            }
-        }
-        Files.write(README, page);
-    }
-
-    private static List<String> refreshed(Block block) {
-        List<String> lines = new ArrayList<>();
-        for (Shown shown : commands(block)) {
-            lines.add("$ " + shown.command());
-            lines.addAll(runnable(shown.command()).map(c -> abridged(output(c), block.show())).orElse(shown.output()));
-        }
-        return lines;
-    }
-
-    /** The paragraphs that start with one of the words, all others as "..."; everything if there are no words. */
-    private static List<String> abridged(List<String> output, List<String> show) {
-        if (show.isEmpty()) {
-            return output;
-        }
-        List<String> lines = new ArrayList<>();
-        for (String paragraph : String.join("\n", output).split("\n\n")) {
-            boolean kept = show.stream().anyMatch(paragraph.strip()::startsWith);
-            if (kept || lines.isEmpty() || !lines.get(lines.size() - 1).equals(ANYTHING)) {
-                if (!lines.isEmpty() && kept && !lines.get(lines.size() - 1).equals(ANYTHING)) {
-                    lines.add("");
-                }
-                lines.addAll(kept ? paragraph.lines().toList() : List.of(ANYTHING));
-            }
-        }
-        return lines;
     }
 }
