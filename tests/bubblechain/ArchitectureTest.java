@@ -23,7 +23,7 @@ import org.junit.jupiter.api.Test;
 class ArchitectureTest {
     /** A package may use those before it. */
     private static final List<String> ORDER = List.of(
-            "exact", "series", "report", "formula", "toml", "analytic", "numeric", "qcd", "kernel", "chain", "borel",
+            "exact", "series", "report", "bibliography", "formula", "toml", "analytic", "numeric", "qcd", "kernel", "chain", "borel",
             "fixedorder", "sumrule", "forecast", "assessment", "output", "cli");
 
     private static JavaClasses classes = new ClassFileImporter().importClasses(Set.of());

@@ -13,6 +13,7 @@ import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import bubblechain.formula.FormulaException;
 import bubblechain.kernel.Kernel;
+import bubblechain.kernel.SingularityNote;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -78,6 +79,16 @@ public final class BorelPlane {
             }
         }
         return found;
+    }
+
+    /** Points, u = 0 left out, outside which no rational pole lies in the range; IR or UV is known without looking. */
+    List<Rational> candidates(Rational from, Rational to) {
+        return singularities.candidates(from, to).stream().filter(u -> !u.isZero()).toList();
+    }
+
+    /** What a pole at u would be. */
+    SingularityNote.Kind kindAt(Rational u) {
+        return BorelPole.kindAt(u, kernel.note(u));
     }
 
     /** The pole at u, if there is one. */

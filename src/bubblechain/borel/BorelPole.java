@@ -22,8 +22,12 @@ public record BorelPole(Pole pole, Optional<SingularityNote> note) {
 
     /** IR or UV: as declared, else by the sign of u (common practice, no source). */
     public SingularityNote.Kind kind() {
+        return kindAt(u(), note);
+    }
+
+    static SingularityNote.Kind kindAt(Rational u, Optional<SingularityNote> note) {
         return note.map(SingularityNote::kind)
-                .orElse(u().signum() > 0 ? SingularityNote.Kind.IR : SingularityNote.Kind.UV);
+                .orElse(u.signum() > 0 ? SingularityNote.Kind.IR : SingularityNote.Kind.UV);
     }
 
     /** The power correction: as declared, else (Lambda/scale)^(2u) for u &gt; 0. */

@@ -4,6 +4,8 @@ import bubblechain.assessment.AssessmentReport;
 import bubblechain.assessment.ChainSumRule;
 import bubblechain.assessment.CrossCheck;
 import bubblechain.assessment.CrossCheckReport;
+import bubblechain.assessment.KernelList;
+import bubblechain.assessment.KernelReport;
 import bubblechain.assessment.Validation;
 import bubblechain.assessment.ValidationReport;
 import bubblechain.borel.PolesReport;
@@ -17,7 +19,6 @@ import bubblechain.fixedorder.PerturbativeSeries;
 import bubblechain.fixedorder.SeriesLibrary;
 import bubblechain.kernel.Kernel;
 import bubblechain.kernel.KernelLibrary;
-import bubblechain.kernel.KernelReport;
 import bubblechain.qcd.Coupling;
 import bubblechain.qcd.Normalisation;
 import bubblechain.report.Report;
@@ -41,12 +42,39 @@ final class Answers {
 
     private Answers() {}
 
-    static Report kernels(String search) {
-        return KernelReport.list(search);
+    static Report kernels(KernelsCommand c) {
+        Optional<String> name = oneKernel(c);
+        if (name.isEmpty()) {
+            return KernelList.matching(words(c)).report();
+        }
+        Kernel kernel = KernelLibrary.load(name.get(), parameters(c.family));
+        return asked(KernelReport.describe(kernel, KernelLibrary.field(name.get())), parameterEntries(c.family));
     }
 
-    static Report kernel(String name, FamilyOption family) {
-        return asked(KernelReport.describe(KernelLibrary.load(name, parameters(family))), parameterEntries(family));
+    /** The papers behind the kernels asked for. */
+    static String bibtex(KernelsCommand c, boolean formatGiven) {
+        if (formatGiven) {
+            throw new DomainException("--bibtex is a format of its own; leave out --format");
+        }
+        return oneKernel(c)
+                .map(name -> KernelList.bibtex(KernelLibrary.load(name, parameters(c.family))))
+                .orElseGet(() -> KernelList.matching(words(c)).bibtex());
+    }
+
+    /** The built-in name or the file, if one is given; everything else is searched for. */
+    private static Optional<String> oneKernel(KernelsCommand c) {
+        Optional<String> name = c.words.size() == 1 && c.search.isBlank()
+                ? Optional.of(c.words.get(0)).filter(KernelLibrary::isNameOrFile)
+                : Optional.empty();
+        if (name.isEmpty() && !c.family.parameters.isEmpty()) {
+            throw new DomainException("--parameter needs the name of one kernel or the path of a file");
+        }
+        return name;
+    }
+
+    private static List<String> words(KernelsCommand c) {
+        String all = String.join(" ", c.words) + " " + c.search;
+        return List.of(all.strip().split("\\s+"));
     }
 
     static Report coefficients(CoefficientsCommand c) {

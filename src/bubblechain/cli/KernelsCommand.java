@@ -1,25 +1,38 @@
 package bubblechain.cli;
 
 import bubblechain.report.Report;
+import java.io.IOException;
+import java.util.ArrayList;
 import java.util.List;
-import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
-/** {@code kernels [NAME]}. */
-@Command(name = "kernels", description = "Lists the built-in kernels, or describes one: formulas, singularities, sources.")
+/** {@code kernels [NAME|WORD...]}. */
+@Command(
+        name = "kernels",
+        description = "Lists the built-in kernels with their nearest poles, describes one, or gives its papers as BibTeX.")
 final class KernelsCommand extends ReportCommand {
     @Parameters(
-            index = "0",
-            arity = "0..1",
-            paramLabel = "NAME",
-            description = "a built-in name, or path of a kernel file; without it all are listed")
-    @Nullable String name;
+            index = "0..*",
+            arity = "0..*",
+            paramLabel = "NAME|WORD",
+            description = "a built-in name or the path of a kernel file to describe it; else words, all of which must be the"
+                    + " field or occur in name, title, quantity, operators, sources or authors; without any all are listed")
+    List<String> words = new ArrayList<>();
 
-    @Option(names = "--search", paramLabel = "WORD", defaultValue = "", description = "list only kernels with this word")
+    @Option(
+            names = "--search",
+            paramLabel = "WORDS",
+            defaultValue = "",
+            description = "list the kernels with these words, also if they are the name of one")
     String search = "";
+
+    @Option(
+            names = "--bibtex",
+            description = "BibTeX entries of the papers behind the kernels, in place of the report")
+    boolean bibtex;
 
     @Mixin
     FamilyOption family = new FamilyOption();
@@ -27,11 +40,22 @@ final class KernelsCommand extends ReportCommand {
     @Override
     List<Example> examples() {
         return List.of(
-                new Example("kernels", "the library"), new Example("kernels adler", "formula, poles and sources of one"));
+                new Example("kernels", "the library"),
+                new Example("kernels heavy-light current", "those in which both words occur"),
+                new Example("kernels adler", "formula, poles and sources of one"));
     }
 
     @Override
     Report report() {
-        return name == null ? Answers.kernels(search) : Answers.kernel(name, family);
+        return Answers.kernels(this);
+    }
+
+    @Override
+    public Integer call() throws IOException {
+        if (!bibtex) {
+            return super.call();
+        }
+        print(Answers.bibtex(this, isGiven("--format")));
+        return ExitStatus.DONE;
     }
 }

@@ -85,6 +85,11 @@ abstract class ReportCommand implements Callable<Integer> {
         return status(report);
     }
 
+    /** True if an option stands on the command line. */
+    final boolean isGiven(String option) {
+        return spec.commandLine().getParseResult().hasMatchedOption(option);
+    }
+
     /** Prints a text on standard output as it is. */
     final void print(String text) {
         PrintWriter out = spec.commandLine().getOut();

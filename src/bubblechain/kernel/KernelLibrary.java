@@ -10,8 +10,10 @@ import java.io.UncheckedIOException;
 import java.net.URISyntaxException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Collections;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.stream.Stream;
@@ -23,6 +25,11 @@ public final class KernelLibrary {
     private static final String ENDING = ".toml";
 
     private KernelLibrary() {}
+
+    /** Looked for once: the program does not change while it runs. */
+    private static final class Shipped {
+        private static final SortedMap<String, String> RESOURCES = Collections.unmodifiableSortedMap(find());
+    }
 
     /** The built-in names in alphabetical order. */
     public static List<String> names() {
@@ -62,6 +69,18 @@ public final class KernelLibrary {
         return resources().containsKey(name);
     }
 
+    /** True for a built-in name and for what can only be a file: it ends in .toml, or has a slash and is there. */
+    public static boolean isNameOrFile(String text) {
+        return contains(text) || text.endsWith(ENDING) || isPath(text) && Files.exists(TomlFile.path(text));
+    }
+
+    /** The field of a built-in kernel, which is its folder: "heavy-quark"; empty for any other name. */
+    public static Optional<String> field(String name) {
+        return Optional.ofNullable(resources().get(name))
+                .filter(resource -> resource.lastIndexOf('/') > FOLDER.length())
+                .map(resource -> resource.substring(FOLDER.length(), resource.lastIndexOf('/')));
+    }
+
     static TomlSection open(String nameOrPath) {
         if (isPath(nameOrPath)) {
             return TomlFile.read(TomlFile.path(nameOrPath));
@@ -91,6 +110,10 @@ public final class KernelLibrary {
 
     /** Name to resource: the file name without its ending, in any folder below kernels/. */
     private static SortedMap<String, String> resources() {
+        return Shipped.RESOURCES;
+    }
+
+    private static SortedMap<String, String> find() {
         SortedMap<String, String> found = new TreeMap<>();
         try {
             Path home = Path.of(KernelLibrary.class.getProtectionDomain().getCodeSource().getLocation().toURI());

@@ -1,5 +1,6 @@
 package bubblechain.output;
 
+import bubblechain.bibliography.Bibliography;
 import bubblechain.report.Block;
 import bubblechain.report.Column;
 import bubblechain.report.Fact;
@@ -46,8 +47,13 @@ public final class TextWriter implements ReportWriter {
             block(page, block);
         }
         remarks(page, "Cautions", report.cautions());
-        remarks(page, "Sources", report.sources());
+        remarks(page, "Sources", report.sources().stream().map(TextWriter::source).toList());
         out.write(page.toString());
+    }
+
+    /** A key of the bibliography with what it stands for; any other text as it is. */
+    private static String source(String key) {
+        return Bibliography.shipped().find(key).map(p -> key + " (" + p.inWords() + ")").orElse(key);
     }
 
     private static void header(TextPage page, Report report) {

@@ -83,8 +83,11 @@ class RefusalTest {
         "assess pole-mass --loops 0 | the number of loops lies between 1 and 400, got 0",
         "assess pole-mass --loops 500 | the number of loops lies between 1 and 400, got 500",
         "validate nosuch | 'nosuch' is neither a file, nor a folder, nor a built-in name",
-        "kernels nosuch | no kernel is named 'nosuch'; 'bubblechain kernels' lists them (a file of your own is given by its"
-                + " path, ending in .toml)"
+        "kernels adler tau --parameter moment=2 | --parameter needs the name of one kernel or the path of a file",
+        "kernels --parameter moment=2 | --parameter needs the name of one kernel or the path of a file",
+        "kernels nosuch --bibtex | No built-in kernel has the word 'nosuch'; 'bubblechain kernels' lists them all. A file of your"
+                + " own is given by its path, ending in .toml.",
+        "kernels --bibtex --format json | --bibtex is a format of its own; leave out --format"
     })
     void aWrongRequestIsOneLine(String command, String message) {
         assertRefused(message, command.split(" "));

@@ -88,7 +88,7 @@ class ShownAnswersTest {
     void aChainSaysWhatWasTakenOutOfIt() {
         String shown = text("residue pole-mass --chain --power 3 --remove-nearer --loops 7").replaceAll("\\s+", " ");
         assertThat(shown).contains("the parts of the nearer poles at u = -1, 1/2 are taken out of c_n exactly",
-                "chain = yes, remove_nearer = yes", "alpha_s^(3)(m)", "Large beta0 is a model", "- Beneke:1994sw");
+                "chain = yes, remove_nearer = yes", "alpha_s^(3)(m)", "Large beta0 is a model", "- Beneke:1994sw (");
         assertThat(text("residue pole-mass --chain --power 1 --remove-nearer --loops 3").replaceAll("\\s+", " "))
                 .contains("; no pole is nearer than u = 1/2");
         // K_k = c_k/((2/p)^k k!) of the bare chain: 4, 9.3723022, 8.8113251, ... own evaluation
@@ -122,6 +122,33 @@ class ShownAnswersTest {
         assertThat(text("coefficients pole-mass --loops 2 --nf-terms --mu-over-scale 2 --nf 3 --coupling-nf 4"))
                 .contains("-pi^2/18-4*ln(2)/9-71/144");
         assertThat(text("coefficients lepton-g2 --loops 2 --nf-terms")).contains("nf^n term in (alpha/pi)^(n+1)", "-25/36");
+    }
+
+    @Test
+    void kernelsAreListedDescribedAndSearchedFor() {
+        assertThat(text("kernels")).containsPattern("\\ntau +massless +3 double +-1 +exact ");
+        assertThat(text("kernels tau")).contains("IR     3      2  exact\n", "UV    -1      1  exact\n");
+        assertThat(text("kernels --search tau")).contains("request    search = tau").containsPattern("\\ntau +massless ");
+        assertThat(text("kernels decay tau")).containsPattern("\\ntau +massless ").doesNotContain("adler");
+        assertThat(text("kernels decay --search tau")).isEqualTo(text("kernels decay tau"));
+        assertThat(text("kernels pol-mas")).contains("near in name: pole-mass").contains("(none)");
+        assertThat(json("kernels tau decay")).contains("\"ir\": \"3\", \"ir_order\": 2, \"uv\": \"-1\", \"uv_order\": 1,"
+                + " \"pole_status\": \"exact\"");
+    }
+
+    @Test
+    void thePapersAreGivenAsBibtex() {
+        assertThat(text("kernels dis-f2 --bibtex")).startsWith("@article{").contains("\n@article{Mankiewicz:1997gz,\n");
+        assertThat(text("kernels dis-f2 --parameter moment=4 --bibtex")).isEqualTo(text("kernels dis-f2 --bibtex"));
+        assertThat(text("kernels --bibtex")).contains(text("kernels pole-mass --bibtex").lines().limit(5).toList().get(1));
+    }
+
+    @Test
+    void sourcesAreShownWithTheirAuthorsAsTextAndAsKeysInJson() {
+        assertThat(text("coefficients pole-mass --loops 1"))
+                .contains("  - Beneke:1994sw (M. Beneke and V.M. Braun, hep-ph/9402364)\n");
+        assertThat(json("coefficients pole-mass --loops 1"))
+                .contains("\"sources\": [ \"Beneke:1994sw\", \"Ball:1995ni\", \"Neubert:1994vb\" ]");
     }
 
     @Test

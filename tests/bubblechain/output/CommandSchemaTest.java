@@ -42,6 +42,9 @@ class CommandSchemaTest {
             kernels
             kernels --search mass
             kernels --search nothing-of-the-kind
+            kernels heavy-light current
+            kernels nosuch
+            kernels dis-f2 --parameter moment=4
             kernels pole-mass
             kernels cusp
             kernels static-potential-r
@@ -122,6 +125,10 @@ class CommandSchemaTest {
         assertThat(JsonSchema.complaints(good.replaceFirst("\"value\": \"[^\"]*\"", "\"value\": \"NaN\""))).hasSize(1);
         assertThat(JsonSchema.complaints(good.replaceFirst("\"value\": \"[^\"]*\"", "\"value\": 4"))).hasSize(1);
         assertThat(JsonSchema.complaints(good.replace("\"cautions\"", "\"warnings\""))).hasSize(2);
+        String list = output("json", "kernels", "adler");
+        assertThat(JsonSchema.complaints(list.replace("\"pole_status\": \"exact\"", "\"pole_status\": \"proved\""))).isNotEmpty();
+        assertThat(JsonSchema.complaints(output("json", "kernels", "tau", "decay").replace("\"ir\": \"3\"", "\"ir\": \"u\"")))
+                .isNotEmpty();
         String poles = output("json", "poles", "pole-mass");
         assertThat(JsonSchema.complaints(poles.replace("\"kind\": \"UV\"", "\"kind\": \"UW\""))).isNotEmpty();
         String residue = output("json", "residue", "pole-mass");

@@ -1,48 +1,36 @@
-package bubblechain.kernel;
+package bubblechain.assessment;
 
 import bubblechain.analytic.AnalyticFunction;
+import bubblechain.borel.NearestPoles;
+import bubblechain.formula.FormulaException;
+import bubblechain.kernel.Kernel;
+import bubblechain.kernel.SingularityNote;
 import bubblechain.report.Column;
 import bubblechain.report.Facts;
+import bubblechain.report.Note;
 import bubblechain.report.Report;
 import bubblechain.report.Table;
 import bubblechain.report.Value;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
+import java.util.Optional;
 
-/** Shows the library, or one kernel of it. */
+/** Shows one kernel. */
 public final class KernelReport {
+    /** Status of poles that are there but outside the class of formulas in which they can be listed. */
+    private static final String NOT_LISTED = "not-listed";
+
     private KernelReport() {}
 
-    /** All kernels whose name, title or quantity contains a word; all of them for the empty word. */
-    public static Report list(String word) {
-        String wanted = word.toLowerCase(Locale.ROOT);
-        List<List<Value>> rows = new ArrayList<>();
-        for (String name : KernelLibrary.names()) {
-            Kernel kernel = KernelLibrary.load(name);
-            String text = (name + " " + kernel.title() + " " + kernel.quantity()).toLowerCase(Locale.ROOT);
-            if (text.contains(wanted)) {
-                rows.add(List.of(
-                        Value.text(name), Value.text(kernel.quantity()), Value.text(kernel.scale()),
-                        Value.text(kernel.form().text()), Value.text(kernel.title())));
-            }
-        }
-        return Report.builder("kernels")
-                .request("search", word)
-                .normalisation("f = prefactor x sum_{n>=0} c_n a^(n+1), a = beta0 alpha/(4 pi)")
-                .add(new Table(
-                        "kernels", "Kernels",
-                        List.of(
-                                Column.of("name", "name"), Column.of("quantity", "quantity"),
-                                Column.of("scale", "scale"), Column.of("form", "form"), Column.of("title", "title")),
-                        rows))
-                .build();
-    }
-
-    /** Everything a kernel file says. */
-    public static Report describe(Kernel kernel) {
+    /**
+     * Everything a kernel file says, and where its nearest poles are.
+     *
+     * @param field the part of the library it belongs to; empty for a file of the user's own
+     */
+    public static Report describe(Kernel kernel, Optional<String> field) {
         Facts facts = Facts.titled("kernel", kernel.title())
                 .with("name", "name", Value.text(kernel.name()))
+                .with("field", "field", Value.orAbsent(field.map(Value::text)))
                 .with("title", "title", Value.text(kernel.title()))
                 .with("quantity", "quantity", Value.text(kernel.quantity()))
                 .with("scale", "scale", Value.text(kernel.scale()))
@@ -66,12 +54,44 @@ public final class KernelReport {
                 .request("kernel", kernel.name())
                 .normalisation(kernel.quantity() + " = " + kernel.prefactor().words()
                         + " sum_{n>=0} c_n a^(n+1), a = beta0 " + kernel.theory().coupling() + "(" + kernel.scale()
-                        + ")/(4 pi)" + transformInWords(kernel))
-                .add(facts)
-                .add(singularities(kernel));
+                        + ")/(4 pi)" + transformInWords(kernel));
+        addPoles(report, facts, kernel);
+        report.add(singularities(kernel));
         kernel.sources().forEach(report::source);
         kernel.cautions().forEach(report::caution);
         return report.build();
+    }
+
+    private static void addPoles(Report.Builder report, Facts facts, Kernel kernel) {
+        try {
+            NearestPoles poles = NearestPoles.of(kernel);
+            report.add(withStatus(facts, KernelList.status(poles))).add(nearest(kernel, poles));
+        } catch (FormulaException e) {
+            report.add(withStatus(facts, NOT_LISTED)).add(new Note("The poles cannot be listed: " + e.reason() + "."));
+        }
+    }
+
+    private static Facts withStatus(Facts facts, String status) {
+        return facts.with("pole_status", "status of its poles", Value.text(status));
+    }
+
+    private static Table nearest(Kernel kernel, NearestPoles poles) {
+        List<List<Value>> rows = new ArrayList<>();
+        poles.infrared().ifPresent(pole -> rows.add(row("IR", pole)));
+        poles.ultraviolet().ifPresent(pole -> rows.add(row("UV", pole)));
+        return new Table(
+                "nearest_poles",
+                kernel.isAnomalousDimension()
+                        ? "Nearest poles: the series of an anomalous dimension converges"
+                        : "Nearest poles of B(u), looked for with |u| up to " + poles.searchedTo(),
+                List.of(
+                        Column.of("kind", "kind"), Column.of("u", "u0"), Column.of("order", "order"),
+                        Column.of("status", "status")),
+                rows);
+    }
+
+    private static List<Value> row(String kind, NearestPoles.Nearest pole) {
+        return List.of(Value.text(kind), pole.u(), Value.count(pole.order()), Value.text(pole.status().text()));
     }
 
     private static String transformInWords(Kernel kernel) {
