@@ -4,6 +4,7 @@ import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import bubblechain.formula.ConstantValue;
+import bubblechain.formula.EvaluationSteps;
 import bubblechain.formula.Formula;
 import bubblechain.formula.FormulaException;
 import bubblechain.formula.FormulaLimits;
@@ -18,6 +19,8 @@ final class NormalFormCompiler {
 
     private final String variable;
     private final Map<String, ExactConstant> indices = new HashMap<>();
+    private final EvaluationSteps constants = new EvaluationSteps();
+    private final CompileWork work = new CompileWork();
     private int steps;
 
     NormalFormCompiler(String variable) {
@@ -28,6 +31,7 @@ final class NormalFormCompiler {
         if (++steps > STEP_LIMIT) {
             throw FormulaException.at(formula.span(), "the sums of this formula have too many terms in all");
         }
+        work.node(formula);
         try {
             return unchecked(formula);
         } catch (FormulaException placed) {
@@ -44,7 +48,7 @@ final class NormalFormCompiler {
         if (formula instanceof Formula.Name n) {
             return n.name().equals(variable) && !indices.containsKey(variable)
                     ? NormalForm.VARIABLE
-                    : NormalForm.constant(ConstantValue.of(n, indices));
+                    : NormalForm.constant(ConstantValue.of(n, indices, constants));
         }
         if (formula instanceof Formula.Negation n) {
             return compile(n.operand()).negate();
@@ -58,12 +62,22 @@ final class NormalFormCompiler {
         Formula.Binary b = (Formula.Binary) formula;
         NormalForm left = compile(b.left());
         return switch (b.operator()) {
-            case ADD -> left.add(compile(b.right()));
-            case SUBTRACT -> left.subtract(compile(b.right()));
-            case MULTIPLY -> left.multiply(compile(b.right()));
-            case DIVIDE -> left.multiply(inverse(compile(b.right()), b.right()));
+            case ADD -> sum(left, compile(b.right()), b);
+            case SUBTRACT -> sum(left, compile(b.right()).negate(), b);
+            case MULTIPLY -> product(left, compile(b.right()), b);
+            case DIVIDE -> product(left, inverse(compile(b.right()), b.right()), b);
             case POWER -> power(left, b);
         };
+    }
+
+    private NormalForm sum(NormalForm left, NormalForm right, Formula place) {
+        work.sum(left, right, place);
+        return left.add(right);
+    }
+
+    private NormalForm product(NormalForm left, NormalForm right, Formula place) {
+        work.product(left, right, place);
+        return left.multiply(right);
     }
 
     private static NormalForm inverse(NormalForm form, Formula place) {
@@ -83,7 +97,7 @@ final class NormalFormCompiler {
                         b.right().span(), "an exponent of more than " + FormulaLimits.EXPONENT + " in size");
             }
             int n = constant.get().intValueExact();
-            return integerPower(n < 0 ? inverse(base, b.left()) : base, Math.abs(n));
+            return integerPower(n < 0 ? inverse(base, b.left()) : base, Math.abs(n), b);
         }
         Optional<ExactConstant> constantBase = base.asConstant();
         Optional<NormalForm.Linear> linear = exponent.asLinear();
@@ -96,15 +110,15 @@ final class NormalFormCompiler {
                 linear.get().constant().multiply(log), linear.get().slope().multiply(log));
     }
 
-    private static NormalForm integerPower(NormalForm base, int n) {
+    private NormalForm integerPower(NormalForm base, int n, Formula place) {
         NormalForm result = NormalForm.ONE;
         NormalForm square = base;
         for (int e = n; e > 0; e >>= 1) {
             if ((e & 1) == 1) {
-                result = result.multiply(square);
+                result = product(result, square, place);
             }
             if (e > 1) {
-                square = square.multiply(square);
+                square = product(square, square, place);
             }
         }
         return result;
@@ -120,7 +134,7 @@ final class NormalFormCompiler {
         NormalForm total = NormalForm.ZERO;
         for (int k = from; k <= to; k++) {
             indices.put(s.index(), ExactConstant.of(k));
-            total = total.add(compile(s.body()));
+            total = sum(total, compile(s.body()), s);
         }
         if (hidden == null) {
             indices.remove(s.index());
@@ -133,17 +147,16 @@ final class NormalFormCompiler {
     private NormalForm call(Formula.Call c) {
         Formula last = c.arguments().get(c.arguments().size() - 1);
         if (!dependsOnVariable(c)) {
-            return NormalForm.constant(ConstantValue.of(c, indices));
+            return NormalForm.constant(ConstantValue.of(c, indices, constants));
         }
         NormalForm argument = compile(last);
         NormalForm.Linear linear = argument.asLinear()
                 .orElseThrow(() -> new InadmissibleFormulaException(
                         last.span(), "the argument of " + c.function().text() + " must be linear in u"));
         return switch (c.function()) {
-            case GAMMA -> NormalForm.gamma(rational(linear.constant(), last), rational(linear.slope(), last));
-            case DIGAMMA -> NormalForm.polygamma(0, rational(linear.constant(), last), rational(linear.slope(), last));
-            case POLYGAMMA -> NormalForm.polygamma(
-                    ConstantValue.polygammaOrder(c.arguments().get(0), indices), rational(linear.constant(), last), rational(linear.slope(), last));
+            case GAMMA -> gamma(linear, last);
+            case DIGAMMA -> polygamma(0, linear, last);
+            case POLYGAMMA -> polygamma(ConstantValue.polygammaOrder(c.arguments().get(0), indices), linear, last);
             case UNIT_3F2 -> NormalForm.unit3f2(
                     ConstantValue.unit3f2Order(c.arguments().get(0), indices), rational(linear.constant(), last), rational(linear.slope(), last));
             case EXP -> NormalForm.exponential(linear.constant(), linear.slope());
@@ -153,6 +166,18 @@ final class NormalFormCompiler {
             case LN, SQRT, ZETA, POLYLOG -> throw new InadmissibleFormulaException(
                     c.span(), c.function().text() + " of an expression with u has no exact list of singularities");
         };
+    }
+
+    private NormalForm gamma(NormalForm.Linear argument, Formula place) {
+        Rational constant = rational(argument.constant(), place);
+        work.shiftOfGamma(constant, place);
+        return NormalForm.gamma(constant, rational(argument.slope(), place));
+    }
+
+    private NormalForm polygamma(int order, NormalForm.Linear argument, Formula place) {
+        Rational constant = rational(argument.constant(), place);
+        work.shiftOfPolygamma(constant, order, place);
+        return NormalForm.polygamma(order, constant, rational(argument.slope(), place));
     }
 
     private static NormalForm sine(ExactConstant constant, ExactConstant slope, Formula place) {

@@ -4,6 +4,7 @@ import bubblechain.exact.Ball;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.Rational;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /** A polynomial over Q in one variable, by its coefficients from the constant term on; the last is not zero. */
@@ -86,15 +87,18 @@ public final class Polynomial {
             return ZERO;
         }
         requireDegree((long) degree() + other.degree());
-        List<Rational> product = new ArrayList<>();
-        for (int k = 0; k <= degree() + other.degree(); k++) {
-            Rational sum = Rational.ZERO;
-            for (int j = Math.max(0, k - other.degree()); j <= Math.min(k, degree()); j++) {
-                sum = sum.add(coefficients.get(j).multiply(other.coefficients.get(k - j)));
+        Rational[] product = new Rational[degree() + other.degree() + 1];
+        Arrays.fill(product, Rational.ZERO);
+        for (int j = 0; j <= degree(); j++) {
+            Rational c = coefficients.get(j);
+            for (int k = 0; k <= other.degree() && !c.isZero(); k++) {
+                Rational d = other.coefficients.get(k);
+                if (!d.isZero()) {
+                    product[j + k] = product[j + k].add(c.multiply(d));
+                }
             }
-            product.add(sum);
         }
-        return of(product);
+        return of(List.of(product));
     }
 
     private static void requireDegree(long degree) {

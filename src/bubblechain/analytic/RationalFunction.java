@@ -49,17 +49,41 @@ public final class RationalFunction {
         return denominator.isConstant();
     }
 
+    /** What the denominators have in common is taken out first, so that only it can cancel in the sum (Henrici). */
     public RationalFunction add(RationalFunction other) {
         if (denominator.equals(other.denominator)) {
             return of(numerator.add(other.numerator), denominator);
         }
-        return of(
-                numerator.multiply(other.denominator).add(other.numerator.multiply(denominator)),
-                denominator.multiply(other.denominator));
+        Polynomial common = denominator.gcd(other.denominator);
+        Polynomial own = quotient(denominator, common);
+        Polynomial theirs = quotient(other.denominator, common);
+        Polynomial sum = numerator.multiply(theirs).add(other.numerator.multiply(own));
+        if (sum.isZero()) {
+            return ZERO;
+        }
+        Polynomial cancels = common.isConstant() ? Polynomial.ONE : sum.gcd(common);
+        return new RationalFunction(
+                quotient(sum, cancels), own.multiply(theirs).multiply(quotient(common, cancels)));
     }
 
+    /** Each numerator can have a factor in common with the other denominator only. */
     public RationalFunction multiply(RationalFunction other) {
-        return of(numerator.multiply(other.numerator), denominator.multiply(other.denominator));
+        if (isZero() || other.isZero()) {
+            return ZERO;
+        }
+        Polynomial first = common(numerator, other.denominator);
+        Polynomial second = common(other.numerator, denominator);
+        return new RationalFunction(
+                quotient(numerator, first).multiply(quotient(other.numerator, second)),
+                quotient(denominator, second).multiply(quotient(other.denominator, first)));
+    }
+
+    private static Polynomial common(Polynomial numerator, Polynomial denominator) {
+        return denominator.isConstant() ? Polynomial.ONE : numerator.gcd(denominator);
+    }
+
+    private static Polynomial quotient(Polynomial polynomial, Polynomial monicDivisor) {
+        return monicDivisor.isConstant() ? polynomial : polynomial.divideExactly(monicDivisor);
     }
 
     public RationalFunction multiply(Rational factor) {

@@ -20,9 +20,9 @@ public final class ConstantValue {
     private static final int LARGEST_SUM = 5_000;
 
     private final Map<String, ExactConstant> values;
-    private final int[] steps;
+    private final EvaluationSteps steps;
 
-    private ConstantValue(Map<String, ExactConstant> values, int[] steps) {
+    private ConstantValue(Map<String, ExactConstant> values, EvaluationSteps steps) {
         this.values = values;
         this.steps = steps;
     }
@@ -34,7 +34,12 @@ public final class ConstantValue {
 
     /** The value with given numbers for some names. */
     public static ExactConstant of(Formula formula, Map<String, ExactConstant> values) {
-        return new ConstantValue(values, new int[1]).value(formula);
+        return of(formula, values, new EvaluationSteps());
+    }
+
+    /** The value with given numbers for some names, counted with the other constants of a formula. */
+    public static ExactConstant of(Formula formula, Map<String, ExactConstant> values, EvaluationSteps steps) {
+        return new ConstantValue(values, steps).value(formula);
     }
 
     /** The integer a formula stands for, such as the order of a polygamma or the end of a sum. */
@@ -67,11 +72,10 @@ public final class ConstantValue {
     }
 
     private ExactConstant value(Formula formula) {
-        if (++steps[0] > FormulaLimits.STEPS) {
-            throw FormulaException.at(formula.span(), "the sums of this formula have too many terms in all");
-        }
+        steps.visit(formula);
         try {
             ExactConstant value = unchecked(formula);
+            steps.value(value, formula);
             if (value.size() > LARGEST_SUM) {
                 throw FormulaException.at(
                         formula.span(), "a constant of " + value.size() + " terms; the limit is " + LARGEST_SUM);

@@ -24,9 +24,12 @@ public final class Definitions {
     /**
      * These definitions and one more.
      *
-     * @throws FormulaException if the written-out formula would be too large
+     * @throws FormulaException if the written-out formula would be too large, or there are too many
      */
     public Definitions with(String name, Formula formula) {
+        if (values.size() >= FormulaLimits.DEFINITIONS) {
+            throw FormulaException.at(formula.span(), "more than " + FormulaLimits.DEFINITIONS + " definitions");
+        }
         Map<String, Long> moreSizes = new HashMap<>(sizes);
         moreSizes.put(name, checkedSize(formula));
         Map<String, Integer> moreHeights = new HashMap<>(heights);

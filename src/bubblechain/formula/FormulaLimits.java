@@ -16,6 +16,8 @@ public final class FormulaLimits {
     public static final int STEPS = 500_000;
     /** Digits of one number. */
     public static final int DIGITS = 2_000;
+    /** Definitions of one file. */
+    public static final int DEFINITIONS = 1_000;
     /** Nodes of a formula after all definitions are written out. */
     public static final long NODES = 100_000;
 

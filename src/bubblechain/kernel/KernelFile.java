@@ -39,6 +39,8 @@ final class KernelFile {
             List.of("u", "kind", "operator", "power", "anomalous_dimension", "source");
     private static final Set<String> PREFACTOR_NAMES = Set.of("CF", "CA", "TF", "nf", "beta0", "pi", "euler_gamma");
 
+    private static final int LONGEST_NAME = 100;
+
     private final TomlSection top;
     private final ParameterValues parameters;
     private final Definitions definitions;
@@ -97,7 +99,7 @@ final class KernelFile {
         Kernel kernel = new Kernel(
                 name(), parameters.titled(top.text("title")), parameters.titled(top.text("quantity")),
                 top.text("scale"), theory, prefactor(), top.rational("mass_dimension"), form, functions.transform(),
-                functions.anomalousDimension(), functions.sudakov(), definingEquation(), flag("heavy_quark"), top.optionalText("series"), singularities(),
+                functions.anomalousDimension(), functions.sudakov(), definingEquation(), flag("heavy_quark"), series(), singularities(),
                 combination.map(Combination::sources).orElseGet(() -> top.texts("sources")),
                 combination.map(Combination::cautions).orElseGet(() -> top.texts("cautions")),
                 new CheckEntries(top).read());
@@ -114,10 +116,24 @@ final class KernelFile {
         return equation;
     }
 
+    private Optional<String> series() {
+        Optional<String> series = top.optionalText("series");
+        if (series.isPresent() && !isName(series.get())) {
+            throw top.error("series", "series is the name of a built-in series, got '" + series.get()
+                    + "'; one of your own is given to a command by --series");
+        }
+        return series;
+    }
+
+    private static boolean isName(String text) {
+        return text.length() <= LONGEST_NAME && text.matches("[a-z0-9]+(-[a-z0-9]+)*");
+    }
+
     private String name() {
         String name = top.text("name");
-        if (!name.matches("[a-z0-9]+(-[a-z0-9]+)*")) {
-            throw top.error("name", "a kernel name has lower-case letters, digits and hyphens, got '" + name + "'");
+        if (!isName(name)) {
+            throw top.error("name", "a kernel name has lower-case letters, digits and hyphens"
+                    + (name.length() > LONGEST_NAME ? ", at most " + LONGEST_NAME : "") + ", got '" + name + "'");
         }
         return name;
     }

@@ -18,6 +18,8 @@ import java.util.stream.Collectors;
 final class ParameterValues {
     private static final List<String> KEYS = List.of("from", "to", "default", "integer", "meaning");
 
+    private static final int LARGEST_COUNT = 20;
+
     private final Map<String, Rational> values;
 
     private ParameterValues(Map<String, Rational> values) {
@@ -28,6 +30,10 @@ final class ParameterValues {
         Map<String, Rational> values = new TreeMap<>();
         Optional<TomlSection> section = top.optionalTable("parameters");
         if (section.isPresent()) {
+            if (section.get().keys().size() > LARGEST_COUNT) {
+                throw top.error("parameters", "a kernel has at most " + LARGEST_COUNT + " parameters, got "
+                        + section.get().keys().size());
+            }
             for (String name : section.get().keys()) {
                 if (!Constants.isFreeName(name) || name.equals("u") || name.equals("eps") || name.equals("a")) {
                     throw section.get().error(name, "'" + name + "' cannot be the name of a parameter");

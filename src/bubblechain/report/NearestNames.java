@@ -34,7 +34,8 @@ public final class NearestNames {
     private static boolean isClose(String word, String name) {
         int shorter = Math.min(word.length(), name.length());
         boolean begins = shorter >= 3 && (name.startsWith(word) || word.startsWith(name));
-        return begins || distance(word, name) <= Math.max(1, word.length() / 3);
+        int allowed = Math.max(1, word.length() / 3);
+        return begins || Math.abs(word.length() - name.length()) <= allowed && distance(word, name) <= allowed;
     }
 
     /** Optimal string alignment distance: Levenshtein's with swaps of neighbouring letters counted once. */

@@ -19,19 +19,28 @@ final class PlainReader {
     private int line = 1;
     private int lineStart;
 
-    private PlainReader(String text) {
+    PlainReader(String text) {
         this.text = text;
     }
 
     /** The top table, or empty if the file is not so plain. */
     static Optional<Node.Table> read(String text) {
-        PlainReader reader = new PlainReader(text);
+        return new PlainReader(text).read();
+    }
+
+    /** The top table, or empty if the file is not so plain; then {@link #position} is about where. */
+    Optional<Node.Table> read() {
         try {
-            reader.readAll();
-            return Optional.of(reader.top);
+            readAll();
+            return Optional.of(top);
         } catch (NotPlain notPlain) {
             return Optional.empty();
         }
+    }
+
+    /** How far the text was read. */
+    int position() {
+        return Math.min(position, text.length());
     }
 
     /** Signals a file that needs the general reader; it never leaves this class. */

@@ -3,7 +3,8 @@ package bubblechain.toml;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.ByteBuffer;
-import java.nio.charset.CharacterCodingException;
+import java.nio.CharBuffer;
+import java.nio.charset.CoderResult;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
@@ -13,8 +14,13 @@ import java.nio.file.Path;
 public final class TomlFile {
     /** Largest size of a file in bytes. */
     public static final int LARGEST_SIZE = 1_000_000;
+    /** Largest size in characters of a file that only the library can read, which takes far longer. */
+    private static final int LARGEST_UNUSUAL = 100_000;
     /** Deepest nesting of brackets in a file; deeper ones are refused before parsing. */
     private static final int DEEPEST_NESTING = 50;
+
+    /** Some editors begin a file with it. */
+    private static final char BYTE_ORDER_MARK = '\ufeff';
 
     private TomlFile() {}
 
@@ -22,6 +28,9 @@ public final class TomlFile {
     public static TomlSection read(Path path) {
         if (Files.isDirectory(path)) {
             throw new TomlException(path + " is a directory; name a file in it");
+        }
+        if (Files.exists(path) && !Files.isRegularFile(path)) {
+            throw new TomlException(path + " is a device or a pipe; name a file");
         }
         try (InputStream stream = Files.newInputStream(path)) {
             return read(stream, path.toString());
@@ -45,19 +54,43 @@ public final class TomlFile {
         if (bytes.length > LARGEST_SIZE) {
             throw new TomlException(file + ": larger than the limit of " + LARGEST_SIZE + " bytes");
         }
-        try {
-            return parse(
-                    StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString(), file);
-        } catch (CharacterCodingException e) {
-            throw new TomlException(file + ": not a text in UTF-8", e);
+        CharBuffer text = CharBuffer.allocate(bytes.length);
+        CoderResult end = StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes), text, true);
+        text.flip();
+        if (end.isError()) {
+            throw new TomlException(place(text, text.length(), file) + ": not a text in UTF-8");
         }
+        boolean marked = text.length() > 0 && text.charAt(0) == BYTE_ORDER_MARK;
+        return parse(text.subSequence(marked ? 1 : 0, text.length()).toString(), file);
+    }
+
+    /** File, line and column of the character at an index. */
+    private static String place(CharSequence text, int index, String file) {
+        int line = 1;
+        int start = 0;
+        for (int k = 0; k < index; k++) {
+            if (text.charAt(k) == '\n') {
+                line++;
+                start = k + 1;
+            }
+        }
+        return file + ", line " + line + ", column " + (index - start + 1);
     }
 
     /** The top of a text; {@code file} names it in messages. */
     public static TomlSection parse(String text, String file) {
         refuseDeepNesting(text, file);
-        Node.Table top = PlainReader.read(text).orElseGet(() -> GeneralReader.read(text, file));
+        PlainReader plain = new PlainReader(text);
+        Node.Table top = plain.read().orElseGet(() -> general(text, file, plain.position()));
         return new TomlSection(file, "at the top of the file", top);
+    }
+
+    private static Node.Table general(String text, String file, int notPlain) {
+        if (text.length() > LARGEST_UNUSUAL) {
+            throw new TomlException(place(text, notPlain, file) + ": not plain TOML (names, strings in double quotes, lists of"
+                    + " strings, tables), which a file of more than " + LARGEST_UNUSUAL + " characters must be");
+        }
+        return GeneralReader.read(text, file);
     }
 
     private static void refuseDeepNesting(String text, String file) {
@@ -72,7 +105,7 @@ public final class TomlFile {
                 depth--;
             }
             if (depth > DEEPEST_NESTING) {
-                throw new TomlException(file + ": brackets nested deeper than " + DEEPEST_NESTING + " levels");
+                throw new TomlException(place(text, k, file) + ": brackets nested deeper than " + DEEPEST_NESTING + " levels");
             }
         }
     }

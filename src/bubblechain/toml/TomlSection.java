@@ -4,6 +4,7 @@ import bubblechain.exact.DomainException;
 import bubblechain.exact.Rational;
 import bubblechain.formula.Formula;
 import bubblechain.formula.FormulaException;
+import bubblechain.formula.FormulaLimits;
 import bubblechain.report.NearestNames;
 import java.util.ArrayList;
 import java.util.Collections;
@@ -77,12 +78,31 @@ public final class TomlSection {
 
     private String asText(String key, Node value) {
         if (value instanceof Node.Text text) {
+            refuseHidden(text);
             return text.text();
         }
         if (value instanceof Node.Other other && other.number()) {
             throw error(key, "numbers are written as strings so that they stay exact: " + key + " = \"" + other.text() + "\"");
         }
         throw error(key, "'" + key + "' must be a string");
+    }
+
+    /** Characters that do not show, or turn the text around them, would let a file say other things than it seems to. */
+    private void refuseHidden(Node.Text node) {
+        String text = node.text();
+        for (int k = 0; k < text.length(); k++) {
+            char c = text.charAt(k);
+            boolean control = Character.getType(c) == Character.CONTROL && c != '\n' && c != '\t' && c != '\r';
+            if (control || Character.getType(c) == Character.FORMAT || Character.isSurrogate(c) && !paired(text, k)) {
+                throw at(node, String.format("the character U+%04X (%s) may not stand in a text", (int) c, Character.getName(c)));
+            }
+        }
+    }
+
+    private static boolean paired(String text, int k) {
+        return Character.isHighSurrogate(text.charAt(k))
+                ? k + 1 < text.length() && Character.isLowSurrogate(text.charAt(k + 1))
+                : k > 0 && Character.isHighSurrogate(text.charAt(k - 1));
     }
 
     /** A list of strings, empty if the key is absent. */
@@ -132,6 +152,9 @@ public final class TomlSection {
     /** An exact rational number written as a string. */
     public Rational rational(String key) {
         String text = text(key);
+        if (text.length() > FormulaLimits.DIGITS) {
+            throw error(key, "a number of more than " + FormulaLimits.DIGITS + " characters");
+        }
         try {
             return Rational.parse(text);
         } catch (DomainException e) {

@@ -161,7 +161,7 @@ class RefusalTest {
     @Test
     void strangeFilesAreRefused() throws IOException {
         Path binary = Files.write(folder.resolve("binary.toml"), new byte[] {0, 1, (byte) 0xff, (byte) 0xfe, (byte) 0x80});
-        assertRefused(binary + ": not a text in UTF-8", "coefficients", binary.toString());
+        assertRefused(binary + ", line 1, column 3: not a text in UTF-8", "coefficients", binary.toString());
         assertRefused(folder + " is a directory; name a file in it", "coefficients", folder.toString());
         Path missing = folder.resolve("missing.toml");
         assertRefused("cannot read the file " + missing + "; check that it exists and is readable", "poles", missing.toString());
@@ -169,7 +169,7 @@ class RefusalTest {
         Path text = Files.writeString(folder.resolve("text.toml"), "this is not toml");
         assertRefused(text + ", line 1, column 6: not TOML: Unexpected 'is', expected . or =", "poles", text.toString());
         Path nested = Files.writeString(folder.resolve("nested.toml"), "x = " + "[".repeat(100_000));
-        assertRefused(nested + ": brackets nested deeper than 50 levels", "poles", nested.toString());
+        assertRefused(nested + ", line 1, column 55: brackets nested deeper than 50 levels", "poles", nested.toString());
     }
 
     @Test

@@ -121,7 +121,7 @@ class TomlFileTest {
     @Test
     void binaryMissingAndFolderAreRefused(@TempDir Path folder) throws IOException {
         Path binary = Files.write(folder.resolve("binary.toml"), new byte[] {0, 1, (byte) 0xff, (byte) 0xfe, (byte) 0x80});
-        assertMessage(() -> TomlFile.read(binary), binary + ": not a text in UTF-8");
+        assertMessage(() -> TomlFile.read(binary), binary + ", line 1, column 3: not a text in UTF-8");
         Path missing = folder.resolve("missing.toml");
         assertMessage(() -> TomlFile.read(missing), "cannot read the file " + missing + "; check that it exists and is readable");
         assertMessage(() -> TomlFile.read(folder), folder + " is a directory; name a file in it");
@@ -129,14 +129,32 @@ class TomlFileTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"[", "{a=", "[{a=[", "\n[\n"})
-    void deepNestingIsRefusedBeforeParsing(String bracket) {
-        assertMessage(() -> parse("x = " + bracket.repeat(100_000)), "my.toml: brackets nested deeper than 50 levels");
+    @CsvSource({"[, 1, 55", "{a=, 1, 155", "[{a=[, 1, 89", "'\n[\n', 102, 1"})
+    void deepNestingIsRefusedBeforeParsing(String bracket, int line, int column) {
+        assertMessage(
+                () -> parse("x = " + bracket.repeat(100_000)),
+                "my.toml, line " + line + ", column " + column + ": brackets nested deeper than 50 levels");
+    }
+
+    @Test
+    void aLongFileMustBePlain() {
+        String number = "a = 1\n";
+        String comment = "#" + "x".repeat(100_000 - number.length() - 2) + "\n";
+        assertThat(parse(comment + number).keys()).containsExactly("a");
+        assertMessage(() -> parse("# one more" + comment + number), "my.toml, line 2, column 5: not plain TOML (names, strings in"
+                + " double quotes, lists of strings, tables), which a file of more than 100000 characters must be");
+    }
+
+    @Test
+    void aLongMessageIsCutInTheMiddle() {
+        assertThatThrownBy(() -> parse("k".repeat(5_000) + " = \"1\"").requireKnown(List.of("name")))
+                .hasMessageMatching("(?s)my.toml, line 1, column 1: unknown key 'k{200,} [.]{3} k*' at the top of the file; allowed are"
+                        + " name");
     }
 
     @Test
     void aLongDottedKeyIsRefusedWithoutExhaustingTheStack() {
-        assertThatThrownBy(() -> parse("a.".repeat(100_000) + "a = \"1\""))
+        assertThatThrownBy(() -> parse("a.".repeat(40_000) + "a = \"1\""))
                 .isInstanceOf(TomlException.class)
                 .hasMessageContaining("Nesting is too deep");
     }
