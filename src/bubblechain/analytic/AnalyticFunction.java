@@ -24,6 +24,8 @@ import org.jspecify.annotations.Nullable;
 public final class AnalyticFunction {
     /** Terms computed beyond those asked for before a function is said to vanish. */
     private static final int SURPLUS_LIMIT = 60;
+    /** Characters of a formula that are repeated in a message. */
+    private static final int LONGEST_SHOWN = 200;
 
     private final Formula formula;
     private final String variable;
@@ -104,8 +106,13 @@ public final class AnalyticFunction {
                 return series.get();
             }
         }
-        throw new PrecisionException("the expansion of " + formula.print() + " about " + variable + " = " + point
+        throw new PrecisionException("the expansion of " + shown() + " about " + variable + " = " + point
                 + " does not reach order " + end + ": a part of it appears to vanish identically");
+    }
+
+    private String shown() {
+        String text = formula.print();
+        return text.length() <= LONGEST_SHOWN ? text : text.substring(0, LONGEST_SHOWN) + "...";
     }
 
     private <C> Optional<LaurentSeries<C>> attempt(CoefficientwiseAlgebra<C> algebra, Rational point) {
@@ -125,7 +132,7 @@ public final class AnalyticFunction {
     public ExactConstant valueAt(Rational point) {
         LaurentSeries<ExactConstant> series = exact(point, 1);
         if (series.lowest() < 0 && series.length() > 0) {
-            throw new DomainException(formula.print() + " has a pole at " + variable + " = " + point);
+            throw new DomainException(shown() + " has a pole at " + variable + " = " + point);
         }
         return series.lowest() > 0 || series.length() == 0
                 ? ExactConstant.ZERO

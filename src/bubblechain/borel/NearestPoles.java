@@ -24,6 +24,8 @@ public final class NearestPoles {
     private static final List<Rational> LIMITS = List.of(
             Rational.of(1, 4), Rational.ONE, Rational.of(3), Rational.of(BorelPlane.SEARCH_LIMIT));
     private static final int POSITION_DIGITS = 10;
+    /** Points at which the function is expanded before the search is given up. */
+    private static final int MOST_EXPANSIONS = 500;
 
     /**
      * A pole and what a list says of it.
@@ -51,6 +53,7 @@ public final class NearestPoles {
     private final BorelPlane plane;
     private final Map<Kind, Nearest> found = new EnumMap<>(Kind.class);
     private Rational searched = Rational.ZERO;
+    private int expansions;
 
     private NearestPoles(BorelPlane plane) {
         this.plane = plane;
@@ -75,6 +78,9 @@ public final class NearestPoles {
             }
             for (Candidate candidate : candidates.get()) {
                 if (!found.containsKey(candidate.kind())) {
+                    if (++expansions > MOST_EXPANSIONS) {
+                        return;
+                    }
                     candidate.pole().get().ifPresent(pole -> found.put(candidate.kind(), pole));
                 }
             }
