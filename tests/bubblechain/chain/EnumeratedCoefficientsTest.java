@@ -14,12 +14,15 @@ import bubblechain.formula.ConstantValue;
 import bubblechain.formula.Formula;
 import bubblechain.kernel.Kernel;
 import bubblechain.kernel.KernelLibrary;
+import bubblechain.kernel.KernelText;
 import bubblechain.series.CoefficientwiseAlgebra;
 import bubblechain.series.ExactRing;
 import bubblechain.series.LaurentSeries;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -179,5 +182,22 @@ class EnumeratedCoefficientsTest {
         List<ExactConstant> short14 = new ArrayList<>(exact.subList(0, LOOPS));
         assertThat(short14).isEqualTo(Chain.of(KernelLibrary.load("bjorken-gls")).exact(LOOPS));
         assertThat(exact).allMatch(c -> c.asRational().isPresent());
+    }
+
+    @TempDir
+    Path folder;
+
+    /** A polygamma has one weight more than its order: the highest order of a short list needs it too. */
+    @Test
+    void anomalousDimensionsWithPolygammasAreExactToTheLastOrder() {
+        Kernel kernel = KernelText.of("(digamma(1+u)+euler_gamma)/u+polygamma(1,1/2)/(2*u)")
+                .and("anomalous_dimension = \"polygamma(1,1/2+a)+a*digamma(1+a)*gamma(1-a)\"\ndefining_equation = \"d f/d ln mu = gamma\"")
+                .kernel(folder);
+        List<ExactConstant> longer = bySeries(kernel, 9, scales("3/2", "2"));
+        for (int loops = 1; loops <= 8; loops++) {
+            assertThat(enumerated(kernel, loops, scales("3/2", "2"))).isEqualTo(longer.subList(0, loops));
+            Kernel gamma = kernel.anomalousDimensionAsKernel();
+            assertThat(enumerated(gamma, loops, Scales.NATURAL)).isEqualTo(bySeries(gamma, loops, Scales.NATURAL));
+        }
     }
 }

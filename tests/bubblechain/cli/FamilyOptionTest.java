@@ -33,7 +33,7 @@ class FamilyOptionTest {
 
     @ParameterizedTest
     @CsvSource(delimiter = '|', textBlock = """
-            coefficients dis-f2 --parameter moment=13 | bubblechain: the parameter moment is an integer between 1 and 12, got 13
+            coefficients dis-f2 --parameter moment=31 | bubblechain: the parameter moment is an integer between 1 and 30, got 31
             coefficients dis-f2 --parameter moment=x | bubblechain: --parameter moment: 'x' is not a rational number such as 3, -3/4 or 1.25
             residue pole-mass --parameter moment=3 | bubblechain: --parameter needs --chain: a published series has no parameters
             """)

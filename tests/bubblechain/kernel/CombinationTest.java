@@ -162,7 +162,7 @@ class CombinationTest {
         assertRefused(part("adler", "1", "scale_ratio = \"-2\""), "a ratio of scales must be positive");
         assertRefused(part("pole-mass", "1", "scale_ratio = \"2\""), "the kernel pole-mass is renormalised");
         assertRefused(part("adler", "1", "wieght = \"2\""), "unknown key 'wieght' in [[part]]; did you mean weight?");
-        assertRefused(part("dis-f2", "1", "[part.parameters]\nmoment = \"99\""), "the parameter moment is an integer between 1 and 12");
+        assertRefused(part("dis-f2", "1", "[part.parameters]\nmoment = \"99\""), "the parameter moment is an integer between 1 and 30");
         assertRefused(part("dis-f2", "1", "[part.parameters]\nmoment = \"pi\""), "a parameter of a part is a rational number");
         assertRefused(part("missing.toml", "1", ""), "missing.toml");
         assertRefused("T = \"1\"\n" + part("adler", "1", ""), "form \"combination\" takes [[part]], not T");
