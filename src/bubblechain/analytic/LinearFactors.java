@@ -2,13 +2,18 @@ package bubblechain.analytic;
 
 import bubblechain.exact.Rational;
 import bubblechain.series.FixedSeries;
+import bubblechain.series.LinearGroup;
 import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 
-/** Products of factors (1 - u/root)^power applied to a series in v = u/rho, several at a time while the integers are small. */
+/**
+ * Products of factors (1 - u/root)^power applied to a series in v = u/rho, several at a time while the integers are small.
+ * The nearest roots come first, whether above or below: later errors then pass only factors that nearly cancel.
+ */
 final class LinearFactors {
     private static final int LARGEST_DEGREE = 4;
     private static final int LARGEST_BITS = 25;
@@ -16,28 +21,35 @@ final class LinearFactors {
     private LinearFactors() {}
 
     static FixedSeries apply(FixedSeries series, Map<Rational, Integer> powers, Rational radius) {
-        FixedSeries result = series;
-        for (List<Rational> slopes : groups(powers, radius, 1)) {
-            result = result.timesLinear(slopes);
-        }
-        for (List<Rational> slopes : groups(powers, radius, -1)) {
-            result = result.overLinear(slopes);
-        }
-        return result;
+        List<LinearGroup> groups = groups(powers, radius, 1);
+        groups.addAll(groups(powers, radius, -1));
+        groups.sort(Comparator.comparing(LinearFactors::steepest).reversed());
+        return series.throughLinear(groups);
+    }
+
+    private static Rational steepest(LinearGroup group) {
+        return group.slopes().get(0).abs();
+    }
+
+    private static Map<Rational, Integer> sorted(Map<Rational, Integer> powers) {
+        Map<Rational, Integer> sorted =
+                new TreeMap<>(Comparator.comparing(Rational::abs).thenComparing(Comparator.naturalOrder()));
+        sorted.putAll(powers);
+        return sorted;
     }
 
     /** The slopes -rho/root of the factors whose power has one sign, in small groups. */
-    private static List<List<Rational>> groups(Map<Rational, Integer> powers, Rational radius, int sign) {
-        List<List<Rational>> groups = new ArrayList<>();
+    private static List<LinearGroup> groups(Map<Rational, Integer> powers, Rational radius, int sign) {
+        List<LinearGroup> groups = new ArrayList<>();
         List<Rational> group = new ArrayList<>();
         BigInteger denominator = BigInteger.ONE;
-        for (Map.Entry<Rational, Integer> factor : new TreeMap<>(powers).entrySet()) {
+        for (Map.Entry<Rational, Integer> factor : sorted(powers).entrySet()) {
             Rational slope = radius.divide(factor.getKey()).negate();
             BigInteger size = slope.denominator().max(slope.numerator().abs());
             for (int k = 0; k < sign * factor.getValue(); k++) {
                 BigInteger larger = denominator.multiply(size);
                 if (group.size() == LARGEST_DEGREE || larger.bitLength() > LARGEST_BITS) {
-                    groups.add(group);
+                    groups.add(new LinearGroup(group, sign < 0));
                     group = new ArrayList<>();
                     larger = size;
                 }
@@ -45,8 +57,8 @@ final class LinearFactors {
                 denominator = larger;
             }
         }
-        groups.add(group);
-        groups.removeIf(List::isEmpty);
+        groups.add(new LinearGroup(group, sign < 0));
+        groups.removeIf(g -> g.slopes().isEmpty());
         return groups;
     }
 }

@@ -10,6 +10,8 @@ import java.util.List;
 final class ExponentialRecurrence {
     /** Blocks below this size are not divided. */
     private static final int SMALLEST_BLOCK = 32;
+    /** Bounds in units of the last place beyond which a better one is worth its time. */
+    private static final double LARGE_BOUND = 0x1p12;
 
     private final long[][] slopes;
     private final double[] slopeErrors;
@@ -26,6 +28,7 @@ final class ExponentialRecurrence {
     private final long[][] sums;
     private final int[] products;
     private final int[] transforms;
+    private double[] factor = {};
 
     ExponentialRecurrence(long[][] slopes, double[] slopeErrors, int limbs) {
         this.slopes = slopes;
@@ -53,6 +56,11 @@ final class ExponentialRecurrence {
         return bounds;
     }
 
+    /** The errors as a factor, see {@link ExponentialBounds}; empty where they are small or not known in this form. */
+    double[] factor() {
+        return factor;
+    }
+
     void run(long[][] known, double[] knownBounds) {
         for (int k = 0; k < known.length; k++) {
             h[k] = known[k];
@@ -67,6 +75,27 @@ final class ExponentialRecurrence {
             contribute(0, known.length, length);
             block(known.length, length);
         }
+        if (known.length == 1 && knownBounds[0] == 0 && Arrays.stream(bounds).max().orElse(0) > LARGE_BOUND) {
+            improveBounds();
+        }
+    }
+
+    private void improveBounds() {
+        double unit = Math.scalb(1.0, -FixedSeries.bits(limbs));
+        double[] lost = new double[h.length];
+        double[] upper = new double[h.length];
+        for (int n = 0; n < h.length; n++) {
+            lost[n] = lost(n);
+            upper[n] = (sizes[n] + bounds[n] * unit) * FixedSeries.UP;
+        }
+        factor = ExponentialBounds.factor(slopes, slopeErrors, lost, unit);
+        double[] others = ExponentialBounds.errors(upper, factor);
+        Arrays.setAll(bounds, n -> others[n] < bounds[n] ? others[n] : bounds[n]);
+    }
+
+    /** One unit for the digits dropped from the sum, one for the division, one for all dropped columns; times n. */
+    private double lost(int n) {
+        return transforms[n] + 3.0 * n;
     }
 
     private void measure(int n) {
@@ -138,15 +167,14 @@ final class ExponentialRecurrence {
 
     private void finish(int n) {
         double unit = Math.scalb(1.0, -FixedSeries.bits(limbs));
-        double bound = transforms[n];
+        double bound = lost(n);
         for (int k = 1; k <= n; k++) {
             bound += slopeSizes[k] * bounds[n - k] + slopeErrors[k] * (sizes[n - k] + bounds[n - k] * unit);
         }
         h[n] = FixedDigits.fromSums(sums[n], limbs);
         sums[n] = new long[0];
         FixedDigits.divideSmall(h[n], n);
-        // one unit for the digits dropped from the sum, one for the division, one for all dropped columns
-        bounds[n] = (bound / n + 3) * FixedSeries.UP;
+        bounds[n] = bound / n * FixedSeries.UP;
         measure(n);
     }
 }

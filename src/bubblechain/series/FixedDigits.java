@@ -106,6 +106,16 @@ final class FixedDigits {
         return largest;
     }
 
+    /** The number to four units in the last place of a double. */
+    static double toDouble(long[] digits) {
+        int zeros = leadingZeros(digits);
+        double value = 0;
+        for (int k = Math.min(digits.length, zeros + 3) - 1; k >= zeros; k--) {
+            value = value * 0x1p-56 + digits[k];
+        }
+        return Math.scalb(value, -BITS * zeros);
+    }
+
     /** Not below |number|. */
     static double upperBound(long[] digits) {
         int zeros = leadingZeros(digits);

@@ -32,11 +32,18 @@ public final class FixedSeries {
     private final int limbs;
     private final long[][] digits;
     private final double[] errors;
+    /** The errors once more as a factor of the series, see {@link ExponentialBounds}; empty if not known. */
+    private final double[] factor;
 
     private FixedSeries(int limbs, long[][] digits, double[] errors) {
+        this(limbs, digits, errors, new double[0]);
+    }
+
+    private FixedSeries(int limbs, long[][] digits, double[] errors, double[] factor) {
         this.limbs = limbs;
         this.digits = digits;
         this.errors = errors;
+        this.factor = factor;
     }
 
     /** Number of limbs after the point that hold at least so many bits. */
@@ -157,7 +164,7 @@ public final class FixedSeries {
     public FixedSeries expOfIntegral(FixedSeries known) {
         ExponentialRecurrence recurrence = new ExponentialRecurrence(digits, errors, limbs);
         recurrence.run(known.digits, known.errors);
-        return new FixedSeries(limbs, recurrence.digits(), recurrence.bounds());
+        return new FixedSeries(limbs, recurrence.digits(), recurrence.bounds(), recurrence.factor());
     }
 
     private int productsBetweenCarries() {
@@ -302,36 +309,50 @@ public final class FixedSeries {
         return RationalSteps.times(this, polynomial);
     }
 
-    /** This over a polynomial over Q in v whose constant term is not zero. */
-    public FixedSeries over(List<Rational> polynomial) {
-        return RationalSteps.over(this, polynomial);
-    }
-
     /**
-     * This over prod (1 + slope v).
+     * This over a polynomial over Q in v whose constant term is not zero.
      *
-     * <p>What the recurrence loses at each step is divided by the same factors, so the errors obey
-     * e = (e_f + 2)/prod (1 - |slope| v) as majorants; bounding the recurrence of the multiplied-out polynomial term by term
-     * would let them grow exponentially.
+     * <p>Each step of p_0 g_n = f_n - sum p_i g_(n-i) is off by at most two units, so the errors of g are those of f/p_0 and
+     * two units more, times p_0/p, whose coefficients may be far smaller than the steps let expect.
      */
-    public FixedSeries overLinear(List<Rational> slopes) {
-        FixedSeries quotient = RationalSteps.over(this, RationalSteps.product(slopes));
+    public FixedSeries over(List<Rational> polynomial) {
+        Rational leading = polynomial.get(0);
+        FixedSeries scaled = leading.equals(Rational.ONE) ? this : times(List.of(leading.inverse()));
+        FixedSeries quotient =
+                RationalSteps.over(scaled, polynomial.stream().map(c -> c.divide(leading)).toList());
+        double[] sizes = RationalSteps.quotientSizes(polynomial, length());
         double[] bounds = new double[length()];
         for (int n = 0; n < bounds.length; n++) {
-            bounds[n] = (errors[n] + 2) * UP;
-        }
-        for (Rational slope : slopes) {
-            double size = Math.abs(slope.toDouble()) * UP;
-            for (int n = 1; n < bounds.length; n++) {
-                bounds[n] = (bounds[n] + size * bounds[n - 1]) * (1 + 0x1p-50);
+            double bound = 0;
+            for (int k = 0; k <= n; k++) {
+                bound += sizes[k] * (scaled.errors[n - k] + 2);
             }
+            bounds[n] = bound * UP;
         }
         return new FixedSeries(limbs, quotient.digits, bounds);
     }
 
-    /** This times prod (1 + slope v). */
-    public FixedSeries timesLinear(List<Rational> slopes) {
-        return RationalSteps.times(this, RationalSteps.product(slopes));
+    /** This times or over groups of linear factors, one after the other; {@link LinearBounds} has the error. */
+    public FixedSeries throughLinear(List<LinearGroup> groups) {
+        FixedSeries result = this;
+        for (LinearGroup group : groups) {
+            List<Rational> polynomial = RationalSteps.product(group.slopes());
+            result = group.divides() ? RationalSteps.over(result, polynomial) : RationalSteps.times(result, polynomial);
+        }
+        if (groups.isEmpty()) {
+            return this;
+        }
+        LinearBounds linear = LinearBounds.of(groups, length());
+        double[] bounds = linear.after(errors);
+        return new FixedSeries(
+                limbs, result.digits, factor.length == 0 ? bounds : linear.after(factor, upper(result.digits, bounds), bounds));
+    }
+
+    private double[] upper(long[][] numbers, double[] bounds) {
+        double unit = Math.scalb(1.0, -bits(limbs));
+        double[] upper = new double[numbers.length];
+        Arrays.setAll(upper, n -> (FixedDigits.upperBound(numbers[n]) + bounds[n] * unit) * UP);
+        return upper;
     }
 
     /** The integer of coefficient k, the number times 2^(56 limbs). */

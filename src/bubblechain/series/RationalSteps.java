@@ -54,6 +54,40 @@ final class RationalSteps {
         return FixedSeries.of(result, errors, series.limbs());
     }
 
+    /**
+     * Bounds of the sizes of the coefficients of p_0/p.
+     *
+     * <p>The recurrence in doubles gives some q with p q = p_0 (1 + h), h known to be small, so that the quotient is q - h times
+     * the quotient, and |quotient_n| &lt;= |q_n| + sum_{k>=1} |h_k| |quotient_(n-k)|. Interval arithmetic would grow like
+     * 1/(1 - sum |p_i| v^i) instead, exponentially faster.
+     */
+    static double[] quotientSizes(List<Rational> polynomial, int length) {
+        int degree = polynomial.size() - 1;
+        double[] p = polynomial.stream()
+                .mapToDouble(c -> c.divide(polynomial.get(0)).toDouble())
+                .toArray();
+        double[] q = new double[length];
+        double[] h = new double[length];
+        double[] sizes = new double[length];
+        for (int n = 0; n < length; n++) {
+            double sum = 0;
+            double terms = 0;
+            for (int i = 1; i <= degree && i <= n; i++) {
+                sum += p[i] * q[n - i];
+                terms += Math.abs(p[i] * q[n - i]);
+            }
+            q[n] = n == 0 ? 1 : -sum;
+            // each p_i is off by four units at most; then come a product and a sum
+            h[n] = (degree + 6) * (0x1p-51 * terms + 4 * Double.MIN_VALUE);
+            double bound = Math.abs(q[n]);
+            for (int k = 1; k <= n; k++) {
+                bound += h[k] * sizes[n - k];
+            }
+            sizes[n] = bound * FixedSeries.UP;
+        }
+        return sizes;
+    }
+
     /** The coefficients of prod (1 + slope v). */
     static List<Rational> product(List<Rational> slopes) {
         List<Rational> product = new ArrayList<>(List.of(Rational.ONE));

@@ -179,8 +179,8 @@ class FixedSeriesBoundsTest {
                 product = new SampledSeries(a.series(), product, a.scale()).times(linear);
                 quotient = new SampledSeries(a.series(), quotient, a.scale()).over(linear);
             }
-            SampledSeries.assertWithin(a.series().timesLinear(slopes), product, a.scale(), slack);
-            SampledSeries.assertWithin(a.series().overLinear(slopes), quotient, a.scale(), slack);
+            SampledSeries.assertWithin(a.series().throughLinear(List.of(new LinearGroup(slopes, false))), product, a.scale(), slack);
+            SampledSeries.assertWithin(a.series().throughLinear(List.of(new LinearGroup(slopes, true))), quotient, a.scale(), slack);
         }
         assertNotWasteful(slack);
     }
