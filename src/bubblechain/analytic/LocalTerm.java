@@ -11,6 +11,7 @@ import bubblechain.exact.Rational;
 import bubblechain.series.SeriesAlgebra;
 import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Map;
 
@@ -22,6 +23,8 @@ import java.util.Map;
 final class LocalTerm {
     /** Recurrence steps, times the power or order, from an argument down to (0,1]. */
     private static final int LARGEST_DISTANCE = 10_000;
+    /** Expansions from this length on divide by linear factors one by one; below, the factoring would be seen in the time. */
+    private static final int LONG = 24;
 
     private final Rational point;
     private final TermKey key;
@@ -134,7 +137,9 @@ final class LocalTerm {
             result = algebra.multiply(result, p.coefficients());
         }
         for (Polynomial p : below) {
-            result = algebra.divide(result, p.coefficients());
+            for (Polynomial factor : algebra.length() < LONG ? List.of(p) : factors(p)) {
+                result = algebra.divide(result, factor.coefficients());
+            }
         }
         int poles = 0;
         for (Map.Entry<PolygammaFactor, Integer> entry : key.polygammas().entrySet()) {
@@ -154,6 +159,22 @@ final class LocalTerm {
         }
         // The poles of the polygammas and hypergeometric functions are already in the series, the other powers of x are not.
         return algebra.shift(result, valuation + poles);
+    }
+
+    /**
+     * The linear factors of a denominator with rational roots, and the rest: the radii of balls grow more slowly in quotients by
+     * one factor after the other than by their product, whose coefficients cancel.
+     */
+    private static List<Polynomial> factors(Polynomial polynomial) {
+        if (polynomial.degree() < 2) {
+            return List.of(polynomial);
+        }
+        RationalRoots.Split split = RationalRoots.of(polynomial);
+        Rational leading = polynomial.coefficients().get(polynomial.degree());
+        List<Polynomial> factors = new ArrayList<>(List.of(split.rest().multiply(leading)));
+        split.roots().forEach((root, power) -> factors.addAll(
+                Collections.nCopies(power, Polynomial.linear(root.negate(), Rational.ONE))));
+        return factors;
     }
 
     /** constant exp(sum of log-gamma tails + slope x). */
