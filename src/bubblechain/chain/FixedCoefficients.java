@@ -7,6 +7,7 @@ import bubblechain.analytic.NormalForm;
 import bubblechain.exact.Ball;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
+import bubblechain.exact.ExactFunctions;
 import bubblechain.exact.Magnitude;
 import bubblechain.exact.Rational;
 import bubblechain.kernel.Kernel;
@@ -27,7 +28,10 @@ import java.util.function.Supplier;
  */
 final class FixedCoefficients {
     private static final double LN2 = Math.log(2);
-    private static final Rational INSIDE = Rational.of(15, 16);
+    /** The circle of the bound, close to the nearest pole: another radius would cost its ratio at every order. */
+    private static final Rational INSIDE = Rational.of(511, 512);
+
+    private static final int RATIO_BITS = 40;
     private static final int GUARD_BITS = 16;
     /** The anomalous part is computed in at most so many stages, one for each so many bits: measured, and flat. */
     private static final int STAGES = 8;
@@ -233,8 +237,9 @@ final class FixedCoefficients {
     record Tail(int last, Magnitude size) {}
 
     /**
-     * |y_k| &lt;= M (rho/R)^k/k!/2 for |gamma| &lt;= M on |a| = R; the sum over k &gt;= K is at most twice its first term once
-     * K exceeds 2 rho/R. With the exponential in front the loss is at most e^|l| times that, l = L rho.
+     * |y_k| &lt;= M (rho/R)^k/k!/2 for |gamma| &lt;= M on |a| = R; the sum over k &gt;= K is at most (1 + 2x) times its first term
+     * once x = rho/(R K) is below 1/2. With e^(l v) in front, l = L rho, every term takes one of the coefficients l^j/j!, so
+     * that the loss is at most the largest of them times that.
      */
     Optional<Tail> tail(NormalForm form, int count, Rational radius, ExactConstant log) {
         return FixedExpansion.radius(form)
@@ -264,15 +269,34 @@ final class FixedCoefficients {
             return none;
         }
         double ratio = radius.toDouble() / bound.radius();
-        double logarithm =
-                bound.logarithm() + log.multiply(radius).toBall(ESTIMATE_BITS).upperBound().toDouble();
+        Magnitude exponential = largestTerm(log.multiply(radius).toBall(ESTIMATE_BITS).upperBound(), count);
+        double logarithm = bound.logarithm() + exponential.exponent() * LN2;
         for (int k = 1; k < count; k++) {
             logarithm += Math.log(ratio) - Math.log(k);
             if (k > 2 * ratio && logarithm < -(bits + GUARD_BITS) * LN2) {
-                // one bit more for the rounding of the logarithms
-                return new Tail(k, Magnitude.powerOfTwo((long) Math.ceil(logarithm / LN2) + 1));
+                return new Tail(k, loss(bound, k, radius).multiply(exponential));
             }
         }
         return none;
+    }
+
+    /** The largest l^j/j! with j below {@code count}. */
+    private static Magnitude largestTerm(Magnitude l, int count) {
+        Magnitude term = Magnitude.ONE;
+        Magnitude largest = term;
+        for (long j = 1; j < count && Magnitude.of(j).compareTo(l) <= 0; j++) {
+            term = term.multiply(l).multiply(Magnitude.ofRational(Rational.of(1, j)));
+            largest = largest.max(term);
+        }
+        return largest;
+    }
+
+    private static Magnitude loss(ArcBound.Bound bound, int k, Rational radius) {
+        Rational weight = radius.power(k).divide(Rational.of(ExactFunctions.factorial(k).shiftLeft(1)));
+        double x = radius.toDouble() / bound.radius() / k;
+        Magnitude excess = Magnitude.of((long) Math.scalb(2 * x, RATIO_BITS) + 1).scale(-RATIO_BITS);
+        return bound.coefficientBound(k)
+                .multiply(Magnitude.ofRational(weight))
+                .multiply(Magnitude.ONE.add(excess));
     }
 }

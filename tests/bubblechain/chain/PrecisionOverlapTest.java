@@ -14,7 +14,7 @@ import org.junit.jupiter.params.provider.CsvSource;
 /** Balls at a low precision contain those at a high one, on whichever route each was found. */
 class PrecisionOverlapTest {
     private static final int LOOPS = 61;
-    private static final int HIGH_BITS = 1_500;
+    private static final int HIGH_BITS = 3 * 700;
 
     @ParameterizedTest
     @CsvSource({
