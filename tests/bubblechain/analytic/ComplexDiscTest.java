@@ -4,10 +4,15 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import bubblechain.exact.Ball;
 import bubblechain.exact.BallFunctions;
+import bubblechain.exact.BoundSamples;
 import bubblechain.exact.Rational;
 import java.math.BigDecimal;
 import java.math.MathContext;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
 import java.util.Random;
+import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.Test;
 
 /** Inclusion: points of the arguments, combined in exact decimal arithmetic, lie in the resulting disc. */
@@ -49,8 +54,23 @@ class ComplexDiscTest {
         return square(re.subtract(exact(disc.re()))).add(square(im.subtract(exact(disc.im()))));
     }
 
-    private static void assertInside(ComplexDisc disc, BigDecimal re, BigDecimal im) {
-        assertThat(squaredDistance(disc, re, im)).isLessThanOrEqualTo(square(exact(disc.radius())));
+    /** log2(radius/distance) of the points that are not the centre. */
+    private final List<Double> ratios = new ArrayList<>();
+
+    private void assertInside(ComplexDisc disc, BigDecimal re, BigDecimal im) {
+        BigDecimal distance = squaredDistance(disc, re, im);
+        assertThat(distance).isLessThanOrEqualTo(square(exact(disc.radius())));
+        if (distance.signum() > 0) {
+            ratios.add(Math.log(square(exact(disc.radius())).divide(distance, DIGITS).doubleValue()) / (2 * Math.log(2)));
+        }
+    }
+
+    @AfterEach
+    void radiiAreNotWasteful() {
+        if (!ratios.isEmpty()) {
+            Collections.sort(ratios);
+            assertThat(ratios.get(ratios.size() / 2)).isLessThan(BoundSamples.LARGEST_MEDIAN);
+        }
     }
 
     @Test
