@@ -25,6 +25,8 @@ final class LocalTerm {
     private static final int LARGEST_DISTANCE = 10_000;
     /** Expansions from this length on divide by linear factors one by one; below, the factoring would be seen in the time. */
     private static final int LONG = 24;
+    /** Denominators of a degree above this are factored for short expansions too. */
+    private static final int LOW = 6;
 
     private final Rational point;
     private final TermKey key;
@@ -137,7 +139,7 @@ final class LocalTerm {
             result = algebra.multiply(result, p.coefficients());
         }
         for (Polynomial p : below) {
-            for (Polynomial factor : algebra.length() < LONG ? List.of(p) : factors(p)) {
+            for (Polynomial factor : algebra.length() < LONG && p.degree() <= LOW ? List.of(p) : factors(p)) {
                 result = algebra.divide(result, factor.coefficients());
             }
         }
