@@ -117,7 +117,7 @@ public final class Chain {
         requireRange("the number of digits", digits, LARGEST_DIGITS);
         requireRange("the number of loops", loops, LARGEST_LOOPS);
         ChainCost.of(loops, digits).requireMemory(Runtime.getRuntime().maxMemory());
-        int needed = (int) Math.ceil(digits * BITS_PER_DIGIT) + 2 * (32 - Integer.numberOfLeadingZeros(loops));
+        int needed = firstBits(loops, digits) - FIRST_GUARD_BITS;
         for (int guard = FIRST_GUARD_BITS; ; guard *= 2) {
             int bits = needed + guard;
             List<Ball> balls = rendering.applyToBalls(balls(loops, bits), bits);
@@ -132,6 +132,11 @@ public final class Chain {
                 return settled(balls, numbers, rendering.applyToExact(affordable(open)), digits, bits);
             }
         }
+    }
+
+    /** The working precision of the first attempt, which normally decides every digit. */
+    static int firstBits(int loops, int digits) {
+        return (int) Math.ceil(digits * BITS_PER_DIGIT) + 2 * (32 - Integer.numberOfLeadingZeros(loops)) + FIRST_GUARD_BITS;
     }
 
     /** One more than the index of the last number in doubt; 0 if there is none. */

@@ -69,7 +69,8 @@ final class ZetaFunctions {
         }
     }
 
-    private static Ball[] freshTable(int max, int bits) {
+    /** A table that owes nothing to those kept; each value keeps a few bits beyond the ones asked for. */
+    static Ball[] freshTable(int max, int bits) {
         Ball[] table = new Ball[max + 1];
         Arrays.fill(table, Ball.ZERO);
         table[0] = Ball.ofDyadic(BigInteger.ONE.negate(), -1);

@@ -15,7 +15,7 @@ import org.junit.jupiter.api.Test;
 class ConcurrentUseTest {
     private static final List<String> KERNELS =
             List.of("pole-mass", "adler", "static-potential-r", "gamma-m", "chromomag-ca", "static-potential-q");
-    private static final int REQUESTS = 32;
+    private static final int REQUESTS = 24;
 
     /** Short lists, long lists and closed forms in turn, the precision growing so that tables are made anew meanwhile. */
     private static List<String> digits(int request, int base) {

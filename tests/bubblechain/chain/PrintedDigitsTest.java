@@ -65,6 +65,24 @@ class PrintedDigitsTest {
         assertReread(name, chain.certified(14, 35), balls.subList(0, 14), 35);
     }
 
+    /** The guard bits cover what the bounds lose, and eight bits more: a second attempt would double the time. */
+    @ParameterizedTest
+    @ValueSource(strings = {
+        "pole-mass", "adler", "tau", "bjorken-gls", "cusp", "gamma-m", "chromomag-ca", "static-potential-r", "lepton-g2"
+    })
+    void theFirstAttemptDecidesEveryDigit(String name) {
+        Kernel kernel = KernelLibrary.load(name);
+        for (int[] size : new int[][] {{14, 35}, {30, 60}, {110, 120}}) {
+            List<Ball> balls = Chain.of(kernel).balls(size[0], Chain.firstBits(size[0], size[1]));
+            for (int n = 0; n < size[0]; n++) {
+                Ball ball = balls.get(n);
+                assertThat(ball.isZero() || ball.accuracyBits() > size[1] * BITS_PER_DIGIT + 8)
+                        .as("%s, c_%d to %d digits: %s", name, n, size[1], ball)
+                        .isTrue();
+            }
+        }
+    }
+
     @ParameterizedTest
     @MethodSource("library")
     void decimalsOfClosedFormsAreReadAgainAndAreThoseOfTheLists(String name) {

@@ -126,6 +126,21 @@ class ErrorBoundsTest {
         samples.assertNotWasteful(20, "%s", named);
     }
 
+    /** Euler's and Maclaurin's formula is the referee of Bernoulli numbers and Borwein's sum. */
+    @Test
+    void everyZetaValueOfANewTableIsWithinItsRadius() {
+        for (int bits : new int[] {40, 150, 400}) {
+            BoundSamples samples = new BoundSamples();
+            Ball[] table = ZetaFunctions.freshTable(70, bits);
+            Ball[] finer = BallFunctions.hurwitzZetaTable(Ball.ONE, 70, 3 * bits);
+            for (int k = 2; k <= 70; k++) {
+                samples.add(table[k], finer[k], "zeta(%d), %d bits", k, bits);
+                assertThat(table[k].radius()).as("zeta(%d), %d bits", k, bits).isLessThan(Magnitude.powerOfTwo(-bits - 2));
+            }
+            samples.assertNotWasteful(60, "zeta table, %d bits", bits);
+        }
+    }
+
     @Test
     void arithmeticIsWithinItsRadiiSeed63() {
         RandomBalls source = new RandomBalls(63);
