@@ -11,8 +11,8 @@ import java.util.Map;
 import java.util.TreeMap;
 
 /**
- * Products of factors (1 - u/root)^power applied to a series in v = u/rho, several at a time while the integers are small.
- * The nearest roots come first, whether above or below: later errors then pass only factors that nearly cancel.
+ * Products of factors (1 - u/root)^power applied to a series in v = u/rho, several at a time while the integers are
+ * small. The nearest roots come first, whether above or below: later errors then pass only factors that nearly cancel.
  */
 final class LinearFactors {
     private static final int LARGEST_DEGREE = 4;

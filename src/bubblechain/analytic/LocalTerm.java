@@ -17,13 +17,16 @@ import java.util.Map;
 
 /**
  * One term of a normal form written about u0, x = u - u0: an exact power of x, an exact constant, polynomials in x with
- * non-zero constant term above and below, gamma functions at arguments in (0,1] at x = 0, and the rest. The power of x is
- * settled here, in exact arithmetic, before any approximate number enters.
+ * non-zero constant term above and below, gamma functions at arguments in (0,1] at x = 0, and the rest. The power of x
+ * is settled here, in exact arithmetic, before any approximate number enters.
  */
 final class LocalTerm {
     /** Recurrence steps, times the power or order, from an argument down to (0,1]. */
     private static final int LARGEST_DISTANCE = 10_000;
-    /** Expansions from this length on divide by linear factors one by one; below, the factoring would be seen in the time. */
+    /**
+     * Expansions from this length on divide by linear factors one by one; below, the factoring would be seen in the
+     * time.
+     */
     private static final int LONG = 24;
     /** Denominators of a degree above this are factored for short expansions too. */
     private static final int LOW = 6;
@@ -164,8 +167,8 @@ final class LocalTerm {
     }
 
     /**
-     * The linear factors of a denominator with rational roots, and the rest: the radii of balls grow more slowly in quotients by
-     * one factor after the other than by their product, whose coefficients cancel.
+     * The linear factors of a denominator with rational roots, and the rest: the radii of balls grow more slowly in
+     * quotients by one factor after the other than by their product, whose coefficients cancel.
      */
     private static List<Polynomial> factors(Polynomial polynomial) {
         if (polynomial.degree() < 2) {

@@ -57,7 +57,8 @@ public final class Chain {
     }
 
     /**
-     * The chain of the kernel's anomalous dimension, gamma(a) = sum gamma_n a^n with d ln O/d ln mu = prefactor x a gamma(a).
+     * The chain of the kernel's anomalous dimension, gamma(a) = sum gamma_n a^n with d ln O/d ln mu = prefactor x a
+     * gamma(a).
      *
      * @throws DomainException if the kernel has none
      */
@@ -136,7 +137,8 @@ public final class Chain {
 
     /** The working precision of the first attempt, which normally decides every digit. */
     static int firstBits(int loops, int digits) {
-        return (int) Math.ceil(digits * BITS_PER_DIGIT) + 2 * (32 - Integer.numberOfLeadingZeros(loops)) + FIRST_GUARD_BITS;
+        int forLength = 2 * (32 - Integer.numberOfLeadingZeros(loops));
+        return (int) Math.ceil(digits * BITS_PER_DIGIT) + forLength + FIRST_GUARD_BITS;
     }
 
     /** One more than the index of the last number in doubt; 0 if there is none. */

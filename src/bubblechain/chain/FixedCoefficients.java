@@ -237,9 +237,9 @@ final class FixedCoefficients {
     record Tail(int last, Magnitude size) {}
 
     /**
-     * |y_k| &lt;= M (rho/R)^k/k!/2 for |gamma| &lt;= M on |a| = R; the sum over k &gt;= K is at most (1 + 2x) times its first term
-     * once x = rho/(R K) is below 1/2. With e^(l v) in front, l = L rho, every term takes one of the coefficients l^j/j!, so
-     * that the loss is at most the largest of them times that.
+     * |y_k| &lt;= M (rho/R)^k/k!/2 for |gamma| &lt;= M on |a| = R; the sum over k &gt;= K is at most (1 + 2x) times its
+     * first term once x = rho/(R K) is below 1/2. With e^(l v) in front, l = L rho, every term takes one of the
+     * coefficients l^j/j!, so that the loss is at most the largest of them times that.
      */
     Optional<Tail> tail(NormalForm form, int count, Rational radius, ExactConstant log) {
         return FixedExpansion.radius(form)

@@ -3,13 +3,13 @@ package bubblechain.series;
 import java.util.Arrays;
 
 /**
- * The errors of h = e^L, h_0 = 1, as a factor: better than the bounds of the recurrence where slopes are large and cancel each
- * other, and dearer.
+ * The errors of h = e^L, h_0 = 1, as a factor: better than the bounds of the recurrence where slopes are large and
+ * cancel each other, and dearer.
  *
- * <p>With slopes k L_k that are off by d_k at most, and r_n lost in step n n times over, the numbers computed are
- * h (1 + x)(1 + y), where 1 + x is the exponential of the series of the d_k/k, and y the integral of (r/v) e^(-L) over the slopes
- * taken: |y_n| &lt;= (1/n) sum_{i=1}^{n} |g_{n-i}| |r_i|, g = e^(-L). The products of errors are below the square of the sum
- * of all x and y: e^s - 1 - s &lt;= s^2 for s &lt;= 1.
+ * <p>With slopes k L_k that are off by d_k at most, and r_n lost in step n n times over, the numbers computed are h (1
+ * + x)(1 + y), where 1 + x is the exponential of the series of the d_k/k, and y the integral of (r/v) e^(-L) over the
+ * slopes taken: |y_n| &lt;= (1/n) sum_{i=1}^{n} |g_{n-i}| |r_i|, g = e^(-L). The products of errors are below the
+ * square of the sum of all x and y: e^s - 1 - s &lt;= s^2 for s &lt;= 1.
  */
 final class ExponentialBounds {
     private ExponentialBounds() {}

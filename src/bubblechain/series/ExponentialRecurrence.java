@@ -4,8 +4,8 @@ import java.util.Arrays;
 import java.util.List;
 
 /**
- * The work state of n h_n = sum_{k=1}^{n} s_k h_{n-k}, h_0 given. Each block of new coefficients is added to the sums of
- * the next one as a whole, by columns or by a transform, whichever is cheaper; single blocks are done term by term.
+ * The work state of n h_n = sum_{k=1}^{n} s_k h_{n-k}, h_0 given. Each block of new coefficients is added to the sums
+ * of the next one as a whole, by columns or by a transform, whichever is cheaper; single blocks are done term by term.
  */
 final class ExponentialRecurrence {
     /** Blocks below this size are not divided. */

@@ -9,11 +9,11 @@ import java.util.List;
 
 /**
  * A power series with fixed-point coefficients at one common scale and an error bound for each, in units of the last
- * place: the fast counterpart of a series of balls. Coefficients should be of order one; a number that grows out of range
- * throws {@link ArithmeticException}, and the caller takes another route. Immutable.
+ * place: the fast counterpart of a series of balls. Coefficients should be of order one; a number that grows out of
+ * range throws {@link ArithmeticException}, and the caller takes another route. Immutable.
  *
- * <p>Error discipline: every operation carries the same recurrence for the bounds as for the numbers. Bounds are sums of
- * positive doubles; their own rounding, below n 2^-52 for n terms, is covered by the factor {@link #UP}.
+ * <p>Error discipline: every operation carries the same recurrence for the bounds as for the numbers. Bounds are sums
+ * of positive doubles; their own rounding, below n 2^-52 for n terms, is covered by the factor {@link #UP}.
  */
 public final class FixedSeries {
     /** Covers the rounding of a sum of up to 2^20 positive doubles. */
@@ -265,7 +265,9 @@ public final class FixedSeries {
         return combine(polynomial, divisor, digits, errors);
     }
 
-    /** This over (p_0 + p_1 v + ...) with p_0 &gt; 0: p_0 g_n = f_n - sum_{i>=1} p_i g_{n-i}, with f = p_0 times this. */
+    /**
+     * This over (p_0 + p_1 v + ...) with p_0 &gt; 0: p_0 g_n = f_n - sum_{i>=1} p_i g_{n-i}, with f = p_0 times this.
+     */
     FixedSeries overSmallPolynomial(long[] polynomial) {
         long[] recurrence = polynomial.clone();
         for (int i = 1; i < recurrence.length; i++) {
@@ -312,8 +314,8 @@ public final class FixedSeries {
     /**
      * This over a polynomial over Q in v whose constant term is not zero.
      *
-     * <p>Each step of p_0 g_n = f_n - sum p_i g_(n-i) is off by at most two units, so the errors of g are those of f/p_0 and
-     * two units more, times p_0/p, whose coefficients may be far smaller than the steps let expect.
+     * <p>Each step of p_0 g_n = f_n - sum p_i g_(n-i) is off by at most two units, so the errors of g are those of
+     * f/p_0 and two units more, times p_0/p, whose coefficients may be far smaller than the steps let expect.
      */
     public FixedSeries over(List<Rational> polynomial) {
         Rational leading = polynomial.get(0);
@@ -344,8 +346,10 @@ public final class FixedSeries {
         }
         LinearBounds linear = LinearBounds.of(groups, length());
         double[] bounds = linear.after(errors);
-        return new FixedSeries(
-                limbs, result.digits, factor.length == 0 ? bounds : linear.after(factor, upper(result.digits, bounds), bounds));
+        if (factor.length > 0) {
+            bounds = linear.after(factor, upper(result.digits, bounds), bounds);
+        }
+        return new FixedSeries(limbs, result.digits, bounds);
     }
 
     private double[] upper(long[][] numbers, double[] bounds) {

@@ -6,10 +6,11 @@ import java.util.List;
 /**
  * What groups of linear factors, applied one after the other, make of the errors of a series.
  *
- * <p>A step leaves an error of at most two units in every coefficient: a product g = p f + d, a quotient p g = f + d. What
- * follows multiplies d by the power series of all later groups, in a quotient by that of its own one too. With F the product of all
- * groups and S the sum of the sizes of those partial ones, the errors are at most |F| e + 2 S/(1 - v), coefficient by coefficient.
- * Bounding each step alone would take prod (1 + |slope|) for |F|, where neighbouring factors above and below nearly cancel.
+ * <p>A step leaves an error of at most two units in every coefficient: a product g = p f + d, a quotient p g = f + d.
+ * What follows multiplies d by the power series of all later groups, in a quotient by that of its own one too. With F
+ * the product of all groups and S the sum of the sizes of those partial ones, the errors are at most |F| e + 2 S/(1 -
+ * v), coefficient by coefficient. Bounding each step alone would take prod (1 + |slope|) for |F|, where neighbouring
+ * factors above and below nearly cancel.
  */
 final class LinearBounds {
     /** Bound of the relative rounding of a slope, a product and a sum of doubles. */

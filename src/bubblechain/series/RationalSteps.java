@@ -5,7 +5,10 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 
-/** Products and quotients of fixed-point series with polynomials over Q: in small integers where they fit, else in big ones. */
+/**
+ * Products and quotients of fixed-point series with polynomials over Q: in small integers where they fit, else in big
+ * ones.
+ */
 final class RationalSteps {
     private RationalSteps() {}
 
@@ -57,9 +60,9 @@ final class RationalSteps {
     /**
      * Bounds of the sizes of the coefficients of p_0/p.
      *
-     * <p>The recurrence in doubles gives some q with p q = p_0 (1 + h), h known to be small, so that the quotient is q - h times
-     * the quotient, and |quotient_n| &lt;= |q_n| + sum_{k>=1} |h_k| |quotient_(n-k)|. Interval arithmetic would grow like
-     * 1/(1 - sum |p_i| v^i) instead, exponentially faster.
+     * <p>The recurrence in doubles gives some q with p q = p_0 (1 + h), h known to be small, so that the quotient is q
+     * - h times the quotient, and |quotient_n| &lt;= |q_n| + sum_{k>=1} |h_k| |quotient_(n-k)|. Interval arithmetic
+     * would grow like 1/(1 - sum |p_i| v^i) instead, exponentially faster.
      */
     static double[] quotientSizes(List<Rational> polynomial, int length) {
         int degree = polynomial.size() - 1;

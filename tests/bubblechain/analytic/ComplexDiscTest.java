@@ -61,7 +61,8 @@ class ComplexDiscTest {
         BigDecimal distance = squaredDistance(disc, re, im);
         assertThat(distance).isLessThanOrEqualTo(square(exact(disc.radius())));
         if (distance.signum() > 0) {
-            ratios.add(Math.log(square(exact(disc.radius())).divide(distance, DIGITS).doubleValue()) / (2 * Math.log(2)));
+            double ratio = square(exact(disc.radius())).divide(distance, DIGITS).doubleValue();
+            ratios.add(Math.log(ratio) / (2 * Math.log(2)));
         }
     }
 

@@ -11,10 +11,11 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /**
- * Radii of gamma functions and polygammas over the complex plane against closed forms on two vertical lines, in balls of more than
- * three times the 53 bits of the discs: |Gamma(1/2 + iy)|^2 = pi/cosh(pi y), |Gamma(1 + iy)|^2 = pi y/sinh(pi y),
- * Im psi(1/2 + iy) = (pi/2) tanh(pi y), Im psi(1 + iy) = -1/(2y) + (pi/2) coth(pi y) (DLMF 5.4.4, 5.4.3, 5.4.17, 5.4.18, numbers from memory), and
- * 2 Re psi'(1/2 + iy) = pi^2/cosh^2(pi y) from the reflection formula DLMF 5.15.6; moved to the right by recurrence.
+ * Radii of gamma functions and polygammas over the complex plane against closed forms on two vertical lines, in balls
+ * of more than three times the 53 bits of the discs: |Gamma(1/2 + iy)|^2 = pi/cosh(pi y), |Gamma(1 + iy)|^2 = pi
+ * y/sinh(pi y), Im psi(1/2 + iy) = (pi/2) tanh(pi y), Im psi(1 + iy) = -1/(2y) + (pi/2) coth(pi y) (DLMF 5.4.4, 5.4.3,
+ * 5.4.17, 5.4.18, numbers from memory), and 2 Re psi'(1/2 + iy) = pi^2/cosh^2(pi y) from the reflection formula DLMF
+ * 5.15.6; moved to the right by recurrence.
  */
 class StirlingBoundsTest {
     private static final int BITS = 220;

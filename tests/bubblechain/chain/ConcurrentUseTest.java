@@ -17,7 +17,9 @@ class ConcurrentUseTest {
             List.of("pole-mass", "adler", "static-potential-r", "gamma-m", "chromomag-ca", "static-potential-q");
     private static final int REQUESTS = 24;
 
-    /** Short lists, long lists and closed forms in turn, the precision growing so that tables are made anew meanwhile. */
+    /**
+     * Short lists, long lists and closed forms in turn, the precision growing so that tables are made anew meanwhile.
+     */
     private static List<String> digits(int request, int base) {
         Chain chain = Chain.of(KernelLibrary.load(KERNELS.get(request % KERNELS.size())));
         int digits = base + 5 * request;

@@ -26,8 +26,8 @@ import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /**
- * Coefficients on the fixed-point route against three times the precision on the route of balls, long lists against three times
- * the precision on the same route: within the bounds, and the bounds not wasteful.
+ * Coefficients on the fixed-point route against three times the precision on the route of balls, long lists against
+ * three times the precision on the same route: within the bounds, and the bounds not wasteful.
  */
 class FixedCoefficientsTest {
     private static final double LN2 = Math.log(2);
@@ -127,7 +127,10 @@ class FixedCoefficientsTest {
         }
     }
 
-    /** The y_k left out, in units of 2^(-bits), and e^(l v): what each coefficient loses, exactly up to the rounding of doubles. */
+    /**
+     * The y_k left out, in units of 2^(-bits), and e^(l v): what each coefficient loses, exactly up to the rounding of
+     * doubles.
+     */
     private static double largestLoss(FixedExpansion series, int from, int count, double l, int bits) {
         double ratio = 0.5 / series.radius().toDouble();
         double weight = Math.log(0.5) + bits * LN2;
@@ -152,9 +155,9 @@ class FixedCoefficientsTest {
     }
 
     /**
-     * What the cut leaves out, from the coefficients themselves, and the bound it rests on. Cauchy's bound takes the largest value
-     * on the circle through the nearest pole, 2^10 on the far side, for coefficients that the small residue of that pole makes,
-     * 2^-8: no bound from that circle alone could be closer than 2^18.
+     * What the cut leaves out, from the coefficients themselves, and the bound it rests on. Cauchy's bound takes the
+     * largest value on the circle through the nearest pole, 2^10 on the far side, for coefficients that the small
+     * residue of that pole makes, 2^-8: no bound from that circle alone could be closer than 2^18.
      */
     @ParameterizedTest
     @CsvSource({"400, 1300, 1", "300, 500, 1", "300, 500, 3/2", "300, 500, 100", "400, 500, 10^12", "500, 300, 10^(-40)"})

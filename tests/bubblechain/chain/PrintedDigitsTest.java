@@ -19,8 +19,8 @@ import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /**
- * Every printed decimal of every kernel is read again and lies within half a unit of its last digit of a ball at three times
- * the precision, found on another route: short lists, long lists, closed forms, other couplings, residues.
+ * Every printed decimal of every kernel is read again and lies within half a unit of its last digit of a ball at three
+ * times the precision, found on another route: short lists, long lists, closed forms, other couplings, residues.
  */
 class PrintedDigitsTest {
     private static final double BITS_PER_DIGIT = Math.log(10) / Math.log(2);

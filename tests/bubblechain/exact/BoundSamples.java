@@ -7,9 +7,9 @@ import java.util.Collections;
 import java.util.List;
 
 /**
- * Balls compared with finer ones, at least three times as precise: the error is always within the bound, and the bound is not
- * wasteful, half of the bounds exceeding the error met by less than 2^20. Results that are right to the last bit of the finer ball
- * have no ratio and do not count.
+ * Balls compared with finer ones, at least three times as precise: the error is always within the bound, and the bound
+ * is not wasteful, half of the bounds exceeding the error met by less than 2^20. Results that are right to the last bit
+ * of the finer ball have no ratio and do not count.
  */
 public final class BoundSamples {
     public static final double LARGEST_MEDIAN = 20;
@@ -54,9 +54,6 @@ public final class BoundSamples {
     /** At least so many errors were met, and half of them are not far below their bounds. */
     public void assertNotWasteful(int atLeast, String what, Object... arguments) {
         assertThat(ratios).as(what, arguments).hasSizeGreaterThanOrEqualTo(atLeast);
-        if (Boolean.getBoolean("bubblechain.medians")) {
-            System.out.printf("MEDIAN %.1f of %d: %s%n", median(), count(), String.format(what, arguments));
-        }
         assertThat(median()).as(what, arguments).isLessThan(LARGEST_MEDIAN);
     }
 }

@@ -13,8 +13,9 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 
 /**
- * The radius of every operation and every function over balls: never below the error met at three times the precision, and the
- * median of radius/error below 2^20. Exact arguments show rounding and truncation, wide ones the bounds of the slopes.
+ * The radius of every operation and every function over balls: never below the error met at three times the precision,
+ * and the median of radius/error below 2^20. Exact arguments show rounding and truncation, wide ones the bounds of the
+ * slopes.
  */
 class ErrorBoundsTest {
     private static final int[] PRECISIONS = {40, 200};
@@ -120,7 +121,8 @@ class ErrorBoundsTest {
         for (int n = (int) named.lowest; n <= named.highest; n++) {
             for (int bits = 24; bits < 250; bits += named.highest > 1 ? 107 : 7) {
                 Ball x = Ball.of(n);
-                samples.add(named.function.apply(x, bits), named.function.apply(x, 3 * bits), "%s, %d, %d bits", named, n, bits);
+                Ball finer = named.function.apply(x, 3 * bits);
+                samples.add(named.function.apply(x, bits), finer, "%s, %d, %d bits", named, n, bits);
             }
         }
         samples.assertNotWasteful(20, "%s", named);

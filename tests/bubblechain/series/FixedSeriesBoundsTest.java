@@ -12,8 +12,8 @@ import java.util.List;
 import org.junit.jupiter.api.Test;
 
 /**
- * Every operation on sampled numbers, taken at three times the precision, stays within the bounds it gives; the bounds are
- * not wasteful either: half of them exceed the error met by less than 2^20.
+ * Every operation on sampled numbers, taken at three times the precision, stays within the bounds it gives; the bounds
+ * are not wasteful either: half of them exceed the error met by less than 2^20.
  */
 class FixedSeriesBoundsTest {
     private static final double LARGEST_MEDIAN = 20;
@@ -116,7 +116,9 @@ class FixedSeriesBoundsTest {
         assertNotWasteful(slack);
     }
 
-    /** Polynomials of both kinds, small integers and large ones; quotients with roots of size above 1/2 stay bounded. */
+    /**
+     * Polynomials of both kinds, small integers and large ones; quotients with roots of size above 1/2 stay bounded.
+     */
     private static List<Rational> polynomial(RandomDigits random, boolean small) {
         int degree = random.random().nextInt(5);
         List<Rational> coefficients = new ArrayList<>();
@@ -179,8 +181,10 @@ class FixedSeriesBoundsTest {
                 product = new SampledSeries(a.series(), product, a.scale()).times(linear);
                 quotient = new SampledSeries(a.series(), quotient, a.scale()).over(linear);
             }
-            SampledSeries.assertWithin(a.series().throughLinear(List.of(new LinearGroup(slopes, false))), product, a.scale(), slack);
-            SampledSeries.assertWithin(a.series().throughLinear(List.of(new LinearGroup(slopes, true))), quotient, a.scale(), slack);
+            FixedSeries above = a.series().throughLinear(List.of(new LinearGroup(slopes, false)));
+            SampledSeries.assertWithin(above, product, a.scale(), slack);
+            FixedSeries below = a.series().throughLinear(List.of(new LinearGroup(slopes, true)));
+            SampledSeries.assertWithin(below, quotient, a.scale(), slack);
         }
         assertNotWasteful(slack);
     }

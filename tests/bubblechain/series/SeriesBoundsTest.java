@@ -13,8 +13,8 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /**
- * Bounds that hold for an operation as a whole where those of its steps would be far larger: long quotients, linear factors above and
- * below that nearly cancel, exponentials of large slopes.
+ * Bounds that hold for an operation as a whole where those of its steps would be far larger: long quotients, linear
+ * factors above and below that nearly cancel, exponentials of large slopes.
  */
 class SeriesBoundsTest {
     private static final double UNIT_BITS = 20;
