@@ -80,13 +80,13 @@ class FixedCoefficientsTest {
     @MethodSource("library")
     void everyKernelIsWithinItsBoundsOnEitherRoute(String name) {
         Kernel kernel = KernelLibrary.load(name);
-        int orders = 45;
-        List<Ball> high = new BallCoefficients(900).coefficients(kernel, orders, Scales.NATURAL);
-        List<Ball> balls = new BallCoefficients(300).coefficients(kernel, orders, Scales.NATURAL);
+        int orders = 30;
+        List<Ball> high = new BallCoefficients(600).coefficients(kernel, orders, Scales.NATURAL);
+        List<Ball> balls = new BallCoefficients(200).coefficients(kernel, orders, Scales.NATURAL);
         compare(new BoundSamples(), name, balls, high).assertNotWasteful(orders - 3, "%s, balls", name);
         List<Ball> few = new BallCoefficients(150).coefficients(kernel, 20, Scales.NATURAL);
         compare(new BoundSamples(), name, few, high.subList(0, 20)).assertNotWasteful(17, "%s, few balls", name);
-        Optional<List<Ball>> fixed = new FixedCoefficients(300).coefficients(kernel, orders, Scales.NATURAL);
+        Optional<List<Ball>> fixed = new FixedCoefficients(200).coefficients(kernel, orders, Scales.NATURAL);
         if (fixed.isPresent()) {
             compare(new BoundSamples(), name, fixed.get(), high).assertNotWasteful(orders - 3, "%s, fixed point", name);
         }
@@ -108,7 +108,7 @@ class FixedCoefficientsTest {
     /** Long lists: the anomalous part computed in stages and cut off. */
     @ParameterizedTest
     @CsvSource({
-        "400, 1300, 1, 1", "330, 1210, 3/2, 1", "270, 600, 1, 100", "270, 600, 100, 1", "260, 500, 1/100, 1/100",
+        "400, 1300, 1, 1", "300, 900, 3/2, 1", "270, 600, 1, 100", "270, 600, 100, 1", "260, 500, 1/100, 1/100",
         "260, 500, 1, 1/1000000000", "330, 200, 1000000, 1"
     })
     void longListsWithACutAnomalousPartAreWithinTheirBounds(int loops, int bits, String mu, String operatorMu) {
