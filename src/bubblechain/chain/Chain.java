@@ -38,6 +38,8 @@ public final class Chain {
 
     private static final int SMALL_BITS = 320;
     private static final int LARGEST_GUARD_BITS = 2_048;
+    /** A combination whose nearest pole cancels loses log2(u_1/u_0) bits with every order. */
+    private static final int BITS_LOST_PER_ORDER = 4;
 
     private final Kernel kernel;
     private final Scales scales;
@@ -129,7 +131,7 @@ public final class Chain {
                 return numbers.stream().flatMap(Optional::stream).toList();
             }
             // what more bits do not settle is a zero or a tie, which exact arithmetic decides where it is affordable
-            if (2 * guard > LARGEST_GUARD_BITS || open <= LARGEST_SERIES_LOOPS && guard >= 2 * FIRST_GUARD_BITS) {
+            if (2 * guard > Math.max(LARGEST_GUARD_BITS, BITS_LOST_PER_ORDER * loops) || open <= LARGEST_SERIES_LOOPS && guard >= 2 * FIRST_GUARD_BITS) {
                 return settled(balls, numbers, rendering.applyToExact(affordable(open)), digits, bits);
             }
         }
