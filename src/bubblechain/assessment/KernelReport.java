@@ -38,11 +38,17 @@ public final class KernelReport {
                 .with("prefactor", "prefactor", Value.text(kernel.prefactor().words()))
                 .with("mass_dimension", "mass dimension", Value.exact(kernel.massDimension().toString()))
                 .with("form", "form", Value.text(kernel.form().text()));
+        if (kernel.origin().isPresent()) {
+            facts = facts.with("origin", "made from", Value.text(kernel.origin().get()));
+        }
         if (kernel.transform().isPresent()) {
             facts = facts.with("transform", "T(u)", formula(kernel.transform().get()));
         }
         if (kernel.anomalousDimension().isPresent()) {
             facts = facts.with("anomalous_dimension", "gamma(a)", formula(kernel.anomalousDimension().get()));
+        }
+        if (kernel.sudakov().isPresent()) {
+            facts = facts.with("cusp", "cusp part g(a)", formula(kernel.sudakov().get().cusp()));
         }
         if (kernel.definingEquation().isPresent()) {
             facts = facts.with("defining_equation", "defined by", Value.text(kernel.definingEquation().get()));

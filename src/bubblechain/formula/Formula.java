@@ -80,6 +80,11 @@ public sealed interface Formula {
         return Derivative.of(this, variable);
     }
 
+    /** The same function with the zeros and ones of a substitution taken out. */
+    default Formula simplified() {
+        return Simplification.of(this);
+    }
+
     /** The names that occur free, constants included, in alphabetical order. */
     default Set<String> names() {
         Set<String> found = new TreeSet<>();

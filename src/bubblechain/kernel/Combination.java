@@ -1,6 +1,7 @@
 package bubblechain.kernel;
 
 import bubblechain.analytic.AnalyticFunction;
+import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import bubblechain.formula.ConstantValue;
 import bubblechain.formula.Definitions;
@@ -15,6 +16,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeMap;
+import java.util.stream.Collectors;
 
 /**
  * A sum of other kernels, B(u) = sum weight x ratio^(2u) B_part(u), in units of the combination's own prefactor. The ratio
@@ -27,6 +29,7 @@ import java.util.TreeMap;
 final class Combination {
     private static final List<String> KEYS = List.of("kernel", "weight", "scale_ratio", "parameters");
     private static final int LARGEST = 32;
+    private static final int POSITIVE_BITS = 128;
     private static final Formula TWICE_U = Formula.parse("2*u");
 
     /** Finds the kernel of a part. */
@@ -34,7 +37,7 @@ final class Combination {
         Kernel load(String nameOrPath, Map<String, Rational> parameters);
     }
 
-    private record Part(Kernel kernel, Formula weight, Optional<Formula> ratio) {}
+    private record Part(String name, Kernel kernel, Formula weight, Optional<Formula> ratio) {}
 
     private final TomlSection top;
     private final Definitions definitions;
@@ -77,7 +80,19 @@ final class Combination {
             throw entry.error("scale_ratio", "the kernel " + kernel.name()
                     + " is renormalised; it can be combined at its own scale only, without scale_ratio");
         }
-        return new Part(kernel, constant(entry, "weight"), ratio);
+        return new Part(described(kernel, entry), kernel, constant(entry, "weight"), ratio);
+    }
+
+    private static String factor(String weight) {
+        return weight.equals("1") ? "" : weight.matches("[\\w.]+") ? weight + " " : "(" + weight + ") ";
+    }
+
+    private String described(Kernel kernel, TomlSection entry) {
+        return parameters(entry).entrySet().stream()
+                .map(e -> e.getKey() + " = " + e.getValue())
+                .reduce((left, right) -> left + ", " + right)
+                .map(values -> kernel.name() + " (" + values + ")")
+                .orElse(kernel.name());
     }
 
     private Kernel loaded(TomlSection entry, Parts loader) {
@@ -109,11 +124,12 @@ final class Combination {
             Formula resolved = definitions.resolve(formula).substitute(Map.of(
                     "CF", literal(theory.cf(), formula), "CA", literal(theory.ca(), formula),
                     "TF", literal(theory.tf(), formula)));
-            if (key.equals("scale_ratio") && !ConstantValue.of(resolved).toBall(128).isPositive()) {
+            ExactConstant value = ConstantValue.of(resolved);
+            if (key.equals("scale_ratio") && !value.toBall(POSITIVE_BITS).isPositive()) {
                 throw FormulaException.at(formula.span(), "a ratio of scales must be positive");
             }
-            ConstantValue.of(resolved);
-            return resolved;
+            // the value, not how it was written: 1/(1/2) is 2
+            return Formula.parse(value.toString());
         } catch (FormulaException e) {
             throw section.rethrown(key, e);
         }
@@ -172,11 +188,20 @@ final class Combination {
     private static Formula sum(List<Formula> formulas) {
         return formulas.stream()
                 .reduce((left, right) -> new Formula.Binary(Formula.Operator.ADD, left, right, left.span()))
-                .orElseThrow();
+                .orElseThrow()
+                .simplified();
     }
 
     private static Formula literal(Rational value, Formula place) {
         return new Formula.Literal(value, place.span());
+    }
+
+    /** The sum in words: weight, kernel with its parameters in the title, and the ratio of scales. */
+    String words() {
+        return parts.stream()
+                .map(p -> factor(p.weight().simplified().print()) + p.name()
+                        + p.ratio().map(r -> " at scale ratio " + r.print()).orElse(""))
+                .collect(Collectors.joining(" + "));
     }
 
     /** The sources of the file and of all parts. */

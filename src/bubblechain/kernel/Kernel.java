@@ -17,6 +17,7 @@ import java.util.Optional;
  * @param prefactor    f = prefactor x sum c_n a^(n+1)
  * @param massDimension dimension of the quantity in units of mass
  * @param form         how the file gives it
+ * @param origin       what T(u) and the subtraction are made from, in words: the diagram, or the parts of a combination
  * @param transform    T(u) at mu = scale, with every singularity of B(u); empty if the quantity is an anomalous
  *                     dimension, whose Borel transform is entire
  * @param anomalousDimension gamma(a) in d ln O/d ln mu = prefactor x a gamma(a); the quantity itself if there is no T(u)
@@ -39,6 +40,7 @@ public record Kernel(
         Prefactor prefactor,
         Rational massDimension,
         KernelForm form,
+        Optional<String> origin,
         Optional<AnalyticFunction> transform,
         Optional<AnalyticFunction> anomalousDimension,
         Optional<SudakovSubtraction> sudakov,
@@ -82,7 +84,7 @@ public record Kernel(
                 .map(equation -> equation.substring(0, equation.indexOf('=')).strip())
                 .orElse("d ln O/d ln mu (O: " + quantity + ")");
         return new Kernel(
-                name, "Anomalous dimension of: " + title, derivative, "mu", theory, prefactor, Rational.ZERO, form,
+                name, "Anomalous dimension of: " + title, derivative, "mu", theory, prefactor, Rational.ZERO, form, origin,
                 Optional.empty(), anomalousDimension, sudakov, definingEquation, false, Optional.empty(), List.of(), sources,
                 List.of(), List.of());
     }

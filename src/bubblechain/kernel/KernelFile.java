@@ -98,13 +98,20 @@ final class KernelFile {
                 .orElseGet(() -> form == KernelForm.BOREL ? borel() : dDimensional());
         Kernel kernel = new Kernel(
                 name(), parameters.titled(top.text("title")), parameters.titled(top.text("quantity")),
-                top.text("scale"), theory, prefactor(), top.rational("mass_dimension"), form, functions.transform(),
+                top.text("scale"), theory, prefactor(), top.rational("mass_dimension"), form, origin(form, combination), functions.transform(),
                 functions.anomalousDimension(), functions.sudakov(), definingEquation(), flag("heavy_quark"), series(), singularities(),
                 combination.map(Combination::sources).orElseGet(() -> top.texts("sources")),
                 combination.map(Combination::cautions).orElseGet(() -> top.texts("cautions")),
                 new CheckEntries(top).read());
         requireFinite(kernel, form == KernelForm.BOREL ? "T" : form == KernelForm.COMBINATION ? "form" : "G");
         return kernel;
+    }
+
+    private Optional<String> origin(KernelForm form, Optional<Combination> combination) {
+        return form == KernelForm.D_DIMENSIONAL
+                ? Optional.of("G(eps,u) = " + resolved("G").print() + ", " + top.optionalText("subtraction").orElse("single")
+                        + " subtraction")
+                : combination.map(Combination::words);
     }
 
     private Optional<String> definingEquation() {

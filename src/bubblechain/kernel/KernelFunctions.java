@@ -59,14 +59,14 @@ record KernelFunctions(
 
     /** G(0, u). */
     private static Formula atZero(Formula diagram) {
-        return diagram.substitute(Map.of("eps", zero(diagram.span())));
+        return diagram.substitute(Map.of("eps", zero(diagram.span()))).simplified();
     }
 
     /** G(-a, 0). */
     private static Formula onAxis(Formula diagram) {
         Span span = diagram.span();
         Formula minusA = new Formula.Negation(new Formula.Name("a", span), span);
-        return diagram.substitute(Map.of("eps", minusA, "u", zero(span)));
+        return diagram.substitute(Map.of("eps", minusA, "u", zero(span))).simplified();
     }
 
     private static Formula zero(Span span) {
