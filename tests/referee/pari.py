@@ -53,4 +53,21 @@ sinpi(c) = {
 sp(c, b) = sinpi(c)*cos(Pi*b*x + O(x^ORDER)) + sinpi(c + 1/2)*sin(Pi*b*x + O(x^ORDER));
 cp(c, b) = sp(c + 1/2, b);
 ex(s) = exp(s + O(x^ORDER));
+/* W(c + x) of unit_hypergeometric.py by (3/4) sum 4^-n (z)_n/[(z+n) (z-1/2)_(n+1)]; memorised */
+UNIT_TERMS = 420;
+unitmap = Map();
+unit(c) = {
+  my(z = c + x, t, s = 0., v);
+  if(mapisdefined(unitmap, c, &v), return(v));
+  t = (3/4. + O(x^ORDER))/(z - 1/2);
+  for(n = 0, UNIT_TERMS, s += t/(z + n); t = t*(z + n)/(4*(z + n + 1/2)));
+  mapput(unitmap, c, s);
+  s;
+}
+/* unit_3f2(k, c + b x): k-th derivative of W(c + y), then y = b x */
+un(k, c, b) = {
+  my(s = unit(c));
+  for(i = 1, k, s = deriv(s, x));
+  subst(s, x, b*x);
+}
 """

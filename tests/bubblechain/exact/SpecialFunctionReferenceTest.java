@@ -46,11 +46,18 @@ class SpecialFunctionReferenceTest {
             Map.entry("digamma", (a, bits) -> BallFunctions.digamma(ball(a.get(0), bits), bits)),
             Map.entry("polygamma", (a, bits) ->
                     BallFunctions.polygamma(a.get(0).intValueExact(), ball(a.get(1), bits), bits)),
-            Map.entry("polylog", (a, bits) -> BallFunctions.polylog(a.get(0).intValueExact(), a.get(1), bits)));
+            Map.entry("polylog", (a, bits) -> BallFunctions.polylog(a.get(0).intValueExact(), a.get(1), bits)),
+            Map.entry("unit_3f2", SpecialFunctionReferenceTest::unitHypergeometric));
 
     private static Ball logarithm(List<Rational> arguments, int bits) {
         Rational x = arguments.get(0);
         return x.isInteger() ? BallFunctions.lnOf(x.numerator(), bits) : BallFunctions.ln(ball(x, bits), bits);
+    }
+
+    private static Ball unitHypergeometric(List<Rational> arguments, int bits) {
+        int n = arguments.get(0).intValueExact();
+        return UnitHypergeometric.taylor(ball(arguments.get(1), bits), n + 1, bits)[n].multiply(
+                Rational.of(ExactFunctions.factorial(n)), bits);
     }
 
     /** The argument with bits to spare, so that what is seen is the loss in the function. */
