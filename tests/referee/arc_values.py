@@ -8,6 +8,7 @@ import random
 import sys
 import mpmath
 from mpmath import mp, mpf, mpc
+import unit_hypergeometric
 
 mp.dps = 50
 SEED = 20240612
@@ -25,15 +26,23 @@ CIRCLES = [
 ]
 # Right half plane near the origin, where an asymptotic series with few terms is visibly off.
 PLAIN = ["gamma(u)", "digamma(u)", "polygamma(1,u)", "polygamma(3,u)"]
+# with the function of the inclusive widths; their random points have a source of their own
+UNIT_CIRCLES = [
+    ("unit_3f2(0,1-u)", ["0.25", "0.75", "1.25", "4.75", "20.25"]),
+    ("unit_3f2(1,1-u)*exp(5*u/3)", ["0.25", "1.25", "3.75"]),
+    ("unit_3f2(2,1/3+u/2)", ["0.2", "1.2", "2.15", "9.1"]),
+    ("exp(5*u/3)*sin(pi*u)/pi*(unit_3f2(0,1-u)/u+(1-2*u)*unit_3f2(1,1-u))/gamma(3-u)", ["0.25", "1.75", "6.25"]),
+]
 POINTS_ON, POINTS_OFF = 24, 12
 NAMES = {"exp": mpmath.exp, "gamma": mpmath.gamma, "polygamma": mpmath.polygamma, "sin": mpmath.sin, "cos": mpmath.cos,
-         "digamma": mpmath.digamma, "sqrt": mpmath.sqrt, "ln": mpmath.ln, "pi": mp.pi, "euler_gamma": mp.euler, "mpf": mpf}
+         "digamma": mpmath.digamma, "sqrt": mpmath.sqrt, "ln": mpmath.ln, "pi": mp.pi, "euler_gamma": mp.euler, "mpf": mpf,
+         "unit": unit_hypergeometric.derivative}
 
 
 def function(text):
     """Integers become mpf, so that 1/2 is a half in full precision."""
     tokens, number = [], ""
-    for c in text + " ":
+    for c in text.replace("unit_3f2", "unit") + " ":
         if c.isdigit():
             number += c
             continue
@@ -70,9 +79,8 @@ def row(text, h, kind, radius, u):
             "mpmath " + mpmath.__version__]
 
 
-def rows():
-    source = random.Random(SEED)
-    for text, radii in CIRCLES:
+def on_circles(circles, source):
+    for text, radii in circles:
         h = function(text)
         for radius in radii:
             r = mpf(radius)
@@ -85,16 +93,22 @@ def rows():
         for k in range(POINTS_OFF):
             reach = 3 if k % 2 == 0 else 60
             yield row(text, h, "plane", "", mpc(source.uniform(-reach, reach), source.uniform(-reach, reach)))
+
+
+def rows():
+    source = random.Random(SEED)
+    yield from on_circles(CIRCLES, source)
     for text in PLAIN:
         h = function(text)
         for k in range(POINTS_OFF):
             yield row(text, h, "plane", "", mpc(source.uniform(0.5, 5), source.uniform(-4, 4)))
+    yield from on_circles(UNIT_CIRCLES, random.Random(SEED + 1))
 
 
 HEADER = f"""# Values of functions of u at complex points, {PRINTED} significant digits; referee for bounds on arcs and complex evaluation.
 # kind: maximum = where |h| is largest on the circle |u| = radius (to the accuracy of a double), circle = random point of
 # the upper half of that circle, plane = random point. re, im: the point, decimal text of doubles; value_re, value_im: h there.
-# Made by tests/referee/arc_values.py with seed {SEED}, computed with 50 digits."""
+# Made by tests/referee/arc_values.py with seed {SEED} (rows of unit_3f2: {SEED + 1}), computed with 50 digits."""
 
 if __name__ == "__main__":
     with open(sys.argv[1], "w", newline="") as out:

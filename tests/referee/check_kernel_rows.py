@@ -42,10 +42,10 @@ def dimension(function, radius=mpf(3) / 4):
     return Quantity(coefficients, None)
 
 
-def double_subtracted(name, at_four=None):
-    """B = [Fh(0,u) - Fh_00 - Fh_01 u]/u^2 + sum_k (-1)^(k-1) [Fh_k1 + H_k Fh_(k+1)0] u^(k-1)/k!; see hard_gamma."""
-    four = at_four or more.FOUR_DIMENSIONS[name]
-    first, second = sudakov_columns(name)
+def double_subtracted(name):
+    """B = [Fh(0,u) - Fh_00 - Fh_01 u]/u^2 + sum_k (-1)^(k-1) [Fh_k1 + H_k Fh_(k+1)0] u^(k-1)/k!; see single_logarithm."""
+    four = more.FOUR_DIMENSIONS[name]
+    first, second = more.columns(more.SUDAKOV[name], COUNT + 2)
     head = kernels.taylor(four, mpf(1) / 4, 256, COUNT + 3)
     out = []
     for n in range(COUNT):
@@ -56,17 +56,9 @@ def double_subtracted(name, at_four=None):
     return Quantity(out, transform)
 
 
-def sudakov_columns(name):
-    """Fh_k0 and Fh_k1, k = 0 .. COUNT+1."""
-    function = more.SUDAKOV[name]
-    h = mpf(10) ** -25
-    slope = lambda e: (8 * (function(e, h) - function(e, -h)) - (function(e, 2 * h) - function(e, -2 * h))) / (12 * h)
-    first = kernels.taylor(lambda e: function(e, mpf(0)), mpf(1) / 2, 320, COUNT + 2)
-    return first, kernels.taylor(slope, mpf(1) / 2, 320, COUNT + 2)
-
-
-def hard_gamma():
-    first, second = sudakov_columns("hard-massless")
+def single_logarithm(name):
+    """gamma_k = 2 (-1)^(k-1) [Fh_(k-1)1 + H_k Fh_k0], k = n + 1."""
+    first, second = more.columns(more.SUDAKOV[name], COUNT + 2)
     return Quantity([2 * mpf(-1) ** (k - 1) * (second[k - 1] + mp.harmonic(k) * first[k]) for k in range(1, COUNT + 1)],
                     None)
 
@@ -131,7 +123,21 @@ MAKERS = {
     "jet-quark": lambda m: double_subtracted("jet-quark"),
     "soft-dy": lambda m: double_subtracted("soft-dy"),
     "soft-thrust": lambda m: double_subtracted("soft-thrust"),
-    "hard-gamma": lambda m: hard_gamma(),
+    "hard-massless-timelike": lambda m: double_subtracted("hard-massless-timelike"),
+    "jet-quark-delta": lambda m: double_subtracted("jet-quark-delta"),
+    "dis-threshold": lambda m: combined((2, quantity("hard-massless")), (1, quantity("jet-quark-delta"))),
+    "hard-gamma": lambda m: single_logarithm("hard-massless"),
+    "jet-gamma": lambda m: single_logarithm("jet-quark"),
+    "soft-dy-gamma": lambda m: single_logarithm("soft-dy"),
+    "hqet-self-energy": lambda m: subtracted(more.self_energy_four, more.self_energy_dimension),
+    "chromomag": lambda m: combined((mpf(4) / 3, quantity("chromomag-cf")), (3, quantity("chromomag-ca"))),
+    "scalar-over-gamma0": lambda m: combined((1, quantity("hl-current-scalar")), (-1, quantity("hl-current-gamma0"))),
+    "ps-mass-msbar": lambda r: combined((1, quantity("pole-mass")), (-4 * r, with_scale(quantity("ps-mass"), 1 / r))),
+    "kinetic-mass-msbar": lambda r: combined(
+        (1, quantity("pole-mass")), (-16 * mpf(r) / 3, with_scale(quantity("kin-lambdabar"), 1 / r)),
+        (-2 * r ** 2, with_scale(quantity("kin-mupi2"), 1 / r))),
+    "static-energy": lambda mr: combined((2, quantity("pole-mass")),
+                                         (-4 * mp.pi / mr, with_scale(quantity("static-potential-r"), mr))),
 }
 for current, (above, below) in more.CURRENTS.items():
     MAKERS[current] = lambda m, a=above, b=below: subtracted(
@@ -139,10 +145,18 @@ for current, (above, below) in more.CURRENTS.items():
 CACHE = {}
 
 
-def quantity(name, moment=None):
-    if (name, moment) not in CACHE:
-        CACHE[name, moment] = MAKERS[name](moment)
-    return CACHE[name, moment]
+def quantity(name, parameter=None):
+    if (name, parameter) not in CACHE:
+        CACHE[name, parameter] = MAKERS[name](parameter)
+    return CACHE[name, parameter]
+
+
+def parameter(text):
+    """The value in name=value: an integer (a moment) or a ratio; None if there is none."""
+    if not text:
+        return None
+    value = F(text.split("=")[1])
+    return int(value) if value.denominator == 1 else mpf(value.numerator) / value.denominator
 
 
 def massive_gluon(x):
@@ -165,8 +179,7 @@ def special(row):
     if row["u0"]:
         u = mpf(F(row["u0"]).numerator) / F(row["u0"]).denominator
         return kernels.laurent(more.b_to_u_width, u, mpf(1) / 16, 64, 0, 0)[0]
-    delta = double_subtracted("jet-quark", lambda u: kernels.scheme(u) * (8 - 6 * u) / (
-        (1 - u) * (2 - u)) * kernels.gammas([], [1 + u, 1 - u]))
+    delta = quantity("jet-quark-delta")
     if row["arguments"].startswith("delta(p^2)"):
         return -mpf(4) / 3 * delta.coefficients[1]
     return -mpf(2) / 3 * (2 * quantity("hard-massless").coefficients[1] + delta.coefficients[1])
@@ -175,8 +188,7 @@ def special(row):
 def program_number(row):
     if row["kind"] == "other":
         return special(row)
-    moment = int(row["parameters"].split("=")[1]) if row["parameters"] else None
-    q = quantity(row["kernel"], moment)
+    q = quantity(row["kernel"], parameter(row["parameters"]))
     if row["mu_over_scale"] != "1":
         q = with_scale(q, number(row["mu_over_scale"]))
     if row["kind"] == "laurent":

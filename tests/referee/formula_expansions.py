@@ -9,6 +9,7 @@ from fractions import Fraction as F
 import mpmath
 from mpmath import mp, mpf
 import pari
+import unit_formulas
 from cancelling_formulas import Cancellations
 from formulas import function_of_u, laurent
 from pieces import Lin, gamma, linear, number, plus, power, quadratic, times, over, base_power, exponential, polygamma
@@ -60,7 +61,7 @@ def candidates():
             piece, u0 = candidate(family, source, cancellations, i)
             if len(piece.text) <= 300:
                 out.append((family, piece, u0))
-    return [("syntax", p, c) for p, c in syntax_formulas()] + out
+    return [("syntax", p, c) for p, c in syntax_formulas()] + out + unit_formulas.candidates()
 
 
 def expansions_by_pari(rows):
@@ -110,13 +111,13 @@ def decimal(c):
     return "0" if c == 0 else mp.nstr(c, PRINTED, strip_zeros=False, min_fixed=-3, max_fixed=20)
 
 
-HEADER = """# Laurent expansions of %d random formulas of the kernel language about rational points: referee for interval arithmetic.
+HEADER = """# Laurent expansions of %d formulas of the kernel language, most of them random, about rational points: referee for interval arithmetic.
 # coefficients: those of (u-u0)^k for k = lowest .. lowest+7, separated by ;, rounded to 90 significant digits; "0" = zero.
 # valuation: lowest power with a non-zero coefficient (negative: pole order). lowest: power of the first coefficient listed,
 # always equal to valuation. The number after the family name in id is a running number; seed %d.
 # Families: product, two-terms, three-terms (kernels, polygammas), fractional-arguments (gamma at quarters and thirds),
 # circular, finite-sum, power, removable-factor (0/0 factors), cancelling-poles (single terms have poles, the sum has none),
-# syntax. Made by tests/referee/formula_expansions.py.
+# syntax, unit-3f2 (the function of the inclusive widths; chosen by hand). Made by tests/referee/formula_expansions.py.
 # Two computations agree to 10^-125 of the largest term on a circle of radius 1/8 of the distance to the nearest other
 # possible singular point: PARI/GP series arithmetic on the formula tree (230 digits) and a contour integral with mpmath on
 # the text (180 digits, 192 points). A zero means: below 10^-120 of that largest term in both, where no non-zero coefficient
@@ -129,7 +130,7 @@ def main(path):
     source = "PARI/GP %s series and mpmath %s contour integral agree; tests/referee/formula_expansions.py" % (
         pari.version(), mpmath.__version__)
     rows = candidates()
-    wanted = dict(FAMILIES, syntax=100)
+    wanted = dict(FAMILIES, syntax=100, **{"unit-3f2": 100})
     lines, seen, dropped = [], set(), 0
     for (family, piece, u0), by_pari in zip(rows, expansions_by_pari(rows)):
         if wanted[family] == 0 or (piece.text, u0) in seen:

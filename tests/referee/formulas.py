@@ -2,9 +2,10 @@
 
 Grammar: sums and differences of products and quotients; ^ binds tighter than a leading minus and is right-associative;
 no implicit multiplication; names pi, euler_gamma, u and the index of a sum; functions zeta, ln, sqrt, exp, sin, cos,
-gamma, digamma, polygamma(k, z), sum(index, first, last, term)."""
+gamma, digamma, polygamma(k, z), unit_3f2(k, z), sum(index, first, last, term)."""
 import re
 from mpmath import mp, mpf
+import unit_hypergeometric
 
 TOKEN = re.compile(r"\s*(?:(\d+\.\d+|\d+)|([A-Za-z_][A-Za-z_0-9]*)|(.))")
 
@@ -122,6 +123,7 @@ def raised(base, exponent):
 FUNCTIONS = {
     "zeta": mp.zeta, "ln": mp.log, "sqrt": mp.sqrt, "exp": mp.exp, "sin": mp.sin, "cos": mp.cos,
     "gamma": mp.gamma, "digamma": mp.digamma, "polygamma": lambda k, z: mp.psi(int(k), z),
+    "unit_3f2": unit_hypergeometric.derivative,
 }
 
 

@@ -1,4 +1,4 @@
-"""Makes reference-values/generated/kernel-coefficients.csv: c_n of seven kernels at several scales, 100 digits.
+"""Makes reference-values/generated/kernel-coefficients.csv: c_n of the kernels at several scales, 100 digits.
 
 Usage: python3 kernel_coefficients.py OUTPUT.csv
 Two computations: PARI/GP power series about u = 0, and mpmath from values on a circle. Only numbers on which both agree to
@@ -6,13 +6,28 @@ the digits printed are written; a disagreement stops the program."""
 import sys
 from mpmath import mp, mpf
 import agreement
+import composed_kernels
 import kernels
+import pari
 
 DIGITS = 100
 ORDERS = list(range(31)) + [40, 60]
 TERMS = 63
 SCALES = [("1", "1"), ("2", "2"), ("1/2", "1/2"), ("3/2", "3/2")]
 POTENTIAL_SCALES = SCALES + [("exp(-euler_gamma)", "exp(-Euler)")]
+# operator scale apart from the coupling's
+BOTH = [("1", "1"), ("2", "3/2")]
+COMPOSED_SCALES = {
+    "top-width-mw0-pole": SCALES[::3], "top-width-mw0-msbar": BOTH, "b-to-u-width-pole": SCALES[::3],
+    "b-to-u-width-msbar": BOTH + [("3/2", "1")],
+    "hard-massless": BOTH + [("3/2", "1"), ("1", "2")], "hard-massless-timelike": BOTH,
+    "jet-quark": BOTH + [("3/2", "1"), ("1", "2")], "jet-quark-delta": BOTH,
+    "soft-dy": BOTH + [("3/2", "1"), ("1", "2")], "soft-thrust": BOTH, "dis-threshold": BOTH,
+    "hard-gamma": SCALES[::3], "jet-gamma": SCALES[::3], "soft-dy-gamma": SCALES[::3],
+    "hqet-self-energy": BOTH + [("3/2", "1")], "chromomag": BOTH + [("3/2", "1")],
+    "scalar-over-gamma0": BOTH, "ps-mass-msbar": BOTH, "kinetic-mass-msbar": BOTH, "static-energy": BOTH,
+}
+NO_OPERATOR = ["top-width-mw0-pole", "b-to-u-width-pole", "hard-gamma", "jet-gamma", "soft-dy-gamma"]
 MASS_SCALES = [("2", "1"), ("2", "2"), ("1/2", "1"), ("1", "2")]
 
 SCRIPT = r"""
@@ -58,6 +73,24 @@ def jobs():
                                       "lepton-g2"].index(j[0]))
 
 
+COMPOSED_SCRIPT = pari.PRELUDE + composed_kernels.GP + r"""
+default(realprecision, 220);
+ORDER = 75;
+show(f) = print(vector(61, i, (i-1)!*polcoef(f, i-1)*1.));
+"""
+
+
+def composed_jobs():
+    """(kernel, mu/scale, operator mu/scale, PARI/GP text)"""
+    pairs = [(name, x, "1" if name in NO_OPERATOR else y) for name, scales in COMPOSED_SCALES.items() for x, y in scales]
+    return [(name, x, y, "%s(0,%s,%s)" % (composed_kernels.KERNELS[name][0], x, y)) for name, x, y in pairs]
+
+
+def composed_by_circle(job, cache):
+    weights = composed_kernels.weights(job[0], value(job[1]), value(job[2]), 61)
+    return [mp.factorial(n) * w for n, w in enumerate(weights)]
+
+
 def value(text):
     return mp.exp(-mp.euler) if "euler" in text else mpf(int(text.split("/")[0])) / int((text + "/1").split("/")[1])
 
@@ -83,7 +116,7 @@ def by_circle(job, cache):
     return [mp.factorial(n) * borel[n] for n in range(61)]
 
 
-HEADER = """# Bubble-chain coefficients c_n of seven kernels, 100 significant digits, in the program's normalisation:
+HEADER = """# Bubble-chain coefficients c_n, 100 significant digits, in the program's normalisation:
 # f = prefactor * sum_n c_n a^(n+1), a = beta0 alpha_s(mu)/(4 pi) in MS-bar, B(u) = sum_n c_n u^n/n!. Prefactor CF/beta0, except
 # static-potential-r: -4 pi CF/(beta0 r) and lepton-g2: CF -> 1 and a factor 2 (a_l = (2/beta0) sum c_n a^(n+1)).
 # cusp (c_0 = 4) and gamma-m (c_0 = 6) are anomalous dimensions: their c_n are the coefficients in a themselves.
@@ -91,13 +124,20 @@ HEADER = """# Bubble-chain coefficients c_n of seven kernels, 100 significant di
 # the scale Q as a series in a(X Q)). Scale: m (pole-mass, lepton-g2), 1/r, Q, and the quantity's own mu for cusp and gamma-m.
 # operator_mu_over_scale Y (pole-mass): the MS-bar mass is taken at Y m,
 # B = [ (X^2)^u F(0,u) - ((X/Y)^2)^u Ftilde(u) ]/u, Ftilde(u) = sum_n g_n u^n/n!, sum_n g_n x^n = F(-x,0); Y = 1 elsewhere.
+# Kernels with double logarithms: Y moves the diagram, u F(eps,u) -> Y^(2u) u F(eps,u), then all of B is multiplied by (X/Y)^(2u).
+# Kernels of several parts: every MS-bar quantity among them at Y times the scale of the whole; SU(3); parameters at their
+# defaults, mu_f = m/2, mu_k = m/2, m r = 3. chromomag: prefactor 1/beta0. hard-gamma, jet-gamma, soft-dy-gamma are anomalous
+# dimensions.
 # A rational number is rounded to 100 digits like the others. Made by tests/referee/kernel_coefficients.py.
 """
 
 
 def main(path):
     mp.dps = 220
-    agreement.write(path, HEADER, "kernel_coefficients.py", SCRIPT, jobs(), by_circle, ORDERS, DIGITS)
+    name = "kernel_coefficients.py"
+    rows = agreement.rows(name, SCRIPT, jobs(), by_circle, ORDERS, DIGITS)
+    rows += agreement.rows(name, COMPOSED_SCRIPT, composed_jobs(), composed_by_circle, ORDERS, DIGITS)
+    agreement.write(path, HEADER, rows)
 
 
 if __name__ == "__main__":

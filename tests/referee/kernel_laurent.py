@@ -1,4 +1,4 @@
-"""Makes reference-values/generated/kernel-laurent.csv: poles of seven Borel transforms between u = -6 and 6, 60 digits.
+"""Makes reference-values/generated/kernel-laurent.csv: poles of Borel transforms between u = -6 and 6, 60 digits.
 
 Usage: python3 kernel_laurent.py OUTPUT.csv
 Two computations at every multiple of 1/2: PARI/GP series with exact expansion points, and mpmath values on a circle."""
@@ -6,6 +6,7 @@ import sys
 from fractions import Fraction as F
 import mpmath
 from mpmath import mp, mpf
+import composed_kernels
 import kernels
 import pari
 
@@ -35,6 +36,10 @@ gammam(c) = entire(gammama, c);
 show(f) = { f = f + O(x^6); print(vector(9, i, polcoef(f, i-6)*1.)) };
 """
 
+COMPOSED_SCRIPT = pari.PRELUDE + composed_kernels.GP + r"""
+show(f) = { f = f + O(x^6); print(vector(9, i, polcoef(f, i-6)*1.)) };
+"""
+
 
 def entire(coefficients):
     weights = kernels.borel_weights(coefficients)
@@ -50,6 +55,12 @@ def transforms():
             ("adler", "adler", kernels.adler), ("bjorken-gls", "bjorken", kernels.bjorken_gls),
             ("cusp", "cusp", flat(kernels.cusp)), ("gamma-m", "gammam", flat(kernels.gamma_m)),
             ("lepton-g2", "g2", kernels.lepton_g2)]
+
+
+def composed_transforms():
+    """The same of the kernels made of parts; gp functions of the point and both scales."""
+    return [(name, gp, lambda u, n=name: composed_kernels.transform(n, u))
+            for name, (gp, _) in composed_kernels.KERNELS.items()]
 
 
 def agreed(series, circle):
@@ -78,27 +89,33 @@ def decimal(c):
     return "0" if c == 0 else mp.nstr(c, DIGITS, strip_zeros=False, min_fixed=-4, max_fixed=59)
 
 
-HEADER = """# Laurent coefficients of seven Borel transforms B(u) (normalisation of kernel-coefficients.csv, mu = scale, prefactor left
+HEADER = """# Laurent coefficients of Borel transforms B(u) (normalisation of kernel-coefficients.csv, mu = scale, prefactor left
 # out) at every multiple of 1/2 from -6 to 6: value multiplies (u-u0)^power, 60 significant digits.
 # order: pole order, with one row per power -order .. -1 (a zero among them is a coefficient that vanishes). order 0: no pole
 # at this point; then power = 0 and value = B(u0) (0 = exact zero by the same rule), the limit where the formula is 0/0.
-# Elsewhere in -6 <= u <= 6 the seven transforms are regular. cusp and gamma-m are entire (anomalous dimensions).
+# Elsewhere in -6 <= u <= 6 the transforms are regular. Anomalous dimensions are entire. Parameters at their defaults.
 # No pole means: coefficients below 10^-90 of the largest term on a circle of radius 1/8 in both computations. Made by tests/referee/kernel_laurent.py.
 """
 
 
-def main(path):
-    mp.dps = 170
-    source = "PARI/GP %s power series and mpmath %s circle agree; tests/referee/kernel_laurent.py" % (
-        pari.version(), mpmath.__version__)
-    work = [(kernel, gp, function, u0) for kernel, gp, function in transforms() for u0 in POINTS]
-    lines = pari.run(SCRIPT + "\n".join("show(%s(%s));" % (gp, u0) for _, gp, _, u0 in work) + "\n").strip().split("\n")
+def laurent_rows(functions, script, call, source):
+    work = [(kernel, gp, function, u0) for kernel, gp, function in functions for u0 in POINTS]
+    lines = pari.run(script + "\n".join("show(%s);" % (call % (gp, u0)) for _, gp, _, u0 in work) + "\n").strip().split("\n")
     rows = []
     for (kernel, _, function, u0), line in zip(work, lines):
         series = [mpf(s.replace(" E", "e")) for s in line.strip("[]").split(", ")]
         centre = mpf(u0.numerator) / u0.denominator
         circle = kernels.laurent(function, centre, RADIUS, 192, LOWEST, HIGHEST)
         rows += rows_at(kernel, u0, agreed(series, circle), source)
+    return rows
+
+
+def main(path):
+    mp.dps = 170
+    source = "PARI/GP %s power series and mpmath %s circle agree; tests/referee/kernel_laurent.py" % (
+        pari.version(), mpmath.__version__)
+    rows = laurent_rows(transforms(), SCRIPT, "%s(%s)", source)
+    rows += laurent_rows(composed_transforms(), COMPOSED_SCRIPT, "%s(%s,1,1)", source)
     with open(path, "w") as out:
         out.write(HEADER + "kernel,u0,order,power,value,source\n" + "\n".join(rows) + "\n")
     print(len(rows), "rows")

@@ -77,7 +77,7 @@ HEADER = """# Bubble-chain coefficients c_n of six kernels at high orders, 211 s
 
 def main(path):
     mp.dps = 500
-    agreement.write(path, HEADER, "large_orders.py", SCRIPT, JOBS, by_circle, ORDERS, DIGITS)
+    agreement.write(path, HEADER, agreement.rows("large_orders.py", SCRIPT, JOBS, by_circle, ORDERS, DIGITS))
 
 
 if __name__ == "__main__":

@@ -1,8 +1,9 @@
 """Borel transforms and anomalous dimensions of the further kernels, for the check of reference-values/kernel-checks.csv.
 Conventions of kernels.py. Every function is real on the real axis."""
 from mpmath import mp, mpf
+import unit_hypergeometric
 from kernels import (adler, alternating_squares, chain_factor, gamma_m_half, gammas, pole_mass_on_shell, scheme,
-                     static_potential_r)
+                     static_potential_r, taylor)
 
 
 # heavy quarks ---------------------------------------------------------------------------------------------------------
@@ -55,6 +56,16 @@ def gamma_chromomagnetic(a):
     return (1 + 2 * a) * gammas([5 + 2 * a], [2 + a, 2 + a, 2 + a, 1 - a]) / (24 * (1 + a))
 
 
+def self_energy_four(u):
+    """F(0,u) of Sigma(w)/(-2w): u times the diagram (3-2 eps) Gamma(-1+2u) Gamma(1-u)/Gamma(2+u-eps)."""
+    return scheme(u) * 3 * u * gammas([2 * u - 1, 1 - u], [2 + u])
+
+
+def self_energy_dimension(x):
+    """F(-x,0), where u Gamma(-1+2u) -> -1/2."""
+    return -(3 + 2 * x) / 2 * gammas([4 + 2 * x], [1 - x, 2 + x, 2 + x, 2 + x]) / 6
+
+
 def static_force(u):
     return (1 - 2 * u) * static_potential_r(u)
 
@@ -71,21 +82,9 @@ def kinetic_energy(u):
     return scheme(u) * 3 * mp.sqrt(mp.pi) / 4 * gammas([], [1 + u, mpf(5) / 2 - u])
 
 
-def real_emission_sum(u):
-    """S(u) = Gamma(1-u)^2 sum_k [k!/Gamma(k+2-u)]^2 = (3/4) sum_n 4^-n (c)_n/[(c+n)(c-1/2)_(n+1)], c = 1-u."""
-    c = 1 - u
-    total, n, rising, below = mpf(0), 0, mp.mpc(1), c - mpf(1) / 2
-    while n < mp.prec / 2 + 20:
-        total += rising / ((c + n) * below) / mpf(4) ** n
-        rising *= c + n
-        n += 1
-        below *= c - mpf(1) / 2 + n
-    return 3 * total / 4
-
-
-def real_emission_slope(u):
-    h = mpf(10) ** (-mp.dps // 3)
-    return (real_emission_sum(u + h) - real_emission_sum(u - h)) / (2 * h)
+def real_emission(u, count=1):
+    """S(u) = Gamma(1-u)^2 sum_k [k!/Gamma(k+2-u)]^2 and, for count 2, its slope."""
+    return [(-1) ** k * w for k, w in enumerate(unit_hypergeometric.taylor(1 - u, count))]
 
 
 def top_width(u):
@@ -93,7 +92,7 @@ def top_width(u):
     a = -2 * (3 * u ** 6 - 23 * u ** 5 + 55 * u ** 4 - 47 * u ** 3 + 10 * u ** 2 - 6 * u + 4) / (
         u ** 3 * (u - 2) ** 2 * (u - 1) ** 3)
     w = 2 * (3 * u ** 4 - 20 * u ** 3 + 35 * u ** 2 - 18 * u + 2) / (u * (u - 2) * (u - 1) ** 2)
-    return scheme(u) * (virtual + mp.sinpi(u) / mp.pi * (a + w * real_emission_sum(u)))
+    return scheme(u) * (virtual + mp.sinpi(u) / mp.pi * (a + w * real_emission(u)[0]))
 
 
 def b_to_u_virtual(u):
@@ -108,8 +107,8 @@ def b_to_u_width(u):
               - 760 * u ** 2 + 504 * u - 288) / (3 * u ** 3 * (u - 1) ** 3 * (u - 2) ** 3 * (u - 3) * (u - 4))
     w = 2 * (9 * u ** 4 - 175 * u ** 3 + 298 * u ** 2 - 250 * u + 24) / (3 * u * (u - 1) * (u - 2) * (u - 4))
     slope = 16 * (1 - 2 * u) * (1 + u) / ((u - 1) * (u - 2) * (u - 4))
-    return scheme(u) * (b_to_u_virtual(u) + mp.sinpi(u) / mp.pi * (a + w * real_emission_sum(u)
-                                                         + slope * real_emission_slope(u)))
+    total, derivative = real_emission(u, 2)
+    return scheme(u) * (b_to_u_virtual(u) + mp.sinpi(u) / mp.pi * (a + w * total + slope * derivative))
 
 
 def qed_integrand(x):
@@ -202,11 +201,30 @@ def soft_thrust(eps, u):
     return (-4 * gammas([1 - 2 * u], [1 - u, 1 + u - eps]) * mp.exp(mp.euler * (eps - 2 * u)) * chain_power(eps, u))
 
 
+def hard_time_like(eps, u):
+    """The squared modulus: both amplitudes, and the phase of (-s)^(-u)."""
+    return 2 * mp.cospi(u) * hard_massless(eps, u)
+
+
+def jet_quark_delta(eps, u):
+    """Coefficient of delta(p^2) in momentum space."""
+    return jet_quark(eps, u) * mp.exp(mp.euler * u) * mp.rgamma(1 - u)
+
+
+def columns(diagram, count):
+    """Fh_k0 and Fh_k1, k < count; the slope in u by differences of fourth order."""
+    h = mpf(10) ** -(mp.dps // 5)
+    slope = lambda e: (8 * (diagram(e, h) - diagram(e, -h)) - (diagram(e, 2 * h) - diagram(e, -2 * h))) / (12 * h)
+    return taylor(lambda e: diagram(e, mpf(0)), mpf(1) / 2, 640, count), taylor(slope, mpf(1) / 2, 640, count)
+
+
 FOUR_DIMENSIONS = {
     "hard-massless": lambda u: -4 * scheme(u) * gammas([1 - u, 1 + u], []) / ((1 - u) * (2 - u)),
     "jet-quark": lambda u: scheme(u) * mp.exp(-mp.euler * u) * (8 - 6 * u) / ((1 - u) * (2 - u) * mp.gamma(1 + u)),
+    "hard-massless-timelike": lambda u: -8 * mp.cospi(u) * scheme(u) * gammas([1 - u, 1 + u], []) / ((1 - u) * (2 - u)),
+    "jet-quark-delta": lambda u: scheme(u) * (8 - 6 * u) / ((1 - u) * (2 - u)) * gammas([], [1 + u, 1 - u]),
     "soft-dy": lambda u: 4 * scheme(u) * mp.exp(-2 * mp.euler * u) * gammas([1 - u], [1 + u]),
     "soft-thrust": lambda u: -4 * scheme(u) * mp.exp(-2 * mp.euler * u) * gammas([1 - 2 * u], [1 - u, 1 + u]),
 }
 SUDAKOV = {"hard-massless": hard_massless, "jet-quark": jet_quark, "soft-dy": soft_drell_yan,
-           "soft-thrust": soft_thrust}
+           "soft-thrust": soft_thrust, "hard-massless-timelike": hard_time_like, "jet-quark-delta": jet_quark_delta}
