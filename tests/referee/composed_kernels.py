@@ -18,14 +18,15 @@ default(seriesprecision, T + 10);
 uu(c) = lin(c, 1);
 e5(c) = ex(5/3*(c+x));
 scaled(c, X) = ex(2*log(X)*(c+x));
-entire(f, c) = sum(n = 0, T - 1, polcoef(f, n)/n!*(c+x)^n) + O(x^ORDER);
+/* sum_n w[n+1] (c+x)^n by Horner's scheme */
+horner(w, c) = { my(v = O(x^ORDER)); forstep(n = #w, 1, -1, v = v*(c+x) + w[n]); v };
+entire(f, c) = horner(vector(T, n, polcoef(f, n-1)/(n-1)!), c);
 single(F, f, c, X, Y) = (scaled(c, Y)*F - entire(f, c))/uu(c)*scaled(c, X/Y);
 double(F, p, q, c, X, Y) = {
-  my(l = 2*log(Y), u = uu(c), h = 0, s);
+  my(l = 2*log(Y), u = uu(c), h = 0, s, w);
   s = (scaled(c, Y)*F - polcoef(p, 0) - (polcoef(q, 0) + l*polcoef(p, 0))*u)/u^2;
-  for(k = 1, T - 1, h += 1/k;
-    s += (-1)^(k-1)*(polcoef(q, k) + l*polcoef(p, k) + h*polcoef(p, k+1))*(c+x)^(k-1)/k!);
-  s*scaled(c, X/Y);
+  w = vector(T - 1, k, h += 1/k; (-1)^(k-1)*(polcoef(q, k) + l*polcoef(p, k) + h*polcoef(p, k+1))/k!);
+  (s + horner(w, c))*scaled(c, X/Y);
 }
 /* gamma_k, k = 1, 2, ..., as Borel weights */
 gammas(p, q) = {
@@ -133,6 +134,7 @@ class Single:
     def counter(self, count):
         return kernels.borel_weights(kernels.taylor(self.dimension, self.radius, 640, count))
 
+    @functools.lru_cache(maxsize=None)
     def at(self, u):
         return (self.on_shell(u) - mp.polyval(self.counter(TERMS)[::-1], u)) / u
 
@@ -159,6 +161,7 @@ class Double:
         return [mpf(-1) ** (k - 1) * (second[k] + log * first[k] + mp.harmonic(k) * first[k + 1]) / mp.factorial(k)
                 for k in range(1, count + 1)]
 
+    @functools.lru_cache(maxsize=None)
     def at(self, u):
         first, second = self.columns(TERMS + 2)
         return ((self.four(u) - first[0] - second[0] * u) / u ** 2
@@ -177,7 +180,7 @@ class SingleLogarithm:
 
     @functools.lru_cache(maxsize=None)
     def plain(self, count):
-        first, second = self.double.columns(count + 1)
+        first, second = self.double.columns(count + 2)
         return kernels.borel_weights([2 * mpf(-1) ** (k - 1) * (second[k - 1] + mp.harmonic(k) * first[k])
                                       for k in range(1, count + 1)])
 

@@ -18,7 +18,7 @@ import java.util.Optional;
 import java.util.function.UnaryOperator;
 import org.junit.jupiter.api.Test;
 
-/** Every route to an expansion against 320 random formulas expanded by PARI/GP and mpmath. */
+/** Every route to an expansion against random and chosen formulas expanded by PARI/GP and mpmath. */
 class ExpansionRefereeTest {
     /** A ball holds the referee's number, which is known up to its last digit; empty if it does. */
     private static Optional<String> miss(RefereeRow row, int power, Ball ball) {
