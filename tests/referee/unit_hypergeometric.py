@@ -87,7 +87,8 @@ def main(path):
         if place not in second:
             second[place] = derivatives_by_tails(z, nearest_pole(z) / 128, 32, 4)
         worst[1] = max(worst[1], abs(second[place][int(order)] / value - 1))
-    print(len(rows), "rows, largest relative difference:", mp.nstr(worst[0], 3), "by the series,", mp.nstr(worst[1], 3), "by the tails")
+    print(len(rows), "rows, largest relative difference:", mp.nstr(worst[0], 3), "by the series,",
+          mp.nstr(worst[1], 3), "by the tails")
 
 
 if __name__ == "__main__":
