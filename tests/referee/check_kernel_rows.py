@@ -97,6 +97,7 @@ MAKERS = {
     "gamma-m": lambda m: dimension(kernels.gamma_m),
     "gamma-hl-current": lambda m: dimension(more.gamma_hl_current),
     "gamma-hqet-field-landau": lambda m: dimension(more.gamma_hqet_field),
+    "gamma-tensor-current": lambda m: dimension(more.gamma_tensor_current),
     "gamma-chromomag": lambda m: dimension(more.gamma_chromomagnetic),
     "qed-beta": lambda m: dimension(more.qed_integrand),
     "ps-mass": lambda m: unsubtracted(more.ps_mass),

@@ -48,6 +48,11 @@ def gamma_hl_current(a):
     return (3 + 2 * a) * gammas([4 + 2 * a], [1 - a, 2 + a, 2 + a, 3 + a]) / 9
 
 
+def gamma_tensor_current(a):
+    """-2 x 2 [h(-a)^2 - (1+a)^2] over 6 Gamma(1-a) Gamma(2+a)^2 Gamma(3+a)/Gamma(4+2a), h(-a) = a."""
+    return -4 * (a * a - (1 + a) ** 2) * gammas([4 + 2 * a], [1 - a, 2 + a, 2 + a, 3 + a]) / 6
+
+
 def gamma_hqet_field(a):
     return (3 + 2 * a) * gammas([4 + 2 * a], [1 - a, 2 + a, 2 + a, 2 + a]) / 18
 
