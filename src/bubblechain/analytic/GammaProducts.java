@@ -214,9 +214,9 @@ final class GammaProducts {
     FixedSeries unit3f2(UnitFactor factor, Stage stage) {
         int n = factor.n();
         Ball[] taylor = unit3f2Tables.computeIfAbsent(
-                factor.shift(), s -> UnitHypergeometric.taylor(Ball.of(s, 2 * bits), length + n, bits));
+                factor.shift(), s -> UnitHypergeometric.taylor(s, length + n, bits));
         if (taylor.length < length + n) {
-            taylor = UnitHypergeometric.taylor(Ball.of(factor.shift(), 2 * bits), length + n, bits);
+            taylor = UnitHypergeometric.taylor(factor.shift(), length + n, bits);
             unit3f2Tables.put(factor.shift(), taylor);
         }
         FixedValues values = new FixedValues(length, limbs);

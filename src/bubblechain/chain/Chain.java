@@ -38,6 +38,8 @@ public final class Chain {
 
     private static final int SMALL_BITS = 320;
     private static final int LARGEST_GUARD_BITS = 2_048;
+    /** Bits beyond those that are missing at one precision, for the next. */
+    private static final int SPARE_BITS = 32;
     /** A combination whose nearest pole cancels loses log2(u_1/u_0) bits with every order. */
     private static final int BITS_LOST_PER_ORDER = 4;
 
@@ -121,7 +123,8 @@ public final class Chain {
         requireRange("the number of loops", loops, LARGEST_LOOPS);
         ChainCost.of(loops, digits).requireMemory(Runtime.getRuntime().maxMemory());
         int needed = firstBits(loops, digits) - FIRST_GUARD_BITS;
-        for (int guard = FIRST_GUARD_BITS; ; guard *= 2) {
+        int guard = FIRST_GUARD_BITS;
+        while (true) {
             int bits = needed + guard;
             List<Ball> balls = rendering.applyToBalls(balls(loops, bits), bits);
             List<Optional<CertifiedNumber>> numbers =
@@ -131,10 +134,24 @@ public final class Chain {
                 return numbers.stream().flatMap(Optional::stream).toList();
             }
             // what more bits do not settle is a zero or a tie, which exact arithmetic decides where it is affordable
-            if (2 * guard > Math.max(LARGEST_GUARD_BITS, BITS_LOST_PER_ORDER * loops) || open <= LARGEST_SERIES_LOOPS && guard >= 2 * FIRST_GUARD_BITS) {
+            int next = Math.max(2 * guard, guard + missing(balls, numbers, needed));
+            boolean beyond = next > Math.max(LARGEST_GUARD_BITS, BITS_LOST_PER_ORDER * loops);
+            if (beyond || open <= LARGEST_SERIES_LOOPS && guard >= 2 * FIRST_GUARD_BITS) {
                 return settled(balls, numbers, rendering.applyToExact(affordable(open)), digits, bits);
             }
+            guard = next;
         }
+    }
+
+    /** The bits that the worst ball in doubt lacks, as far as that shows: of a ball that contains zero it does not. */
+    private static int missing(List<Ball> balls, List<Optional<CertifiedNumber>> numbers, int needed) {
+        int most = 0;
+        for (int n = 0; n < balls.size(); n++) {
+            if (numbers.get(n).isEmpty() && !balls.get(n).containsZero()) {
+                most = Math.max(most, needed + SPARE_BITS - balls.get(n).accuracyBits());
+            }
+        }
+        return most;
     }
 
     /** The working precision of the first attempt, which normally decides every digit. */

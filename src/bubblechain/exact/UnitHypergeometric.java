@@ -38,56 +38,116 @@ public final class UnitHypergeometric {
         return z.signum() <= 0 && z.isInteger() || z.compareTo(HALF) <= 0 && z.add(HALF).isInteger();
     }
 
+    /** The number c in the factor c + y of a series in y. */
+    private interface Shift {
+        Ball times(Ball value, int bits);
+
+        /** value/c. */
+        Ball over(Ball value, int bits);
+
+        /** c + q. */
+        Shift plus(Rational q);
+    }
+
+    /** Products with a short fraction cost no more than its length. */
+    private record ExactShift(Rational c) implements Shift {
+        @Override
+        public Ball times(Ball value, int bits) {
+            return value.multiply(c, bits);
+        }
+
+        @Override
+        public Ball over(Ball value, int bits) {
+            return value.divide(c, bits);
+        }
+
+        @Override
+        public Shift plus(Rational q) {
+            return new ExactShift(c.add(q));
+        }
+    }
+
+    private record BallShift(Ball c, Ball inverse, int working) implements Shift {
+        static BallShift of(Ball c, int working) {
+            return new BallShift(c, Ball.ONE.divide(c, working), working);
+        }
+
+        @Override
+        public Ball times(Ball value, int bits) {
+            return value.multiply(c, bits);
+        }
+
+        @Override
+        public Ball over(Ball value, int bits) {
+            return value.multiply(inverse, bits);
+        }
+
+        @Override
+        public Shift plus(Rational q) {
+            return of(c.add(q, working), working);
+        }
+    }
+
     /**
      * The Taylor coefficients W^(k)(z)/k! for k below {@code count}.
      *
      * @param bits working precision; the precision of the k-th coefficient is relative to 2^k
-     * @throws ArithmeticException if z is a pole, or cannot be told from one
+     * @throws ArithmeticException if z is a pole
      */
+    public static Ball[] taylor(Rational z, int count, int bits) {
+        return taylor(new ExactShift(z), firstTerm(z), count, bits);
+    }
+
+    /** The same at all numbers of a ball. @throws ArithmeticException if z cannot be told from a pole */
     public static Ball[] taylor(Ball z, int count, int bits) {
+        Rational least = z.midpoint().subtract(z.radius().toRational());
+        return taylor(BallShift.of(z, bits + GUARD_BITS), firstTerm(least), count, bits);
+    }
+
+    /** The first n with z + n of at least 1. */
+    private static long firstTerm(Rational z) {
+        return Math.max(0, 1 - z.floor().longValueExact());
+    }
+
+    private static Ball[] taylor(Shift z, long first, int count, int bits) {
         int working = bits + GUARD_BITS;
-        long first = Math.max(0, 1 - z.midpoint().subtract(z.radius().toRational()).floor().longValueExact());
         long last = Math.max(first, 1) + working / 2 + 2L * count;
         Ball[] factor = new Ball[count];
         Arrays.fill(factor, Ball.ZERO);
         factor[0] = Ball.of(Rational.of(3, 4), working);
-        overLinear(factor, z.subtract(Ball.of(HALF, working), working), working);
+        overLinear(factor, z.plus(HALF.negate()), working);
         Ball[] sum = new Ball[count];
         Arrays.fill(sum, Ball.ZERO);
-        for (long n = 0; ; n++) {
+        for (long n = 0; n < last; n++) {
             // the terms fall like 4^(-n), and with them the digits that are needed
             int current = (int) Math.max(LEAST_BITS, working - 2 * Math.max(0, n - first));
-            Ball shifted = z.add(Rational.of(n), working);
-            if (n == last) {
-                return withTail(sum, factor);
-            }
+            Shift shifted = z.plus(Rational.of(n));
             Ball[] term = factor.clone();
             overLinear(term, shifted, current);
             for (int k = 0; k < count; k++) {
                 sum[k] = sum[k].add(term[k], working);
             }
             timesLinear(factor, shifted, current);
-            overLinear(factor, shifted.add(HALF, working), current);
+            overLinear(factor, shifted.plus(HALF), current);
             for (int k = 0; k < count; k++) {
                 factor[k] = factor[k].shift(-2);
             }
         }
+        return withTail(sum, factor);
     }
 
     /** series (c + y). */
-    private static void timesLinear(Ball[] series, Ball c, int bits) {
+    private static void timesLinear(Ball[] series, Shift c, int bits) {
         for (int k = series.length - 1; k >= 0; k--) {
-            Ball product = series[k].multiply(c, bits);
+            Ball product = c.times(series[k], bits);
             series[k] = k == 0 ? product : product.add(series[k - 1], bits);
         }
     }
 
     /** series/(c + y). */
-    private static void overLinear(Ball[] series, Ball c, int bits) {
-        Ball inverse = Ball.ONE.divide(c, bits);
+    private static void overLinear(Ball[] series, Shift c, int bits) {
         for (int k = 0; k < series.length; k++) {
-            Ball value = k == 0 ? series[k] : series[k].subtract(series[k - 1], bits);
-            series[k] = value.multiply(inverse, bits);
+            series[k] = c.over(k == 0 ? series[k] : series[k].subtract(series[k - 1], bits), bits);
         }
     }
 
@@ -135,7 +195,7 @@ public final class UnitHypergeometric {
     public static ExactConstant coefficient(int k, Rational s) {
         return closedForm(k, s).orElseGet(() -> ExactConstant.opaque(
                         "unit_3f2(" + k + "," + s + ")",
-                        bits -> taylor(Ball.of(s, bits + GUARD_BITS), k + 1, bits + 2 * k)[k].multiply(
+                        bits -> taylor(s, k + 1, bits + 2 * k)[k].multiply(
                                 Rational.of(ExactFunctions.factorial(k)), bits))
                 .divide(Rational.of(ExactFunctions.factorial(k))));
     }

@@ -131,7 +131,7 @@ public final class BallRing implements CoefficientRing<Ball> {
         Ball[] known = unit3f2Tables.get(s);
         if (known == null || known.length <= k) {
             // the k-th coefficient is known relative to 2^k
-            known = UnitHypergeometric.taylor(Ball.of(s, 2 * bits), Math.max(k, largestOrder) + 1, bits);
+            known = UnitHypergeometric.taylor(s, Math.max(k, largestOrder) + 1, bits);
             unit3f2Tables.put(s, known);
         }
         return known[k];
