@@ -27,7 +27,7 @@ import java.util.stream.Collectors;
  * cancels is gone.
  */
 final class Combination {
-    private static final List<String> KEYS = List.of("kernel", "weight", "scale_ratio", "parameters");
+    private static final List<String> KEYS = List.of("kernel", "weight", "scale_ratio", "cautions", "parameters");
     private static final int LARGEST = 32;
     private static final int POSITIVE_BITS = 128;
     private static final Formula TWICE_U = Formula.parse("2*u");
@@ -37,7 +37,8 @@ final class Combination {
         Kernel load(String nameOrPath, Map<String, Rational> parameters);
     }
 
-    private record Part(String name, Kernel kernel, Formula weight, Optional<Formula> ratio) {}
+    private record Part(
+            String name, Kernel kernel, Formula weight, Optional<Formula> ratio, boolean cautions) {}
 
     private final TomlSection top;
     private final Definitions definitions;
@@ -80,7 +81,12 @@ final class Combination {
             throw entry.error("scale_ratio", "the kernel " + kernel.name()
                     + " is renormalised; it can be combined at its own scale only, without scale_ratio");
         }
-        return new Part(described(kernel, entry), kernel, constant(entry, "weight"), ratio);
+        String cautions = entry.optionalText("cautions").orElse("yes");
+        if (!cautions.equals("yes") && !cautions.equals("no")) {
+            throw entry.error("cautions", "cautions is \"yes\" or \"no\", got \"" + cautions + "\"");
+        }
+        return new Part(
+                described(kernel, entry), kernel, constant(entry, "weight"), ratio, cautions.equals("yes"));
     }
 
     private static String factor(String weight) {
@@ -211,10 +217,10 @@ final class Combination {
         return List.copyOf(all);
     }
 
-    /** The cautions of the file and of all parts. */
+    /** The cautions of the file, and of the parts unless these say what does not hold for the sum. */
     List<String> cautions() {
         Set<String> all = new LinkedHashSet<>(top.texts("cautions"));
-        parts.forEach(part -> all.addAll(part.kernel().cautions()));
+        parts.stream().filter(Part::cautions).forEach(part -> all.addAll(part.kernel().cautions()));
         return List.copyOf(all);
     }
 }

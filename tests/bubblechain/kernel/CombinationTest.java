@@ -10,6 +10,7 @@ import bubblechain.exact.Rational;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Map;
 import java.util.Random;
 import org.junit.jupiter.api.BeforeEach;
@@ -128,6 +129,15 @@ class CombinationTest {
         Kernel kernel = combination(part("below/inner.toml", "1/2", "") + part("adler", "-1", ""));
         assertThat(kernel.transform().orElseThrow().requireNormalForm().isZero()).isTrue();
         assertThat(kernel.sources()).containsAll(KernelLibrary.load("adler").sources());
+    }
+
+    @Test
+    void cautionsOfPartsAreKeptUnlessTheFileSaysThatTheyDoNotHold() throws IOException {
+        List<String> cautions = KernelLibrary.load("soft-thrust").cautions();
+        assertThat(cautions).isNotEmpty();
+        assertThat(combination(part("soft-thrust", "1", "")).cautions()).isEqualTo(cautions);
+        assertThat(combination(part("soft-thrust", "1", "cautions = \"no\"")).cautions()).isEmpty();
+        assertRefused(part("adler", "1", "cautions = \"never\""), "cautions is \"yes\" or \"no\", got \"never\"");
     }
 
     @Test
