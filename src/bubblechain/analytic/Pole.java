@@ -1,6 +1,7 @@
 package bubblechain.analytic;
 
 import bubblechain.exact.Ball;
+import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import bubblechain.series.LaurentSeries;
@@ -17,6 +18,9 @@ import java.util.Optional;
  * @param laurent coefficients of (u - u0)^(-order) .. (u - u0)^(-1)
  */
 public record Pole(Rational point, int order, PoleStatus status, List<ExactConstant> laurent) {
+    /** Largest order of a pole whose principal part is computed. */
+    public static final int LARGEST_ORDER = 100;
+
     private static final int FIRST_BITS = 192;
     /** Precision up to which a formally non-zero coefficient is refined before its sign is given up. */
     private static final int LAST_BITS = 3_072;
@@ -25,11 +29,19 @@ public record Pole(Rational point, int order, PoleStatus status, List<ExactConst
         laurent = List.copyOf(laurent);
     }
 
-    /** The pole at a point, if there is one; a principal part that vanishes formally is none. */
+    /**
+     * The pole at a point, if there is one; a principal part that vanishes formally is none.
+     *
+     * @throws DomainException if a term has a pole of an order above {@link #LARGEST_ORDER} there
+     */
     public static Optional<Pole> of(NormalForm form, Rational point) {
         Expansion expansion = Expansion.about(point, form);
         if (expansion.lowestPower() >= 0) {
             return Optional.empty();
+        }
+        if (-expansion.lowestPower() > LARGEST_ORDER) {
+            throw new DomainException("the pole at u = " + point + " may be of order " + -expansion.lowestPower()
+                    + "; principal parts are computed up to order " + LARGEST_ORDER);
         }
         LaurentSeries<ExactConstant> principal = expansion.exact(0);
         if (principal.length() == 0) {

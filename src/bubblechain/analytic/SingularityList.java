@@ -21,6 +21,9 @@ public final class SingularityList {
     /** Candidates a range may contain. */
     public static final int CANDIDATE_LIMIT = 5_000;
 
+    /** Candidates times terms that are expanded for one list: some seconds. */
+    private static final int WORK_LIMIT = 200_000;
+
     private static final int BITS = 256;
     private static final int ROOT_BITS = 300;
 
@@ -70,6 +73,11 @@ public final class SingularityList {
         return points;
     }
 
+    private static DomainException tooMany(Rational from, Rational to) {
+        return new DomainException("the range from " + from + " to " + to + " may hold more than " + CANDIDATE_LIMIT
+                + " poles; ask for a smaller one");
+    }
+
     /** The points u with shift + slope u = 0, -1, -2, ... */
     private static void addPoles(
             Rational shift, Rational slope, Rational from, Rational to, SortedSet<Rational> points) {
@@ -79,18 +87,29 @@ public final class SingularityList {
         BigInteger highest = shift.add(slope.multiply(first)).floor().min(BigInteger.ZERO);
         BigInteger lowest = shift.add(slope.multiply(last)).ceiling();
         if (highest.subtract(lowest).compareTo(BigInteger.valueOf(CANDIDATE_LIMIT)) > 0) {
-            throw new DomainException("the range from " + from + " to " + to + " may hold more than " + CANDIDATE_LIMIT
-                    + " poles; ask for a smaller one");
+            throw tooMany(from, to);
         }
         for (BigInteger m = highest; m.compareTo(lowest) >= 0; m = m.subtract(BigInteger.ONE)) {
             points.add(Rational.of(m).subtract(shift).divide(slope));
+            if (points.size() > CANDIDATE_LIMIT) {
+                throw tooMany(from, to);
+            }
         }
     }
 
-    /** The poles at rational points of [from, to], in increasing order. */
+    /**
+     * The poles at rational points of [from, to], in increasing order.
+     *
+     * @throws DomainException if there are too many candidates and terms to expand them all
+     */
     public List<Pole> poles(Rational from, Rational to) {
         List<Pole> found = new ArrayList<>();
-        for (Rational point : candidates(from, to)) {
+        SortedSet<Rational> candidates = candidates(from, to);
+        if ((long) candidates.size() * form.size() > WORK_LIMIT) {
+            throw new DomainException("the range from " + from + " to " + to + " holds " + candidates.size()
+                    + " possible poles of a sum of " + form.size() + " terms; ask for a smaller range");
+        }
+        for (Rational point : candidates) {
             Pole.of(form, point).ifPresent(found::add);
         }
         return found;

@@ -2,6 +2,7 @@ package bubblechain.assessment;
 
 import bubblechain.analytic.AnalyticFunction;
 import bubblechain.borel.NearestPoles;
+import bubblechain.exact.DomainException;
 import bubblechain.formula.FormulaException;
 import bubblechain.kernel.Kernel;
 import bubblechain.kernel.SingularityNote;
@@ -73,8 +74,14 @@ public final class KernelReport {
             NearestPoles poles = NearestPoles.of(kernel);
             report.add(withStatus(facts, KernelList.status(poles))).add(nearest(kernel, poles));
         } catch (FormulaException e) {
-            report.add(withStatus(facts, NOT_LISTED)).add(new Note("The poles cannot be listed: " + e.reason() + "."));
+            notListed(report, facts, e.reason());
+        } catch (DomainException e) {
+            notListed(report, facts, String.valueOf(e.getMessage()));
         }
+    }
+
+    private static void notListed(Report.Builder report, Facts facts, String reason) {
+        report.add(withStatus(facts, NOT_LISTED)).add(new Note("The poles cannot be listed: " + reason + "."));
     }
 
     private static Facts withStatus(Facts facts, String status) {

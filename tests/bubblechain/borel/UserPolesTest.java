@@ -113,4 +113,16 @@ class UserPolesTest {
         assertThat(plane("1/(11-u)").leadingInfrared().orElseThrow().u()).isEqualTo(Rational.of(11));
         assertThat(plane("1/(13-u)").leadingInfrared()).isEmpty();
     }
+
+    @Test
+    void listsThatWouldTakeMinutesAreRefused() {
+        Kernel sequences = KernelText.of("sum(k,1,1000,gamma(1+k*u))").kernel(folder);
+        assertThatThrownBy(() -> BorelPlane.of(sequences, Scales.NATURAL).poles(Rational.of(-3), Rational.of(3)))
+                .isInstanceOf(DomainException.class)
+                .hasMessage("the range from -3 to 3 may hold more than 5000 poles; ask for a smaller one");
+        Kernel steep = KernelText.of("polygamma(200,1-u)").kernel(folder);
+        assertThatThrownBy(() -> BorelPlane.of(steep, Scales.NATURAL).poles(Rational.ZERO, Rational.TWO))
+                .isInstanceOf(DomainException.class)
+                .hasMessage("the pole at u = 1 may be of order 201; principal parts are computed up to order 100");
+    }
 }
