@@ -11,6 +11,7 @@ import bubblechain.series.ExactRing;
 import bubblechain.series.LaurentSeries;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.function.IntFunction;
 
@@ -27,7 +28,9 @@ public final class Expansion {
     private final List<LocalTerm> terms = new ArrayList<>();
 
     private Expansion(NormalForm form, Rational point) {
-        form.terms().forEach((key, factor) -> terms.add(new LocalTerm(key, factor, point)));
+        for (Map.Entry<TermKey, RationalFunction> term : form.terms().entrySet()) {
+            terms.add(new LocalTerm(term.getKey(), term.getValue(), point));
+        }
     }
 
     public static Expansion about(Rational point, NormalForm form) {
@@ -36,7 +39,11 @@ public final class Expansion {
 
     /** The lowest power any single term has; the sum may start later. Zero for the zero form. */
     public int lowestPower() {
-        return terms.stream().mapToInt(LocalTerm::valuation).min().orElse(0);
+        int lowest = terms.isEmpty() ? 0 : Integer.MAX_VALUE;
+        for (LocalTerm term : terms) {
+            lowest = Math.min(lowest, term.valuation());
+        }
+        return lowest;
     }
 
     /**

@@ -49,10 +49,17 @@ record FactoredTerm(
     /** Takes the small rational roots out; the rest keeps the value at u = 0. */
     private static Polynomial split(Polynomial polynomial, int sign, Map<Rational, Integer> roots) {
         RationalRoots.Split split = RationalRoots.of(polynomial);
-        split.roots().forEach((root, power) -> roots.merge(root, sign * power, Integer::sum));
+        for (Map.Entry<Rational, Integer> root : split.roots().entrySet()) {
+            add(roots, root.getKey(), sign * root.getValue());
+        }
         Polynomial rest = split.rest();
         // the factors (1 - u/root) are one at u = 0
         return rest.multiply(polynomial.coefficient(0).divide(rest.coefficient(0)));
+    }
+
+    /** More of a power. */
+    static void add(Map<Rational, Integer> powers, Rational root, int power) {
+        powers.put(root, powers.getOrDefault(root, 0) + power);
     }
 
     /** The exponential and the gammas alone, which terms can share. */
@@ -63,15 +70,17 @@ record FactoredTerm(
     /** A radius within which the term has no singular point but u = 0; empty if it has none at all. */
     Optional<Rational> radius() {
         Map<Rational, Integer> powers = new TreeMap<>(roots);
-        key.gammas().forEach((gamma, power) -> {
+        for (Map.Entry<GammaFactor, Integer> gamma : key.gammas().entrySet()) {
             for (int j = 0; j < POLES_SEARCHED; j++) {
-                powers.merge(pole(gamma, j), -power, Integer::sum);
+                add(powers, pole(gamma.getKey(), j), -gamma.getValue());
             }
-        });
-        Optional<Rational> nearest = powers.entrySet().stream()
-                .filter(e -> e.getValue() < 0)
-                .map(e -> e.getKey().abs())
-                .min(Rational::compareTo);
+        }
+        Optional<Rational> nearest = Optional.empty();
+        for (Map.Entry<Rational, Integer> factor : powers.entrySet()) {
+            if (factor.getValue() < 0) {
+                nearest = smaller(nearest, factor.getKey().abs());
+            }
+        }
         for (TermKey.PolygammaFactor p : key.polygammas().keySet()) {
             nearest = smaller(nearest, p.shift().divide(p.slope()).abs());
         }
@@ -110,7 +119,9 @@ record FactoredTerm(
      */
     FixedSeries applyTo(FixedSeries series, Map<Rational, Integer> further, Rational radius, int shift) {
         Map<Rational, Integer> powers = new HashMap<>(roots);
-        further.forEach((root, power) -> powers.merge(root, power, Integer::sum));
+        for (Map.Entry<Rational, Integer> factor : further.entrySet()) {
+            add(powers, factor.getKey(), factor.getValue());
+        }
         FixedSeries result = series;
         if (above.degree() > 0) {
             result = result.times(scaled(above, radius));

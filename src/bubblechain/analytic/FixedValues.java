@@ -8,18 +8,18 @@ import java.util.Collections;
 import java.util.List;
 
 /** Coefficients given as balls, gathered into a fixed-point series. */
-final class FixedValues {
+public final class FixedValues {
     private final List<BigInteger> values;
     private final double[] errors;
     private final int limbs;
 
-    FixedValues(int length, int limbs) {
+    public FixedValues(int length, int limbs) {
         this.values = new ArrayList<>(Collections.nCopies(length, BigInteger.ZERO));
         this.errors = new double[length];
         this.limbs = limbs;
     }
 
-    void set(int k, Ball ball) {
+    public void set(int k, Ball ball) {
         int bits = FixedSeries.bits(limbs);
         values.set(k, ball.scaledMidpoint(bits));
         errors[k] = ball.radius().scale(bits).toDouble() + 1;
@@ -30,7 +30,8 @@ final class FixedValues {
         errors[k] = error;
     }
 
-    FixedSeries series() {
+    /** The series. */
+    public FixedSeries series() {
         return FixedSeries.of(values, errors, limbs);
     }
 }

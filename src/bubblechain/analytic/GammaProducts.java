@@ -10,11 +10,15 @@ import bubblechain.exact.Rational;
 import bubblechain.exact.UnitHypergeometric;
 import bubblechain.series.BallRing;
 import bubblechain.series.FixedSeries;
+import bubblechain.series.FixedZeta;
 import bubblechain.series.PowerSums;
 import java.util.Arrays;
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.TreeMap;
 
 /**
  * e^(alpha u) prod Gamma(s + b u)^m as fixed-point series in v = u/rho, the poles and zeros with |u| &lt; r rho taken out.
@@ -70,7 +74,7 @@ final class GammaProducts {
 
     /** The product to some order and precision; a second call may go further with fewer limbs. */
     Product of(TermKey key, Stage stage) {
-        Known known = products.computeIfAbsent(key, this::first);
+        Known known = products.containsKey(key) ? products.get(key) : first(key);
         FixedSeries slopes = known.slopes().truncated(stage.length(), stage.limbs());
         FixedSeries before = known.product().series();
         FixedSeries series = slopes.expOfIntegral(before.truncated(before.length(), stage.limbs()));
@@ -81,20 +85,27 @@ final class GammaProducts {
 
     private Known first(TermKey key) {
         Map<Rational, Integer> removed = new HashMap<>();
-        ExactConstant constant = ExactConstant.ONE;
         ExactConstant first = key.slope();
         for (Map.Entry<GammaFactor, Integer> entry : key.gammas().entrySet()) {
             GammaFactor gamma = entry.getKey();
             int power = entry.getValue();
             for (int j = 0; j < polesRemoved(gamma); j++) {
-                removed.merge(FactoredTerm.pole(gamma, j), -power, Integer::sum);
+                FactoredTerm.add(removed, FactoredTerm.pole(gamma, j), -power);
             }
-            constant = constant.multiply(ExactFunctions.gamma(gamma.shift()).power(power));
             first = first.add(ExactFunctions.digamma(gamma.shift()).multiply(gamma.slope().multiply(power)));
         }
-        removed.values().removeIf(power -> power == 0);
+        removed.values().removeAll(Set.of(0));
         FixedSeries slopes = logarithmicDerivative(key, removed, first);
-        return new Known(slopes, new Product(FixedSeries.one(1, limbs), removed, constant));
+        return new Known(slopes, new Product(FixedSeries.one(1, limbs), removed, constant(key)));
+    }
+
+    /** prod Gamma(s)^m. */
+    static ExactConstant constant(TermKey key) {
+        ExactConstant constant = ExactConstant.ONE;
+        for (Map.Entry<GammaFactor, Integer> entry : key.gammas().entrySet()) {
+            constant = constant.multiply(ExactFunctions.gamma(entry.getKey().shift()).power(entry.getValue()));
+        }
+        return constant;
     }
 
     private int polesRemoved(GammaFactor gamma) {
@@ -108,39 +119,80 @@ final class GammaProducts {
             return values.series();
         }
         int largest = key.gammas().isEmpty() ? 1 : largestOrder(key);
-        Ball[] sums = zetaSums(key, largest);
-        sums[1] = first.multiply(radius).toBall(bits);
         PowerSums powers = PowerSums.of(length, limbs);
-        removed.forEach((root, power) -> {
-            Rational ratio = radius.divide(root);
+        Ball[] rest = new Ball[largest + 1];
+        Arrays.fill(rest, Ball.ZERO);
+        rest[1] = first.multiply(radius).toBall(bits);
+        for (Map.Entry<Rational, Integer> factor : removed.entrySet()) {
+            Rational ratio = radius.divide(factor.getKey());
             if (PowerSums.fits(ratio)) {
-                powers.add(ratio, power, largest);
+                powers.add(ratio, factor.getValue(), largest);
             } else {
-                addPowers(sums, ratio, power, largest);
+                addPowers(rest, ratio, factor.getValue(), largest);
             }
-        });
+        }
+        boolean fixed = true;
+        for (GammaFactor gamma : key.gammas().keySet()) {
+            fixed &= PowerSums.fits(ratio(gamma));
+        }
+        if (!fixed) {
+            addZetaSums(rest, key, largest);
+        }
         for (int k = 1; k < length; k++) {
             if (k <= largest) {
-                values.set(k, sums[k]);
+                values.set(k, rest[k]);
             } else if (!key.gammas().isEmpty()) {
                 values.setZero(k, 1);
             }
         }
         // a removed factor (1 - u/root)^power was in the product, so its -power (rho/root)^k goes
-        return values.series().add(powers.series());
+        FixedSeries sum = values.series().add(powers.series());
+        return fixed && largest > 1 ? sum.add(zetaSums(key, largest)) : sum;
+    }
+
+    /** -b rho/s: the zeta sum of a gamma is the sum of m (-b rho/s)^k s^k zeta(k, s). */
+    private Rational ratio(GammaFactor gamma) {
+        return gamma.slope().multiply(radius).divide(gamma.shift()).negate();
+    }
+
+    /** sum m (-b rho)^k zeta(k, s) for k = 2 .. largest, with all gammas of one shift together. */
+    private FixedSeries zetaSums(TermKey key, int largest) {
+        Map<Rational, PowerSums> weights = new TreeMap<>();
+        for (Map.Entry<GammaFactor, Integer> entry : key.gammas().entrySet()) {
+            Rational shift = entry.getKey().shift();
+            if (!weights.containsKey(shift)) {
+                weights.put(shift, PowerSums.of(largest + 1, limbs));
+            }
+            weights.get(shift).add(ratio(entry.getKey()), entry.getValue(), largest);
+        }
+        FixedSeries total = FixedSeries.zero(largest + 1, limbs);
+        for (Map.Entry<Rational, PowerSums> entry : weights.entrySet()) {
+            FixedSeries zeta = FixedZeta.normalised(entry.getKey(), largest, limbs);
+            total = total.add(entry.getValue().series().timesEach(zeta));
+        }
+        return total.window(0, length);
     }
 
     /** Beyond this order k l_k is below 2^-8 units of the last place, by |k l_k| <= sum |m| x^k (1 + (s+J)/(k-1)). */
     private int largestOrder(TermKey key) {
         double target = -(FixedSeries.bits(limbs) + 8.0);
+        int count = key.gammas().size();
+        double[] starts = new double[count];
+        double[] log2Ratios = new double[count];
+        double[] sizes = new double[count];
+        int next = 0;
+        for (Map.Entry<GammaFactor, Integer> entry : key.gammas().entrySet()) {
+            GammaFactor gamma = entry.getKey();
+            starts[next] = gamma.shift().toDouble() + polesRemoved(gamma);
+            log2Ratios[next] = Math.log(gamma.slope().abs().multiply(radius).toDouble() / starts[next]) / LN2;
+            sizes[next] = Math.abs(entry.getValue());
+            next++;
+        }
         for (int k = 2; k < length; k++) {
-            double bound = 0;
-            for (Map.Entry<GammaFactor, Integer> entry : key.gammas().entrySet()) {
-                GammaFactor gamma = entry.getKey();
-                double start = gamma.shift().toDouble() + polesRemoved(gamma);
-                double ratio = gamma.slope().abs().multiply(radius).toDouble() / start;
-                double log2 = k * Math.log(ratio) / Math.log(2) + Math.log(Math.abs(entry.getValue()) * (1 + start / (k - 1))) / Math.log(2);
-                bound = Math.max(bound == 0 ? Double.NEGATIVE_INFINITY : bound, log2 + key.gammas().size());
+            double bound = Double.NEGATIVE_INFINITY;
+            for (int i = 0; i < count; i++) {
+                double log2 = k * log2Ratios[i] + Math.log(sizes[i] * (1 + starts[i] / (k - 1))) / LN2;
+                bound = Math.max(bound, log2 + count);
             }
             if (bound < target) {
                 return k - 1;
@@ -149,10 +201,8 @@ final class GammaProducts {
         return length - 1;
     }
 
-    /** sum m (-b rho)^k zeta(k, s) for k = 2 .. largest. */
-    private Ball[] zetaSums(TermKey key, int largest) {
-        Ball[] sums = new Ball[Math.max(largest, 1) + 1];
-        Arrays.fill(sums, Ball.ZERO);
+    /** The same from balls: poles of single gammas within the radius cancel, and the sums are large. */
+    private void addZetaSums(Ball[] sums, TermKey key, int largest) {
         for (Map.Entry<GammaFactor, Integer> entry : key.gammas().entrySet()) {
             Rational step = entry.getKey().slope().multiply(radius).negate();
             Ball power = Ball.of(step.multiply(entry.getValue()), bits);
@@ -161,7 +211,6 @@ final class GammaProducts {
                 sums[k] = sums[k].add(power.multiply(ring.hurwitz(k, entry.getKey().shift()), bits), bits);
             }
         }
-        return sums;
     }
 
     /**
@@ -189,8 +238,35 @@ final class GammaProducts {
     /** How far one stage of a computation goes: orders below length, so many limbs. */
     record Stage(int length, int limbs) {}
 
-    /** psi^(n)(s + b rho v) = sum_k (-1)^(n+k+1) (n+k)!/k! zeta(n+k+1, s) (b rho)^k v^k. */
+    /**
+     * psi^(n)(s + b rho v) = sum_k (-1)^(n+k+1) (n+k)!/k! zeta(n+k+1, s) (b rho)^k v^k
+     * = (-1/s)^(n+1) sum_k [(n+k)!/k! (-b rho/s)^k] [s^(n+k+1) zeta(n+k+1, s)] v^k, psi(s) apart.
+     */
     FixedSeries polygamma(PolygammaFactor factor, Stage stage) {
+        Rational ratio = factor.slope().multiply(radius).divide(factor.shift()).negate();
+        if (!PowerSums.fits(ratio)) {
+            return polygammaFromBalls(factor).truncated(stage.length(), stage.limbs());
+        }
+        int n = factor.n();
+        // one more limb for what the weights lose while they grow
+        FixedSeries weights = FixedSeries.ratios(
+                Rational.of(ExactFunctions.factorial(n)), k -> ratio.multiply(n + k).divide(k), stage.length(),
+                stage.limbs() + 1);
+        FixedSeries zeta = FixedZeta.normalised(factor.shift(), stage.length() + n, stage.limbs() + 1)
+                .window(n + 1, stage.length());
+        FixedSeries series = weights.timesEach(zeta)
+                .truncated(stage.length(), stage.limbs())
+                .times(List.of(factor.shift().negate().power(-(n + 1))));
+        if (n > 0) {
+            return series;
+        }
+        FixedValues first = new FixedValues(stage.length(), stage.limbs());
+        first.set(0, ExactFunctions.digamma(factor.shift()).toBall(bits));
+        return series.add(first.series());
+    }
+
+    /** The same where poles lie within the radius. */
+    private FixedSeries polygammaFromBalls(PolygammaFactor factor) {
         FixedValues values = new FixedValues(length, limbs);
         int n = factor.n();
         BallRing ring = polygammaRing.orElseGet(() -> BallRing.of(bits, length + n + 2));
@@ -207,7 +283,7 @@ final class GammaProducts {
                     : ring.hurwitz(m + 1, factor.shift()).multiply(weight, bits);
             values.set(k, m == 0 || m % 2 == 1 ? value : value.negate());
         }
-        return values.series().truncated(stage.length(), stage.limbs());
+        return values.series();
     }
 
     /** W^(n)(s + b rho v) = sum_k (n+k)!/k! w_(n+k) (b rho)^k v^k, w_k the Taylor coefficients of W at s. */

@@ -23,17 +23,23 @@ final class LinearFactors {
     static FixedSeries apply(FixedSeries series, Map<Rational, Integer> powers, Rational radius) {
         List<LinearGroup> groups = groups(powers, radius, 1);
         groups.addAll(groups(powers, radius, -1));
-        groups.sort(Comparator.comparing(LinearFactors::steepest).reversed());
+        groups.sort(new Comparator<>() {
+            @Override
+            public int compare(LinearGroup left, LinearGroup right) {
+                return right.slopes().get(0).abs().compareTo(left.slopes().get(0).abs());
+            }
+        });
         return series.throughLinear(groups);
     }
 
-    private static Rational steepest(LinearGroup group) {
-        return group.slopes().get(0).abs();
-    }
-
     private static Map<Rational, Integer> sorted(Map<Rational, Integer> powers) {
-        Map<Rational, Integer> sorted =
-                new TreeMap<>(Comparator.comparing(Rational::abs).thenComparing(Comparator.naturalOrder()));
+        Map<Rational, Integer> sorted = new TreeMap<>(new Comparator<>() {
+            @Override
+            public int compare(Rational left, Rational right) {
+                int bySize = left.abs().compareTo(right.abs());
+                return bySize != 0 ? bySize : left.compareTo(right);
+            }
+        });
         sorted.putAll(powers);
         return sorted;
     }
@@ -49,7 +55,9 @@ final class LinearFactors {
             for (int k = 0; k < sign * factor.getValue(); k++) {
                 BigInteger larger = denominator.multiply(size);
                 if (group.size() == LARGEST_DEGREE || larger.bitLength() > LARGEST_BITS) {
-                    groups.add(new LinearGroup(group, sign < 0));
+                    if (!group.isEmpty()) {
+                        groups.add(new LinearGroup(group, sign < 0));
+                    }
                     group = new ArrayList<>();
                     larger = size;
                 }
@@ -57,8 +65,9 @@ final class LinearFactors {
                 denominator = larger;
             }
         }
-        groups.add(new LinearGroup(group, sign < 0));
-        groups.removeIf(g -> g.slopes().isEmpty());
+        if (!group.isEmpty()) {
+            groups.add(new LinearGroup(group, sign < 0));
+        }
         return groups;
     }
 }

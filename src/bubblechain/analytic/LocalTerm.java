@@ -50,13 +50,17 @@ final class LocalTerm {
         valuation = local.numerator().valuation() - local.denominator().valuation();
         above.add(local.numerator().dividedByPower(local.numerator().valuation()));
         below.add(local.denominator().dividedByPower(local.denominator().valuation()));
-        key.gammas().forEach(this::addGamma);
-        key.polygammas().forEach((p, power) -> {
-            if (isPole(p)) {
-                valuation -= (p.n() + 1) * power;
+        for (Map.Entry<GammaFactor, Integer> gamma : key.gammas().entrySet()) {
+            addGamma(gamma.getKey(), gamma.getValue());
+        }
+        for (Map.Entry<PolygammaFactor, Integer> polygamma : key.polygammas().entrySet()) {
+            if (isPole(polygamma.getKey())) {
+                valuation -= (polygamma.getKey().n() + 1) * polygamma.getValue();
             }
-        });
-        key.units().forEach((w, power) -> valuation -= UnitFunctions.poleOrder(w, point) * power);
+        }
+        for (Map.Entry<TermKey.UnitFactor, Integer> unit : key.units().entrySet()) {
+            valuation -= UnitFunctions.poleOrder(unit.getKey(), point) * unit.getValue();
+        }
     }
 
     /** Lowest power of x this term can have; a sine that vanishes at the point is not counted. */

@@ -65,8 +65,9 @@ public final class NormalForm {
 
     public static NormalForm constant(ExactConstant value) {
         Map<TermKey, RationalFunction> sum = new HashMap<>();
-        value.products().forEach((product, coefficient) ->
-                accumulate(sum, TermKey.ONE.withConstant(product), RationalFunction.constant(coefficient)));
+        for (Map.Entry<ExactConstant, Rational> term : value.products().entrySet()) {
+            accumulate(sum, TermKey.ONE.withConstant(term.getKey()), RationalFunction.constant(term.getValue()));
+        }
         return new NormalForm(sum);
     }
 
@@ -207,14 +208,18 @@ public final class NormalForm {
 
     public NormalForm add(NormalForm other) {
         Map<TermKey, RationalFunction> sum = new HashMap<>(terms);
-        other.terms.forEach((key, factor) -> accumulate(sum, key, factor));
+        for (Map.Entry<TermKey, RationalFunction> term : other.terms.entrySet()) {
+            accumulate(sum, term.getKey(), term.getValue());
+        }
         return new NormalForm(sum);
     }
 
     private static void accumulate(Map<TermKey, RationalFunction> sum, TermKey key, RationalFunction factor) {
-        RationalFunction total = sum.merge(key, factor, RationalFunction::add);
+        RationalFunction total = sum.containsKey(key) ? sum.get(key).add(factor) : factor;
         if (total.isZero()) {
             sum.remove(key);
+        } else {
+            sum.put(key, total);
         }
     }
 
@@ -231,7 +236,9 @@ public final class NormalForm {
             return ZERO;
         }
         Map<TermKey, RationalFunction> product = new HashMap<>();
-        terms.forEach((key, value) -> product.put(key, value.multiply(factor)));
+        for (Map.Entry<TermKey, RationalFunction> term : terms.entrySet()) {
+            product.put(term.getKey(), term.getValue().multiply(factor));
+        }
         return new NormalForm(product);
     }
 
@@ -245,10 +252,12 @@ public final class NormalForm {
                 RationalFunction factor = left.getValue().multiply(right.getValue());
                 ExactConstant constants =
                         left.getKey().constant().multiply(right.getKey().constant());
-                constants.products().forEach((constant, coefficient) -> accumulate(
-                        product,
-                        left.getKey().timesFunctions(right.getKey(), constant),
-                        factor.multiply(coefficient)));
+                for (Map.Entry<ExactConstant, Rational> part : constants.products().entrySet()) {
+                    accumulate(
+                            product,
+                            left.getKey().timesFunctions(right.getKey(), part.getKey()),
+                            factor.multiply(part.getValue()));
+                }
             }
             if (product.size() > TERM_LIMIT) {
                 throw new DomainException("the product has more than " + TERM_LIMIT + " terms");

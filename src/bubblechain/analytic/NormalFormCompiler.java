@@ -81,16 +81,20 @@ final class NormalFormCompiler {
     }
 
     private static NormalForm inverse(NormalForm form, Formula place) {
-        return form.inverse()
-                .orElseThrow(() -> new InadmissibleFormulaException(
-                        place.span(),
-                        "a denominator must be a product of rational functions, exponentials, gammas and"
-                                + " sin(pi*...); the zeros of this one cannot be listed exactly"));
+        Optional<NormalForm> inverse = form.inverse();
+        if (inverse.isEmpty()) {
+            throw new InadmissibleFormulaException(
+                    place.span(),
+                    "a denominator must be a product of rational functions, exponentials, gammas and"
+                            + " sin(pi*...); the zeros of this one cannot be listed exactly");
+        }
+        return inverse.get();
     }
 
     private NormalForm power(NormalForm base, Formula.Binary b) {
         NormalForm exponent = compile(b.right());
-        Optional<Rational> constant = exponent.asConstant().flatMap(ExactConstant::asRational);
+        Optional<ExactConstant> value = exponent.asConstant();
+        Optional<Rational> constant = value.isPresent() ? value.get().asRational() : Optional.empty();
         if (constant.isPresent() && constant.get().isInteger()) {
             if (constant.get().abs().compareTo(Rational.of(FormulaLimits.EXPONENT)) > 0) {
                 throw FormulaException.at(
@@ -150,9 +154,12 @@ final class NormalFormCompiler {
             return NormalForm.constant(ConstantValue.of(c, indices, constants));
         }
         NormalForm argument = compile(last);
-        NormalForm.Linear linear = argument.asLinear()
-                .orElseThrow(() -> new InadmissibleFormulaException(
-                        last.span(), "the argument of " + c.function().text() + " must be linear in u"));
+        Optional<NormalForm.Linear> form = argument.asLinear();
+        if (form.isEmpty()) {
+            throw new InadmissibleFormulaException(
+                    last.span(), "the argument of " + c.function().text() + " must be linear in u");
+        }
+        NormalForm.Linear linear = form.get();
         return switch (c.function()) {
             case GAMMA -> gamma(linear, last);
             case DIGAMMA -> polygamma(0, linear, last);
@@ -181,15 +188,21 @@ final class NormalFormCompiler {
     }
 
     private static NormalForm sine(ExactConstant constant, ExactConstant slope, Formula place) {
-        return NormalForm.sine(constant, slope)
-                .orElseThrow(() -> new InadmissibleFormulaException(
-                        place.span(), "the slope of u in a sine or cosine must be rational or a multiple of pi"));
+        Optional<NormalForm> sine = NormalForm.sine(constant, slope);
+        if (sine.isEmpty()) {
+            throw new InadmissibleFormulaException(
+                    place.span(), "the slope of u in a sine or cosine must be rational or a multiple of pi");
+        }
+        return sine.get();
     }
 
     private static Rational rational(ExactConstant value, Formula place) {
-        return value.asRational()
-                .orElseThrow(() -> new InadmissibleFormulaException(
-                        place.span(), "a gamma or hypergeometric function needs an argument s + b*u with rational s and b"));
+        Optional<Rational> rational = value.asRational();
+        if (rational.isEmpty()) {
+            throw new InadmissibleFormulaException(
+                    place.span(), "a gamma or hypergeometric function needs an argument s + b*u with rational s and b");
+        }
+        return rational.get();
     }
 
     private boolean dependsOnVariable(Formula formula) {

@@ -78,7 +78,11 @@ public final class Polynomial {
     }
 
     public Polynomial multiply(Rational factor) {
-        return of(coefficients.stream().map(c -> c.multiply(factor)).toList());
+        List<Rational> product = new ArrayList<>();
+        for (Rational c : coefficients) {
+            product.add(c.multiply(factor));
+        }
+        return of(product);
     }
 
     /** @throws DomainException if the degree of the product is above {@link #LARGEST_DEGREE} */

@@ -30,7 +30,11 @@ final class PolynomialGcd {
             a = b;
             b = remainder;
         }
-        return Polynomial.of(a.stream().map(Rational::of).toList()).monic();
+        List<Rational> result = new ArrayList<>();
+        for (BigInteger c : a) {
+            result.add(Rational.of(c));
+        }
+        return Polynomial.of(result).monic();
     }
 
     /** The multiple with coprime integer coefficients. */
@@ -55,7 +59,11 @@ final class PolynomialGcd {
             }
         }
         BigInteger divisor = content;
-        return coefficients.stream().map(c -> c.divide(divisor)).toList();
+        List<BigInteger> quotients = new ArrayList<>();
+        for (BigInteger c : coefficients) {
+            quotients.add(c.divide(divisor));
+        }
+        return quotients;
     }
 
     /** A multiple of the remainder of a by b, degree below that of b. */
@@ -121,7 +129,11 @@ final class PolynomialGcd {
 
     private static long[] residues(List<BigInteger> coefficients) {
         BigInteger prime = BigInteger.valueOf(PRIME);
-        return coefficients.stream().mapToLong(c -> c.mod(prime).longValue()).toArray();
+        long[] residues = new long[coefficients.size()];
+        for (int k = 0; k < residues.length; k++) {
+            residues[k] = coefficients.get(k).mod(prime).longValue();
+        }
+        return residues;
     }
 
     private static long inverse(long value) {

@@ -60,7 +60,11 @@ final class RealRoots {
         Rational bound = roots.cauchyBound();
         List<Interval> found = new ArrayList<>();
         roots.isolate(bound.negate(), bound, found);
-        return found.stream().map(roots::recogniseRational).toList();
+        List<Interval> recognised = new ArrayList<>();
+        for (Interval interval : found) {
+            recognised.add(roots.recogniseRational(interval));
+        }
+        return recognised;
     }
 
     /** The interval made so narrow that it holds none of the roots of another factor. */

@@ -4,10 +4,14 @@ import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.Set;
 
 /**
  * The transcendental part of one term of a {@link NormalForm}:
  * constant e^(slope u) prod Gamma(shift + b u)^m prod psi^(n)(shift + b u)^k prod W^(n)(shift + b u)^k prod sin(c + b u)^k.
+ *
+ * <p>Equality is that of the components. It is written out because the one that comes with a record is put together when
+ * it is first used, which takes longer than an ordinary list of coefficients.
  *
  * @param constant   a single product of constants, with coefficient one
  * @param slope      coefficient of u in the exponent
@@ -26,10 +30,30 @@ record TermKey(
     static final TermKey ONE = exponential(ExactConstant.ZERO);
 
     /** Gamma(shift + slope u) with shift in (0,1] and slope not zero. */
-    record GammaFactor(Rational slope, Rational shift) {}
+    record GammaFactor(Rational slope, Rational shift) {
+        @Override
+        public boolean equals(Object other) {
+            return other instanceof GammaFactor g && slope.equals(g.slope) && shift.equals(g.shift);
+        }
+
+        @Override
+        public int hashCode() {
+            return 31 * slope.hashCode() + shift.hashCode();
+        }
+    }
 
     /** psi^(n)(shift + slope u) with shift in (0,1] and slope not zero. */
-    record PolygammaFactor(int n, Rational slope, Rational shift) {}
+    record PolygammaFactor(int n, Rational slope, Rational shift) {
+        @Override
+        public boolean equals(Object other) {
+            return other instanceof PolygammaFactor p && n == p.n && slope.equals(p.slope) && shift.equals(p.shift);
+        }
+
+        @Override
+        public int hashCode() {
+            return 31 * (31 * n + slope.hashCode()) + shift.hashCode();
+        }
+    }
 
     /** W^(n)(shift + slope u) with shift in (0,1] and slope not zero. */
     record UnitFactor(int n, Rational slope, Rational shift) {}
@@ -82,8 +106,10 @@ record TermKey(
             return left.isEmpty() ? right : left;
         }
         Map<F, Integer> result = new HashMap<>(left);
-        right.forEach((factor, power) -> result.merge(factor, power, Integer::sum));
-        result.values().removeIf(power -> power == 0);
+        for (Map.Entry<F, Integer> factor : right.entrySet()) {
+            result.put(factor.getKey(), result.getOrDefault(factor.getKey(), 0) + factor.getValue());
+        }
+        result.values().removeAll(Set.of(0));
         return result;
     }
 
@@ -99,11 +125,31 @@ record TermKey(
     /** The inverse of the parts that depend on u, with constant one. */
     TermKey inverseFunctions() {
         Map<GammaFactor, Integer> inverted = new HashMap<>();
-        gammas.forEach((factor, power) -> inverted.put(factor, -power));
+        for (Map.Entry<GammaFactor, Integer> factor : gammas.entrySet()) {
+            inverted.put(factor.getKey(), -factor.getValue());
+        }
         return gammas(slope.negate(), inverted);
     }
 
     TermKey withConstant(ExactConstant value) {
         return new TermKey(value, slope, gammas, polygammas, units, sines);
+    }
+
+    @Override
+    public boolean equals(Object other) {
+        return other instanceof TermKey k
+                && constant.equals(k.constant)
+                && slope.equals(k.slope)
+                && gammas.equals(k.gammas)
+                && polygammas.equals(k.polygammas)
+                && units.equals(k.units)
+                && sines.equals(k.sines);
+    }
+
+    @Override
+    public int hashCode() {
+        int others = 31 * (31 * polygammas.hashCode() + units.hashCode()) + sines.hashCode();
+        int functions = 31 * gammas.hashCode() + others;
+        return 31 * (31 * constant.hashCode() + slope.hashCode()) + functions;
     }
 }

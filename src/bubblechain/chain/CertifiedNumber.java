@@ -32,9 +32,13 @@ public record CertifiedNumber(String text, boolean isZero, boolean isDecimal) {
 
     /** From a ball, if its digits are certain or it is exactly zero. */
     static Optional<CertifiedNumber> ifDecided(Ball ball, int digits) {
-        return ball.isZero()
-                ? Optional.of(new CertifiedNumber("0", true, true))
-                : ball.toDecimal(digits).map(text -> new CertifiedNumber(text, false, true));
+        Optional<String> text = ball.toDecimal(digits);
+        return text.isPresent() ? Optional.of(ofDigits(text.get())) : Optional.empty();
+    }
+
+    /** From certain digits. */
+    static CertifiedNumber ofDigits(String text) {
+        return new CertifiedNumber(text, text.equals("0"), true);
     }
 
     /** From a ball alone. @throws PrecisionException if its digits are not certain and zero is excluded */

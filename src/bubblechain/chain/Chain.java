@@ -4,6 +4,7 @@ import bubblechain.exact.Ball;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.kernel.Kernel;
+import bubblechain.series.WeightedSeries;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -95,12 +96,15 @@ public final class Chain {
     /** Balls for c_0 .. c_(loops-1) at a working precision in bits. */
     public List<Ball> balls(int loops, int bits) {
         requireRange("the number of loops", loops, LARGEST_LOOPS);
-        boolean small = loops <= SMALL_LOOPS && bits <= SMALL_BITS;
-        return small
+        return isSmall(loops, bits)
                 ? new BallCoefficients(bits).coefficients(kernel, loops, scales)
                 : new FixedCoefficients(bits)
                         .coefficients(kernel, loops, scales)
                         .orElseGet(() -> new BallCoefficients(bits).coefficients(kernel, loops, scales));
+    }
+
+    private static boolean isSmall(int loops, int bits) {
+        return loops <= SMALL_LOOPS && bits <= SMALL_BITS;
     }
 
     /**
@@ -126,14 +130,18 @@ public final class Chain {
         int guard = FIRST_GUARD_BITS;
         while (true) {
             int bits = needed + guard;
-            List<Ball> balls = rendering.applyToBalls(balls(loops, bits), bits);
-            List<Optional<CertifiedNumber>> numbers =
-                    balls.stream().map(b -> CertifiedNumber.ifDecided(b, digits)).toList();
+            Attempt attempt = attempt(loops, digits, bits, rendering);
+            List<Optional<CertifiedNumber>> numbers = attempt.numbers();
             int open = undecided(numbers);
             if (open == 0) {
-                return numbers.stream().flatMap(Optional::stream).toList();
+                List<CertifiedNumber> all = new ArrayList<>();
+                for (Optional<CertifiedNumber> number : numbers) {
+                    all.add(number.orElseThrow());
+                }
+                return all;
             }
             // what more bits do not settle is a zero or a tie, which exact arithmetic decides where it is affordable
+            List<Ball> balls = attempt.all();
             int next = Math.max(2 * guard, guard + missing(balls, numbers, needed));
             boolean beyond = next > Math.max(LARGEST_GUARD_BITS, BITS_LOST_PER_ORDER * loops);
             if (beyond || open <= LARGEST_SERIES_LOOPS && guard >= 2 * FIRST_GUARD_BITS) {
@@ -158,6 +166,38 @@ public final class Chain {
     static int firstBits(int loops, int digits) {
         int forLength = 2 * (32 - Integer.numberOfLeadingZeros(loops));
         return (int) Math.ceil(digits * BITS_PER_DIGIT) + forLength + FIRST_GUARD_BITS;
+    }
+
+    /**
+     * What one working precision gives.
+     *
+     * @param numbers those whose digits are certain
+     * @param series  all of them, if the fixed-point route was taken
+     * @param balls   all of them, if it was not
+     */
+    private record Attempt(
+            List<Optional<CertifiedNumber>> numbers, Optional<WeightedSeries> series, List<Ball> balls, int bits) {
+        List<Ball> all() {
+            return series.isPresent() ? series.get().balls(bits) : balls;
+        }
+    }
+
+    private Attempt attempt(int loops, int digits, int bits, Rendering rendering) {
+        List<Optional<CertifiedNumber>> numbers = new ArrayList<>();
+        if (!isSmall(loops, bits) && rendering.isPlain()) {
+            Optional<WeightedSeries> series = new FixedCoefficients(bits).series(kernel, loops, scales);
+            if (series.isPresent()) {
+                for (Optional<String> text : series.get().decimals(digits, bits)) {
+                    numbers.add(text.isPresent() ? Optional.of(CertifiedNumber.ofDigits(text.get())) : Optional.empty());
+                }
+                return new Attempt(numbers, series, List.of(), bits);
+            }
+        }
+        List<Ball> balls = rendering.applyToBalls(balls(loops, bits), bits);
+        for (Ball ball : balls) {
+            numbers.add(CertifiedNumber.ifDecided(ball, digits));
+        }
+        return new Attempt(numbers, Optional.empty(), balls, bits);
     }
 
     /** One more than the index of the last number in doubt; 0 if there is none. */

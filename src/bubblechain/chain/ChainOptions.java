@@ -44,8 +44,8 @@ public record ChainOptions(
             "1", "1", Coupling.A, Normalisation.PREFACTOR, Scheme.MSBAR, OptionalInt.empty(), OptionalInt.empty());
 
     public ChainOptions {
-        nf.ifPresent(ChainOptions::requireFlavours);
-        couplingFlavours.ifPresent(ChainOptions::requireFlavours);
+        requireFlavours(nf);
+        requireFlavours(couplingFlavours);
     }
 
     /** The same with another scale of the coupling. */
@@ -59,9 +59,9 @@ public record ChainOptions(
                 muOverScale, operatorMuOverScale, coupling, normalisation, scheme, OptionalInt.of(value), couplingFlavours);
     }
 
-    private static void requireFlavours(int nf) {
-        if (nf < 0 || nf > LARGEST_NF) {
-            throw new DomainException("the number of flavours lies between 0 and " + LARGEST_NF + ", got " + nf);
+    private static void requireFlavours(OptionalInt nf) {
+        if (nf.isPresent() && (nf.getAsInt() < 0 || nf.getAsInt() > LARGEST_NF)) {
+            throw new DomainException("the number of flavours lies between 0 and " + LARGEST_NF + ", got " + nf.getAsInt());
         }
     }
 
@@ -89,9 +89,8 @@ public record ChainOptions(
         } catch (FormulaException e) {
             throw e.in(option + ": ");
         }
-        boolean positive = value.asRational()
-                .map(q -> q.signum() > 0)
-                .orElseGet(() -> value.toBall(128).isPositive());
+        Optional<Rational> rational = value.asRational();
+        boolean positive = rational.isPresent() ? rational.get().signum() > 0 : value.toBall(128).isPositive();
         if (!positive) {
             throw new DomainException(option + " must be positive, got " + text);
         }

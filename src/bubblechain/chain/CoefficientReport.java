@@ -45,8 +45,12 @@ public final class CoefficientReport {
         if (flavourTerms) {
             report.add(flavourTable(kernel, options, Math.min(loops, LARGEST_FLAVOUR_TERM), digits));
         }
-        kernel.sources().forEach(report::source);
-        kernel.cautions().forEach(report::caution);
+        for (String source : kernel.sources()) {
+            report.source(source);
+        }
+        for (String caution : kernel.cautions()) {
+            report.caution(caution);
+        }
         report.caution(kernel.isAnomalousDimension()
                 ? "The leading-nf part of an anomalous dimension converges; it says nothing about the other terms."
                 : MODEL_CAUTION);
@@ -61,8 +65,12 @@ public final class CoefficientReport {
                 .request("coupling", options.coupling().text())
                 .request("normalise", options.normalisation().text())
                 .request("scheme", options.scheme().text());
-        options.nf().ifPresent(nf -> report.request("nf", Integer.toString(nf)));
-        options.couplingFlavours().ifPresent(nf -> report.request("coupling_nf", Integer.toString(nf)));
+        if (options.nf().isPresent()) {
+            report.request("nf", Integer.toString(options.nf().getAsInt()));
+        }
+        if (options.couplingFlavours().isPresent()) {
+            report.request("coupling_nf", Integer.toString(options.couplingFlavours().getAsInt()));
+        }
     }
 
     private static Table table(List<CertifiedNumber> numbers, List<ExactConstant> closed, String symbol) {

@@ -3,6 +3,7 @@ package bubblechain.chain;
 import bubblechain.analytic.AnalyticFunction;
 import bubblechain.analytic.ArcBound;
 import bubblechain.analytic.FixedExpansion;
+import bubblechain.analytic.FixedValues;
 import bubblechain.analytic.NormalForm;
 import bubblechain.exact.Ball;
 import bubblechain.exact.DomainException;
@@ -12,6 +13,8 @@ import bubblechain.exact.Magnitude;
 import bubblechain.exact.Rational;
 import bubblechain.kernel.Kernel;
 import bubblechain.kernel.SudakovSubtraction;
+import bubblechain.series.FixedSeries;
+import bubblechain.series.WeightedSeries;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -49,118 +52,94 @@ final class FixedCoefficients {
 
     /** Empty if this route cannot take the kernel. */
     Optional<List<Ball>> coefficients(Kernel kernel, int loops, Scales scales) {
-        if (kernel.transform().isEmpty()) {
-            return scales.couplingLog().isZero() ? anomalousDimension(kernel, loops) : Optional.empty();
+        if (kernel.transform().isEmpty() && kernel.sudakov().isPresent()) {
+            return scales.couplingLog().isZero() ? sudakov(kernel.sudakov().get(), loops) : Optional.empty();
         }
-        Optional<NormalForm> form = kernel.transform().get()
-                .timesExponential(scales.couplingLog())
-                .normalForm();
-        Optional<FixedExpansion> transform = form.flatMap(f -> FixedExpansion.of(f, loops, bits));
-        if (transform.isEmpty()) {
+        return series(kernel, loops, scales).map(series -> series.balls(bits));
+    }
+
+    private Optional<List<Ball>> sudakov(SudakovSubtraction subtraction, int loops) {
+        return FixedSudakov.of(subtraction, bits)
+                .flatMap(s -> s.coefficients(loops + 1))
+                .map(s -> s.anomalousDimension(loops));
+    }
+
+    /** The same before the powers and factorials are multiplied in; empty for the anomalous dimension of double logarithms. */
+    Optional<WeightedSeries> series(Kernel kernel, int loops, Scales scales) {
+        try {
+            if (kernel.transform().isPresent()) {
+                return transformed(kernel, kernel.transform().get(), loops, scales);
+            }
+            return kernel.sudakov().isPresent() ? Optional.empty() : anomalous(kernel, loops, scales);
+        } catch (ArithmeticException outOfRange) {
             return Optional.empty();
         }
-        List<Ball> scaled = new ArrayList<>();
-        for (int n = 0; n < loops; n++) {
-            scaled.add(transform.get().scaled(n));
+    }
+
+    private Optional<WeightedSeries> anomalous(Kernel kernel, int loops, Scales scales) {
+        Optional<NormalForm> form = kernel.anomalousDimension().flatMap(AnalyticFunction::normalForm);
+        if (form.isEmpty() || !scales.couplingLog().isZero()) {
+            return Optional.empty();
         }
+        Optional<FixedExpansion> expansion = FixedExpansion.of(form.get(), loops, bits);
+        return expansion.map(e -> new WeightedSeries(e.series(), e.radius(), false));
+    }
+
+    private Optional<WeightedSeries> transformed(
+            Kernel kernel, AnalyticFunction transform, int loops, Scales scales) {
+        Optional<NormalForm> form = transform.timesExponential(scales.couplingLog()).normalForm();
+        Optional<FixedExpansion> expansion =
+                form.isEmpty() ? Optional.empty() : FixedExpansion.of(form.get(), loops, bits);
+        if (expansion.isEmpty()) {
+            return Optional.empty();
+        }
+        Rational radius = expansion.get().radius();
+        FixedSeries series = expansion.get().series();
         if (kernel.isRenormalised()) {
-            Optional<List<Ball>> subtraction = kernel.sudakov().isPresent()
-                    ? doubleSubtraction(kernel.sudakov().get(), loops, scales, transform.get().radius())
+            Optional<FixedSeries> subtraction = kernel.sudakov().isPresent()
+                    ? doubleSubtraction(kernel.sudakov().get(), loops, scales, radius, series.limbs())
                     : subtraction(
-                            kernel.anomalousDimension().orElseThrow(), loops, scales.subtractionLog(),
-                            transform.get().radius());
+                            kernel.anomalousDimension().orElseThrow(), loops, scales.subtractionLog(), radius,
+                            series.limbs());
             if (subtraction.isEmpty()) {
                 return Optional.empty();
             }
-            for (int n = 0; n < loops; n++) {
-                scaled.set(n, scaled.get(n).add(subtraction.get().get(n), bits));
-            }
+            series = series.add(subtraction.get());
         }
-        return Optional.of(weighted(scaled, transform.get().radius()));
-    }
-
-    private Optional<List<Ball>> anomalousDimension(Kernel kernel, int loops) {
-        if (kernel.sudakov().isPresent()) {
-            return FixedSudakov.of(kernel.sudakov().get(), bits)
-                    .flatMap(s -> s.coefficients(loops + 1))
-                    .map(s -> s.anomalousDimension(loops));
-        }
-        return kernel.anomalousDimension()
-                .flatMap(AnalyticFunction::normalForm)
-                .flatMap(form -> FixedExpansion.of(form, loops, bits))
-                .map(expansion -> unscaled(expansion, loops, bits));
-    }
-
-    /** c_n = n! rho^(-n) times the scaled coefficients. */
-    private List<Ball> weighted(List<Ball> scaled, Rational radius) {
-        List<Ball> result = new ArrayList<>();
-        Ball weight = Ball.ONE;
-        for (int n = 0; n < scaled.size(); n++) {
-            if (n > 0) {
-                weight = weight.multiply(Rational.of(n).divide(radius), bits);
-            }
-            result.add(scaled.get(n).multiply(weight, bits));
-        }
-        return result;
-    }
-
-    /** The coefficients themselves. */
-    static List<Ball> unscaled(FixedExpansion expansion, int loops, int bits) {
-        List<Ball> result = new ArrayList<>();
-        Rational step = expansion.radius().inverse();
-        Ball weight = Ball.ONE;
-        for (int n = 0; n < loops; n++) {
-            result.add(expansion.scaled(n).multiply(weight, bits));
-            weight = weight.multiply(step, bits);
-        }
-        return result;
+        return Optional.of(new WeightedSeries(series, radius, true));
     }
 
     /** -(1/rho) [v^(n+1)] e^(L rho v) sum y_k v^k for n = 0 .. loops-1. */
-    private Optional<List<Ball>> subtraction(
-            AnalyticFunction gamma, int loops, ExactConstant log, Rational radius) {
+    private Optional<FixedSeries> subtraction(
+            AnalyticFunction gamma, int loops, ExactConstant log, Rational radius, int limbs) {
         Optional<NormalForm> form = gamma.normalForm();
-        if (form.isEmpty()) {
-            return Optional.empty();
-        }
-        Optional<Tail> tail = tail(form.get(), loops + 1, radius, log);
+        Optional<Tail> tail = form.isEmpty() ? Optional.empty() : tail(form.get(), loops + 1, radius, log);
         if (tail.isEmpty()) {
             return Optional.empty();
         }
         int last = tail.get().last();
         Rational own = FixedExpansion.radius(form.get()).orElse(radius);
-        Optional<FixedExpansion> expansion =
-                FixedExpansion.of(form.get(), stages(last, radius.toDouble() / own.toDouble()));
+        double excess = Math.max(1, radius.toDouble() / own.toDouble());
+        Optional<FixedExpansion> expansion = FixedExpansion.of(form.get(), stages(last, excess), radius);
         if (expansion.isEmpty()) {
             return Optional.empty();
         }
-        List<Ball> y = new ArrayList<>();
-        Ball weight = Ball.ONE.shift(-1);
         Rational ratio = radius.divide(expansion.get().radius());
-        for (int k = 0; k < last; k++) {
-            if (k > 0) {
-                weight = weight.multiply(ratio.divide(k), bits);
-            }
-            y.add(expansion.get().scaled(k).multiply(weight, bits));
-        }
+        FixedSeries y = expansion.get().timesEach(FixedSeries.exponential(Rational.HALF, ratio, last, limbs));
         return Optional.of(subtracted(y, tail.get(), loops, log, radius));
     }
 
     /** -(1/rho) [v^(n+1)] e^(L rho v) sum y_k v^k. */
-    private List<Ball> subtracted(List<Ball> y, Tail tail, int loops, ExactConstant log, Rational radius) {
-        Rational factor = radius.inverse().negate();
-        List<Ball> product = log.isZero() ? y : timesExponential(y, log.multiply(radius), loops + 1);
-        List<Ball> result = new ArrayList<>();
-        for (int n = 0; n < loops; n++) {
-            Ball value = n + 1 < product.size() ? product.get(n + 1) : Ball.ZERO;
-            result.add(value.addError(tail.size()).multiply(factor, bits));
-        }
-        return result;
+    private FixedSeries subtracted(FixedSeries y, Tail tail, int loops, ExactConstant log, Rational radius) {
+        FixedSeries product = log.isZero()
+                ? y
+                : y.window(0, loops + 1).multiply(exponential(log.multiply(radius), loops + 1, y.limbs()));
+        return product.window(1, loops).withError(tail.size()).times(List.of(radius.inverse().negate()));
     }
 
     /** The same with y_k = s_k rho^k/k!, and -g_0 (L rho)^(n+2)/((n+2)! rho^2). */
-    private Optional<List<Ball>> doubleSubtraction(
-            SudakovSubtraction subtraction, int loops, Scales scales, Rational radius) {
+    private Optional<FixedSeries> doubleSubtraction(
+            SudakovSubtraction subtraction, int loops, Scales scales, Rational radius, int limbs) {
         Optional<FixedSudakov> sudakov = FixedSudakov.of(subtraction, bits);
         if (sudakov.isEmpty()) {
             return Optional.empty();
@@ -172,25 +151,48 @@ final class FixedCoefficients {
         if (coefficients.isEmpty()) {
             return Optional.empty();
         }
-        List<Ball> y = new ArrayList<>();
+        FixedValues y = new FixedValues(last, limbs);
         Ball weight = Ball.ONE;
+        int k = 0;
         for (Ball s : coefficients.get().subtraction(scales.operatorLog().toBall(bits), last)) {
-            y.add(s.multiply(weight, bits));
-            weight = weight.multiply(radius.divide(y.size()), bits);
+            y.set(k++, s.multiply(weight, bits));
+            weight = weight.multiply(radius.divide(k), bits);
         }
-        List<Ball> result = subtracted(y, tail, loops, log, radius);
-        if (!log.isZero()) {
-            Ball step = log.multiply(radius).toBall(bits);
-            Ball power = step.multiply(coefficients.get().cusp(), bits).divide(radius.power(2).negate(), bits);
-            for (int n = 0; n < loops; n++) {
-                power = power.multiply(step, bits).divide(Rational.of(n + 2L), bits);
-                result.set(n, result.get(n).add(power, bits));
-            }
-        }
-        return Optional.of(result);
+        FixedSeries result = subtracted(y.series(), tail, loops, log, radius);
+        return Optional.of(log.isZero()
+                ? result
+                : result.add(doubleLogarithm(log.multiply(radius), coefficients.get().cusp(), radius, loops, limbs)));
     }
 
-    /** y_k is worth bits + log2(ratio^k/k!) bits: a few stages of falling precision. */
+    /** -g_0 (L rho)^(n+2)/((n+2)! rho^2). */
+    private FixedSeries doubleLogarithm(ExactConstant log, Ball cusp, Rational radius, int loops, int limbs) {
+        Ball step = log.toBall(bits);
+        Ball power = step.multiply(cusp, bits).divide(radius.power(2).negate(), bits);
+        FixedValues values = new FixedValues(loops, limbs);
+        for (int n = 0; n < loops; n++) {
+            power = power.multiply(step, bits).divide(Rational.of(n + 2L), bits);
+            values.set(n, power);
+        }
+        return values.series();
+    }
+
+    /** e^(l v) as a series. */
+    private FixedSeries exponential(ExactConstant log, int count, int limbs) {
+        int working = FixedSeries.bits(limbs) + GUARD_BITS;
+        Ball step = log.toBall(working);
+        FixedValues values = new FixedValues(count, limbs);
+        Ball power = Ball.ONE;
+        for (int j = 0; j < count; j++) {
+            values.set(j, power);
+            power = power.multiply(step, working).divide(Rational.of(j + 1), working);
+        }
+        return values.series();
+    }
+
+    /**
+     * y_k is worth bits + log2(ratio^k/k!) bits: a few stages of falling precision. Where the scale of the variable is that of
+     * the anomalous part, poles of single gammas may cancel within it and cost about a bit for each order.
+     */
     private List<FixedExpansion.Stage> stages(int last, double ratio) {
         List<FixedExpansion.Stage> stages = new ArrayList<>();
         double worth = bits;
@@ -203,29 +205,11 @@ final class FixedCoefficients {
                 worth += (Math.log(ratio) - Math.log(from)) / LN2;
             }
             if (stages.isEmpty() || from > stages.get(stages.size() - 1).end()) {
-                stages.add(new FixedExpansion.Stage(from, (int) Math.max(start, 0) + GUARD_BITS + from));
+                int spare = GUARD_BITS + (ratio > 1 ? from : 0);
+                stages.add(new FixedExpansion.Stage(from, (int) Math.max(start, 0) + spare));
             }
         }
         return stages;
-    }
-
-    /** [v^n] e^(l v) sum y_k v^k. */
-    private List<Ball> timesExponential(List<Ball> y, ExactConstant log, int count) {
-        Ball step = log.toBall(bits + GUARD_BITS);
-        List<Ball> powers = new ArrayList<>();
-        powers.add(Ball.ONE);
-        for (int j = 1; j < count; j++) {
-            powers.add(powers.get(j - 1).multiply(step, bits).divide(Rational.of(j), bits));
-        }
-        List<Ball> result = new ArrayList<>();
-        for (int n = 0; n < count; n++) {
-            Ball sum = Ball.ZERO;
-            for (int k = 0; k < Math.min(y.size(), n + 1); k++) {
-                sum = sum.add(y.get(k).multiply(powers.get(n - k), bits), bits);
-            }
-            result.add(sum);
-        }
-        return result;
     }
 
     /**

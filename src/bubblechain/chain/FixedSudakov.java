@@ -8,6 +8,7 @@ import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import bubblechain.kernel.SudakovSubtraction;
 import bubblechain.series.BallRing;
+import bubblechain.series.WeightedSeries;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
@@ -58,7 +59,8 @@ record FixedSudakov(NormalForm cusp, NormalForm slope, Rational radius, int bits
     private Optional<List<Ball>> expanded(NormalForm form, int count) {
         return form.isZero()
                 ? Optional.of(Collections.nCopies(count, Ball.ZERO))
-                : FixedExpansion.of(form, count, bits).map(e -> FixedCoefficients.unscaled(e, count, bits));
+                : FixedExpansion.of(form, count, bits)
+                        .map(e -> new WeightedSeries(e.series(), e.radius(), false).balls(bits));
     }
 
     /** {@link SudakovCoefficients#bubbleLogarithm} as balls; 2^k (1 - zeta(k)) is small, so it takes k bits more. */

@@ -49,7 +49,7 @@ public record Rendering(ExactConstant factor, ExactConstant ratio, boolean byFir
         return new Rendering(factor, ratio, normalisation == Normalisation.FIRST);
     }
 
-    private boolean isPlain() {
+    boolean isPlain() {
         return factor.equals(ExactConstant.ONE) && ratio.equals(ExactConstant.ONE) && !byFirst;
     }
 

@@ -109,14 +109,16 @@ final class Answers {
     /** A report with more entries in its request. */
     private static Report asked(Report report, Map<String, String> more) {
         Map<String, String> request = new LinkedHashMap<>(report.request());
-        new TreeMap<>(more).forEach(request::put);
+        request.putAll(new TreeMap<>(more));
         return new Report(
                 report.command(), request, report.normalisation(), report.blocks(), report.sources(), report.cautions());
     }
 
     private static Map<String, String> parameterEntries(FamilyOption family) {
         Map<String, String> entries = new LinkedHashMap<>();
-        family.parameters.forEach((name, value) -> entries.put("parameter_" + name, value));
+        for (Map.Entry<String, String> parameter : family.parameters.entrySet()) {
+            entries.put("parameter_" + parameter.getKey(), parameter.getValue());
+        }
         return entries;
     }
 
@@ -198,7 +200,9 @@ final class Answers {
 
     private static Map<String, Rational> parameters(FamilyOption family) {
         Map<String, Rational> values = new LinkedHashMap<>();
-        family.parameters.forEach((name, value) -> values.put(name, rational("--parameter " + name, value)));
+        for (Map.Entry<String, String> parameter : family.parameters.entrySet()) {
+            values.put(parameter.getKey(), rational("--parameter " + parameter.getKey(), parameter.getValue()));
+        }
         return values;
     }
 

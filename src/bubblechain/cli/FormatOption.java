@@ -2,6 +2,7 @@ package bubblechain.cli;
 
 import bubblechain.output.OutputFormat;
 import java.util.Iterator;
+import java.util.Optional;
 import picocli.CommandLine.ITypeConverter;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.TypeConversionException;
@@ -26,9 +27,12 @@ final class FormatOption {
     static final class Converter implements ITypeConverter<OutputFormat> {
         @Override
         public OutputFormat convert(String name) {
-            return OutputFormat.named(name)
-                    .orElseThrow(() -> new TypeConversionException(
-                            "'" + name + "' is not one of " + String.join(", ", OutputFormat.names())));
+            Optional<OutputFormat> format = OutputFormat.named(name);
+            if (format.isEmpty()) {
+                throw new TypeConversionException(
+                        "'" + name + "' is not one of " + String.join(", ", OutputFormat.names()));
+            }
+            return format.get();
         }
     }
 

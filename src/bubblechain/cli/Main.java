@@ -17,7 +17,7 @@ public final class Main {
         StandardOutput output = new StandardOutput(new FileOutputStream(FileDescriptor.out));
         PrintStream out = new PrintStream(new BufferedOutputStream(output, BUFFER), false, StandardCharsets.UTF_8);
         PrintStream err = new PrintStream(new FileOutputStream(FileDescriptor.err), true, StandardCharsets.UTF_8);
-        CommandFrame frame = new CommandFrame(Subcommands.all(), Terminal.of(System.getenv()));
+        CommandFrame frame = new CommandFrame(Subcommands.named(arguments), Terminal.of(System.getenv()));
         int status = frame.run(out, err, arguments);
         out.flush();
         System.exit(output.status(status, err));
@@ -32,6 +32,6 @@ public final class Main {
      * @return          0 done, 1 the result could not be computed, 2 wrong usage
      */
     public static int run(PrintStream out, PrintStream err, String... arguments) {
-        return new CommandFrame(Subcommands.all(), Terminal.none()).run(out, err, arguments);
+        return new CommandFrame(Subcommands.named(arguments), Terminal.none()).run(out, err, arguments);
     }
 }

@@ -13,12 +13,11 @@ final class BallText {
     private static final Pattern PLUS_MINUS = Pattern.compile("\\s*(?:\\+-|\\+/-|\u00b1)\\s*");
     private static final int MOST_DIGITS = 20;
     private static final int FEW_DIGITS = 4;
-    private static final int SMALLEST_PLAIN_EXPONENT = -6;
     private static final double LOG10_OF_2 = Math.log10(2);
 
     private BallText() {}
 
-    /** digits * 10^(exponent - number of digits + 1), digits signed and of the length asked for. */
+    /** digits * 10^(exponent - number of digits + 1), digits positive and of the length asked for. */
     private record Decimal(BigInteger digits, long exponent) {}
 
     static Ball parse(String text, int bits) {
@@ -59,7 +58,7 @@ final class BallText {
         Dyadic near = (negative ? ball.high() : ball.low()).abs();
         Dyadic far = (negative ? ball.low() : ball.high()).abs();
         return nearest(near, far, digits)
-                .map(d -> format(negative ? new Decimal(d.digits.negate(), d.exponent) : d, digits));
+                .map(d -> DecimalText.of(negative, d.digits.toString(), d.exponent));
     }
 
     /** The positive numbers between two ends rounded to significant digits, ties to even, if all round to the same. */
@@ -101,20 +100,6 @@ final class BallText {
     /** value 2^-lower for lower at most the exponent. */
     private static BigInteger integer(Dyadic value, int lower) {
         return value.mantissa().shiftLeft(Math.toIntExact(value.exponent() - lower));
-    }
-
-    private static String format(Decimal decimal, int digits) {
-        String sign = decimal.digits.signum() < 0 ? "-" : "";
-        String text = decimal.digits.abs().toString();
-        if (decimal.exponent < SMALLEST_PLAIN_EXPONENT || decimal.exponent >= digits) {
-            String fraction = digits == 1 ? "" : "." + text.substring(1);
-            return sign + text.charAt(0) + fraction + "e" + (decimal.exponent < 0 ? "" : "+") + decimal.exponent;
-        }
-        int whole = (int) decimal.exponent + 1;
-        if (whole <= 0) {
-            return sign + "0." + "0".repeat(-whole) + text;
-        }
-        return whole == digits ? sign + text : sign + text.substring(0, whole) + "." + text.substring(whole);
     }
 
     static int certainDigits(Ball ball, int max) {

@@ -9,12 +9,14 @@ import java.math.BigInteger;
  * <p>Numbers are words of 28 bits, the highest first. floor(floor(t/d)/d) = floor(t/d^2), so each sum is off by less than
  * one unit for each k from the sum of the exact quotients.
  */
-final class DivisionSweep {
+public final class DivisionSweep {
     /** Divisors must stay below this. */
-    static final int DIVISOR_LIMIT = 1 << 27;
+    public static final int DIVISOR_LIMIT = 1 << 27;
+
+    /** Bits of a word. */
+    public static final int BITS = 28;
 
     private static final int LANES = 4;
-    private static final int BITS = 28;
     private static final long MASK = (1L << BITS) - 1;
 
     private final int words;
@@ -28,13 +30,32 @@ final class DivisionSweep {
      * @param bits  largest length of a term
      */
     DivisionSweep(int count, int bits) {
-        this.words = bits / BITS + 1;
-        this.sums = new long[count][words];
+        this(new long[count][bits / BITS + 1]);
+    }
+
+    private DivisionSweep(long[][] sums) {
+        this.words = sums[0].length;
+        this.sums = sums;
+    }
+
+    /**
+     * A sweep over terms that are given as words.
+     *
+     * @param count number of sums, at least 1
+     * @param words words of a term
+     */
+    public static DivisionSweep ofWords(int count, int words) {
+        return new DivisionSweep(new long[count][words]);
     }
 
     /** Adds the quotients of one more term; they alternate in sign from one call to the next, the first is positive. */
     void add(BigInteger term, int divisor) {
-        terms[waiting] = wordsOf(term);
+        add(wordsOf(term), divisor);
+    }
+
+    /** The same for a term in words, the highest first, which the caller gives away. */
+    public void add(long[] term, int divisor) {
+        terms[waiting] = term;
         divisors[waiting] = divisor;
         if (++waiting == LANES) {
             run();
@@ -119,11 +140,17 @@ final class DivisionSweep {
         return result;
     }
 
-    /** The sums. */
-    BigInteger[] results() {
+    /** The sums in words, which are not normalised: they have a sign and may be longer than {@link #BITS}. */
+    public long[][] sums() {
         if (waiting > 0) {
             run();
         }
+        return sums;
+    }
+
+    /** The sums. */
+    BigInteger[] results() {
+        sums();
         BigInteger[] results = new BigInteger[sums.length];
         for (int i = 0; i < results.length; i++) {
             results[i] = integer(sums[i]);

@@ -103,7 +103,9 @@ public final class ExactConstant {
             return this;
         }
         Map<Monomial, Rational> sum = new HashMap<>(terms);
-        other.terms.forEach((monomial, coefficient) -> accumulate(sum, monomial, coefficient));
+        for (Map.Entry<Monomial, Rational> term : other.terms.entrySet()) {
+            accumulate(sum, term.getKey(), term.getValue());
+        }
         return wrap(sum);
     }
 
@@ -123,7 +125,9 @@ public final class ExactConstant {
             return this;
         }
         Map<Monomial, Rational> product = new HashMap<>();
-        terms.forEach((monomial, coefficient) -> product.put(monomial, coefficient.multiply(factor)));
+        for (Map.Entry<Monomial, Rational> term : terms.entrySet()) {
+            product.put(term.getKey(), term.getValue().multiply(factor));
+        }
         return new ExactConstant(product);
     }
 
@@ -143,9 +147,11 @@ public final class ExactConstant {
     }
 
     static void accumulate(Map<Monomial, Rational> sum, Monomial monomial, Rational coefficient) {
-        Rational total = sum.merge(monomial, coefficient, Rational::add);
+        Rational total = sum.containsKey(monomial) ? sum.get(monomial).add(coefficient) : coefficient;
         if (total.isZero()) {
             sum.remove(monomial);
+        } else {
+            sum.put(monomial, total);
         }
     }
 
@@ -310,7 +316,9 @@ public final class ExactConstant {
     /** The products of this sum: each a coefficient times a constant of one term with coefficient one. */
     public Map<ExactConstant, Rational> products() {
         Map<ExactConstant, Rational> parts = new HashMap<>();
-        terms.forEach((monomial, coefficient) -> parts.put(of(monomial, Rational.ONE), coefficient));
+        for (Map.Entry<Monomial, Rational> term : terms.entrySet()) {
+            parts.put(of(term.getKey(), Rational.ONE), term.getValue());
+        }
         return parts;
     }
 

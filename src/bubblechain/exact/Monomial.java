@@ -99,7 +99,7 @@ final class Monomial {
                         exponent.add(other.exponent),
                         eulerExponent.add(other.eulerExponent),
                         product,
-                        merged.toArray(Generator[]::new),
+                        merged.toArray(new Generator[0]),
                         mergedPowers),
                 factor);
     }
@@ -125,7 +125,12 @@ final class Monomial {
 
     /** True if 1/this is again a monomial: no Euler constant, zeta value or logarithm in it. */
     boolean isUnit() {
-        return Arrays.stream(generators).allMatch(Generator::isOpaque);
+        for (Generator generator : generators) {
+            if (!generator.isOpaque()) {
+                return false;
+            }
+        }
+        return true;
     }
 
     Product inverse() {
@@ -135,7 +140,10 @@ final class Monomial {
             factor = factor.divide(Rational.of(entry.getKey()));
             inverted.put(entry.getKey(), Rational.ONE.subtract(entry.getValue()));
         }
-        int[] negated = Arrays.stream(powers).map(k -> -k).toArray();
+        int[] negated = powers.clone();
+        for (int i = 0; i < negated.length; i++) {
+            negated[i] = -negated[i];
+        }
         return new Product(
                 new Monomial(-halfPi, exponent.negate(), eulerExponent.negate(), inverted, generators, negated), factor);
     }
@@ -160,7 +168,12 @@ final class Monomial {
     }
 
     boolean isOpaque() {
-        return Arrays.stream(generators).anyMatch(Generator::isOpaque);
+        for (Generator generator : generators) {
+            if (generator.isOpaque()) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** The single generator to the first power, if this monomial is nothing else. */

@@ -53,10 +53,26 @@ public final class Rational implements Comparable<Rational> {
         if (denominator.equals(BigInteger.ONE)) {
             return new Rational(numerator, denominator);
         }
+        if (numerator.bitLength() < Long.SIZE && denominator.bitLength() < Long.SIZE) {
+            return reduced(numerator.longValue(), denominator.longValue());
+        }
         BigInteger gcd = numerator.gcd(denominator);
         return gcd.equals(BigInteger.ONE)
                 ? new Rational(numerator, denominator)
                 : new Rational(numerator.divide(gcd), denominator.divide(gcd));
+    }
+
+    /** Euclid's algorithm in one word: most numbers are small, and big integers start slowly. */
+    private static Rational reduced(long numerator, long denominator) {
+        long gcd = denominator;
+        long rest = numerator % denominator;
+        while (rest != 0) {
+            long next = gcd % rest;
+            gcd = rest;
+            rest = next;
+        }
+        long size = Math.abs(gcd);
+        return new Rational(BigInteger.valueOf(numerator / size), BigInteger.valueOf(denominator / size));
     }
 
     /**

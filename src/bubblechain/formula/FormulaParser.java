@@ -4,6 +4,7 @@ import bubblechain.exact.Rational;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 
 /**
  * Reads a formula by precedence climbing. From loose to tight: {@code + -}, then {@code * /}, then a leading sign, then
@@ -123,8 +124,11 @@ final class FormulaParser {
         if (name.equals("sum")) {
             return finiteSum(start);
         }
-        Function function = Function.named(name)
-                .orElseThrow(() -> FormulaException.at(start, unknownFunction(name)));
+        Optional<Function> known = Function.named(name);
+        if (known.isEmpty()) {
+            throw FormulaException.at(start, unknownFunction(name));
+        }
+        Function function = known.get();
         List<Formula> arguments = new ArrayList<>();
         lexer.next();
         enter();

@@ -1,6 +1,5 @@
 package bubblechain.formula;
 
-import java.util.Arrays;
 import java.util.Locale;
 import java.util.Optional;
 
@@ -34,6 +33,11 @@ public enum Function {
     }
 
     static Optional<Function> named(String name) {
-        return Arrays.stream(values()).filter(f -> f.text().equals(name)).findFirst();
+        for (Function function : values()) {
+            if (function.text().equals(name)) {
+                return Optional.of(function);
+            }
+        }
+        return Optional.empty();
     }
 }

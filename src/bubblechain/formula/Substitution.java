@@ -1,6 +1,7 @@
 package bubblechain.formula;
 
 import java.util.ArrayDeque;
+import java.util.ArrayList;
 import java.util.Deque;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -26,8 +27,10 @@ final class Substitution {
             return new Formula.Binary(b.operator(), apply(b.left(), values), apply(b.right(), values), b.span());
         }
         if (formula instanceof Formula.Call c) {
-            List<Formula> arguments =
-                    c.arguments().stream().map(a -> apply(a, values)).toList();
+            List<Formula> arguments = new ArrayList<>();
+            for (Formula argument : c.arguments()) {
+                arguments.add(apply(argument, values));
+            }
             return new Formula.Call(c.function(), arguments, c.span());
         }
         if (formula instanceof Formula.FiniteSum s) {
@@ -65,7 +68,9 @@ final class Substitution {
             collectNames(b.left(), bound, found);
             collectNames(b.right(), bound, found);
         } else if (formula instanceof Formula.Call c) {
-            c.arguments().forEach(a -> collectNames(a, bound, found));
+            for (Formula argument : c.arguments()) {
+                collectNames(argument, bound, found);
+            }
         } else if (formula instanceof Formula.FiniteSum s) {
             collectNames(s.from(), bound, found);
             collectNames(s.to(), bound, found);
@@ -89,7 +94,9 @@ final class Substitution {
             Level level = open.pop();
             int below = level.formula() instanceof Formula.Name n ? heights.getOrDefault(n.name(), 1) - 1 : 0;
             height = Math.max(height, level.depth() + below);
-            children(level.formula()).forEach(child -> open.push(new Level(child, level.depth() + 1)));
+            for (Formula child : children(level.formula())) {
+                open.push(new Level(child, level.depth() + 1));
+            }
         }
         if (height > FormulaLimits.HEIGHT) {
             throw FormulaException.at(
@@ -123,7 +130,10 @@ final class Substitution {
         } else if (formula instanceof Formula.Binary b) {
             children = size(b.left(), sizes) + size(b.right(), sizes);
         } else if (formula instanceof Formula.Call c) {
-            children = c.arguments().stream().mapToLong(a -> size(a, sizes)).sum();
+            children = 0;
+            for (Formula argument : c.arguments()) {
+                children += size(argument, sizes);
+            }
         } else if (formula instanceof Formula.FiniteSum s) {
             children = size(s.from(), sizes) + size(s.to(), sizes) + size(s.body(), sizes);
         } else {

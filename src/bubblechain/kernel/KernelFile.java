@@ -155,13 +155,12 @@ final class KernelFile {
     }
 
     private boolean flag(String key) {
-        return top.optionalText(key)
-                .map(text -> switch (text) {
-                    case "yes" -> true;
-                    case "no" -> false;
-                    default -> throw top.error(key, key + " is \"yes\" or \"no\", got \"" + text + "\"");
-                })
-                .orElse(false);
+        String text = top.optionalText(key).orElse("no");
+        return switch (text) {
+            case "yes" -> true;
+            case "no" -> false;
+            default -> throw top.error(key, key + " is \"yes\" or \"no\", got \"" + text + "\"");
+        };
     }
 
     /** Keys that belong to other forms. */

@@ -1,8 +1,7 @@
 package bubblechain.kernel;
 
-import java.util.Arrays;
 import java.util.Locale;
-import java.util.stream.Collectors;
+import java.util.StringJoiner;
 
 /** How a kernel file gives its quantity. */
 public enum KernelForm {
@@ -25,10 +24,13 @@ public enum KernelForm {
     }
 
     static KernelForm parse(String text) {
-        return Arrays.stream(values())
-                .filter(f -> f.text.equals(text.toLowerCase(Locale.ROOT)))
-                .findFirst()
-                .orElseThrow(() -> new KernelException("form '" + text + "' is not one of "
-                        + Arrays.stream(values()).map(KernelForm::text).collect(Collectors.joining(", "))));
+        StringJoiner names = new StringJoiner(", ");
+        for (KernelForm form : values()) {
+            if (form.text.equals(text.toLowerCase(Locale.ROOT))) {
+                return form;
+            }
+            names.add(form.text);
+        }
+        throw new KernelException("form '" + text + "' is not one of " + names);
     }
 }

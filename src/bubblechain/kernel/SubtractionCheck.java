@@ -34,8 +34,9 @@ final class SubtractionCheck {
         ExactConstant residue = principal.length() == 0 || principal.lowest() > -1
                 ? ExactConstant.ZERO
                 : principal.coefficients().get(-1 - principal.lowest());
-        Optional<ExactConstant> half = kernel.anomalousDimension()
-                .map(gamma -> gamma.valueAt(Rational.ZERO).divide(Rational.TWO));
+        Optional<ExactConstant> half = kernel.anomalousDimension().isPresent()
+                ? Optional.of(kernel.anomalousDimension().get().valueAt(Rational.ZERO).divide(Rational.TWO))
+                : Optional.empty();
         ExactConstant left = residue.subtract(half.orElse(ExactConstant.ZERO));
         if (!left.isZero()) {
             String reason = half.isEmpty()

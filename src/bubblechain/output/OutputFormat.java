@@ -14,9 +14,12 @@ public enum OutputFormat {
 
     /** The format of that name in any case, or empty. */
     public static Optional<OutputFormat> named(String name) {
-        return Arrays.stream(values())
-                .filter(format -> format.toString().equals(name.toLowerCase(Locale.ROOT)))
-                .findFirst();
+        for (OutputFormat format : values()) {
+            if (format.toString().equals(name.toLowerCase(Locale.ROOT))) {
+                return Optional.of(format);
+            }
+        }
+        return Optional.empty();
     }
 
     /** The names, "text" first. */

@@ -14,7 +14,10 @@ public final class PlainText {
     /** Line ends become line feeds, tabs spaces, other control characters the replacement sign. */
     public static String clean(String text) {
         StringBuilder clean = new StringBuilder(text.length());
-        text.replace("\r\n", "\n").replace('\r', '\n').codePoints().forEach(c -> clean.appendCodePoint(harmless(c)));
+        String lines = text.replace("\r\n", "\n").replace('\r', '\n');
+        for (int at = 0; at < lines.length(); at += Character.charCount(lines.codePointAt(at))) {
+            clean.appendCodePoint(harmless(lines.codePointAt(at)));
+        }
         return clean.toString();
     }
 

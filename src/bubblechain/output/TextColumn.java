@@ -101,13 +101,13 @@ final class TextColumn {
 
     List<String> heading(int width) {
         List<String> lines = Wrapping.words(heading, width);
-        return alignment == Alignment.RIGHT ? lines.stream().map(line -> right(line, width)).toList() : lines;
+        return alignment == Alignment.RIGHT ? right(lines, width) : lines;
     }
 
     List<String> lines(Cell cell, int width) {
         return switch (alignment) {
             case LEFT -> cell.wrapped(width);
-            case RIGHT -> cell.wrapped(width).stream().map(line -> right(line, width)).toList();
+            case RIGHT -> right(cell.wrapped(width), width);
             case POINT -> isNumber(cell) ? atPoint(cell, width) : cell.wrapped(width);
         };
     }
@@ -126,7 +126,11 @@ final class TextColumn {
         return lines;
     }
 
-    private static String right(String text, int width) {
-        return " ".repeat(Math.max(0, width - Wrapping.width(text))) + text;
+    private static List<String> right(List<String> lines, int width) {
+        List<String> moved = new ArrayList<>();
+        for (String line : lines) {
+            moved.add(" ".repeat(Math.max(0, width - Wrapping.width(line))) + line);
+        }
+        return moved;
     }
 }

@@ -39,7 +39,9 @@ final class TextPage {
     }
 
     void lines(List<String> lines) {
-        lines.forEach(this::line);
+        for (String line : lines) {
+            line(line);
+        }
     }
 
     /** A blank line before the next line, if there is one. */

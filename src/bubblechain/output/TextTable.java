@@ -2,12 +2,8 @@ package bubblechain.output;
 
 import java.util.ArrayList;
 import java.util.Collections;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.Predicate;
-import java.util.stream.IntStream;
-import java.util.stream.Stream;
 
 /**
  * Columns with the widths chosen for them: natural if they fit; else columns of words or columns of digits are narrowed
@@ -35,24 +31,50 @@ final class TextTable {
     static Optional<TextTable> fitted(List<String> headings, List<List<Cell>> rows, int room) {
         List<TextColumn> columns = new ArrayList<>();
         for (int c = 0; c < headings.size(); c++) {
-            int column = c;
-            columns.add(TextColumn.of(headings.get(c), rows.stream().map(row -> row.get(column)).toList()));
+            List<Cell> cells = new ArrayList<>();
+            for (List<Cell> row : rows) {
+                cells.add(row.get(c));
+            }
+            columns.add(TextColumn.of(headings.get(c), cells));
         }
-        Predicate<TextColumn> words = column -> !column.holdsDigits();
         List<List<Cell>> sample = rows.subList(0, Math.min(rows.size(), SAMPLE));
-        return Stream.of(words, TextColumn::holdsDigits, any -> true)
-                .flatMap(first -> narrowed(columns, first, room).stream())
-                .min(Comparator.comparingInt(table -> table.height(sample)));
+        Optional<TextTable> lowest = Optional.empty();
+        for (Narrowing first : Narrowing.values()) {
+            Optional<TextTable> table = narrowed(columns, first, room);
+            if (table.isPresent() && (lowest.isEmpty() || table.get().height(sample) < lowest.get().height(sample))) {
+                lowest = table;
+            }
+        }
+        return lowest;
+    }
+
+    /** Which columns are narrowed first. */
+    private enum Narrowing {
+        WORDS,
+        DIGITS,
+        ALL;
+
+        boolean takes(TextColumn column) {
+            return this == ALL || column.holdsDigits() == (this == DIGITS);
+        }
     }
 
     private int height(List<List<Cell>> rows) {
-        return rows.stream().mapToInt(row -> lines(row).size()).sum();
+        int height = 0;
+        for (List<Cell> row : rows) {
+            height += lines(row).size();
+        }
+        return height;
     }
 
     /** Breaks headings, then narrows the widest of the columns to be narrowed first, then the widest of all. */
-    private static Optional<TextTable> narrowed(List<TextColumn> columns, Predicate<TextColumn> first, int room) {
-        int[] widths = columns.stream().mapToInt(TextColumn::natural).toArray();
-        int excess = GAP * (widths.length - 1) + IntStream.of(widths).sum() - room;
+    private static Optional<TextTable> narrowed(List<TextColumn> columns, Narrowing first, int room) {
+        int[] widths = new int[columns.size()];
+        int excess = GAP * (widths.length - 1) - room;
+        for (int c = 0; c < widths.length; c++) {
+            widths[c] = columns.get(c).natural();
+            excess += widths[c];
+        }
         for (int c = 0; c < widths.length && excess > 0; c++) {
             int less = Math.min(excess, widths[c] - columns.get(c).body());
             widths[c] -= less;
@@ -61,7 +83,7 @@ final class TextTable {
         for (; excess > 0; excess--) {
             int widest = widestToNarrow(columns, widths, first);
             if (widest < 0) {
-                widest = widestToNarrow(columns, widths, column -> true);
+                widest = widestToNarrow(columns, widths, Narrowing.ALL);
             }
             if (widest < 0) {
                 return Optional.empty();
@@ -71,10 +93,10 @@ final class TextTable {
         return Optional.of(new TextTable(columns, widths));
     }
 
-    private static int widestToNarrow(List<TextColumn> columns, int[] widths, Predicate<TextColumn> allowed) {
+    private static int widestToNarrow(List<TextColumn> columns, int[] widths, Narrowing allowed) {
         int widest = -1;
         for (int c = 0; c < widths.length; c++) {
-            boolean canShrink = widths[c] > columns.get(c).least() && allowed.test(columns.get(c));
+            boolean canShrink = widths[c] > columns.get(c).least() && allowed.takes(columns.get(c));
             if (canShrink && (widest < 0 || widths[c] > widths[widest])) {
                 widest = c;
             }
@@ -88,7 +110,7 @@ final class TextTable {
         for (int c = 0; c < widths.length; c++) {
             blocks.add(columns.get(c).heading(widths[c]));
         }
-        int height = blocks.stream().mapToInt(List::size).max().orElse(0);
+        int height = tallest(blocks);
         List<List<String>> lowered = new ArrayList<>();
         for (List<String> block : blocks) {
             List<String> padded = new ArrayList<>(Collections.nCopies(height - block.size(), ""));
@@ -116,8 +138,16 @@ final class TextTable {
         return sideBySide(blocks);
     }
 
+    private static int tallest(List<List<String>> blocks) {
+        int height = 0;
+        for (List<String> block : blocks) {
+            height = Math.max(height, block.size());
+        }
+        return height;
+    }
+
     private List<String> sideBySide(List<List<String>> blocks) {
-        int height = blocks.stream().mapToInt(List::size).max().orElse(0);
+        int height = tallest(blocks);
         List<String> lines = new ArrayList<>();
         for (int i = 0; i < height; i++) {
             StringBuilder line = new StringBuilder();

@@ -13,6 +13,7 @@ import java.io.IOException;
 import java.io.Writer;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -63,7 +64,9 @@ public final class TextWriter implements ReportWriter {
         }
         if (!report.request().isEmpty()) {
             List<String> settings = new ArrayList<>();
-            report.request().forEach((key, value) -> settings.add(PlainText.oneLine(key + " = " + value)));
+            for (Map.Entry<String, String> entry : report.request().entrySet()) {
+                settings.add(PlainText.oneLine(entry.getKey() + " = " + entry.getValue()));
+            }
             page.items("  request    ", settings);
         }
     }
@@ -90,7 +93,9 @@ public final class TextWriter implements ReportWriter {
         if (!remarks.isEmpty()) {
             page.gap();
             page.line(title);
-            remarks.forEach(remark -> page.paragraph("  - ", PlainText.oneLine(remark)));
+            for (String remark : remarks) {
+                page.paragraph("  - ", PlainText.oneLine(remark));
+            }
         }
     }
 
@@ -157,15 +162,19 @@ public final class TextWriter implements ReportWriter {
         List<Integer> inner = new ArrayList<>();
         List<Integer> flat = new ArrayList<>();
         for (int c = 0; c < columns.size(); c++) {
-            int column = c;
-            boolean empty = alike.stream().allMatch(one -> one.isEmpty(column));
+            boolean empty = true;
+            for (Table one : alike) {
+                empty &= one.isEmpty(c);
+            }
             if (columns.get(c).place().inText() && !empty) {
                 (hasNested(alike, c) ? inner : flat).add(c);
             }
         }
-        List<String> headings = flat.stream().map(c -> heading(columns.get(c))).toList();
-        List<List<Cell>> cells = new ArrayList<>();
-        alike.forEach(one -> one.rows().forEach(row -> cells.add(flat.stream().map(c -> Cell.of(row.get(c))).toList())));
+        List<String> headings = new ArrayList<>();
+        for (int c : flat) {
+            headings.add(heading(columns.get(c)));
+        }
+        List<List<Cell>> cells = cells(alike, flat);
         Optional<TextTable> fitted = TextTable.fitted(headings, cells, page.room());
         if (fitted.isPresent() && !flat.isEmpty()) {
             page.lines(fitted.get().heading());
@@ -185,7 +194,28 @@ public final class TextWriter implements ReportWriter {
     }
 
     private static boolean hasNested(List<Table> alike, int column) {
-        return alike.stream().flatMap(table -> table.rows().stream()).anyMatch(row -> isNested(row.get(column)));
+        for (Table table : alike) {
+            for (List<Value> row : table.rows()) {
+                if (isNested(row.get(column))) {
+                    return true;
+                }
+            }
+        }
+        return false;
+    }
+
+    private static List<List<Cell>> cells(List<Table> alike, List<Integer> columns) {
+        List<List<Cell>> cells = new ArrayList<>();
+        for (Table table : alike) {
+            for (List<Value> row : table.rows()) {
+                List<Cell> shown = new ArrayList<>();
+                for (int c : columns) {
+                    shown.add(Cell.of(row.get(c)));
+                }
+                cells.add(shown);
+            }
+        }
+        return cells;
     }
 
     private static String heading(Column column) {

@@ -3,8 +3,7 @@ package bubblechain.qcd;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
-import java.util.Arrays;
-import java.util.stream.Collectors;
+import java.util.StringJoiner;
 
 /** The expansion parameter of a series, as a multiple of alpha_s. */
 public enum Coupling {
@@ -67,10 +66,13 @@ public enum Coupling {
 
     /** @throws DomainException if the text is none of the four names */
     public static Coupling parse(String text) {
-        return Arrays.stream(values())
-                .filter(c -> c.text.equals(text))
-                .findFirst()
-                .orElseThrow(() -> new DomainException("coupling '" + text + "' is not one of "
-                        + Arrays.stream(values()).map(Coupling::text).collect(Collectors.joining(", "))));
+        StringJoiner names = new StringJoiner(", ");
+        for (Coupling coupling : values()) {
+            if (coupling.text.equals(text)) {
+                return coupling;
+            }
+            names.add(coupling.text);
+        }
+        throw new DomainException("coupling '" + text + "' is not one of " + names);
     }
 }

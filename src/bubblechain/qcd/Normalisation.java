@@ -1,9 +1,8 @@
 package bubblechain.qcd;
 
 import bubblechain.exact.DomainException;
-import java.util.Arrays;
 import java.util.Locale;
-import java.util.stream.Collectors;
+import java.util.StringJoiner;
 
 /** What is taken out of the coefficients of f = prefactor x sum_{n>=0} c_n a^(n+1). */
 public enum Normalisation {
@@ -32,10 +31,13 @@ public enum Normalisation {
 
     /** @throws DomainException if the text is not one of the three words */
     public static Normalisation parse(String text) {
-        return Arrays.stream(values())
-                .filter(n -> n.text().equals(text))
-                .findFirst()
-                .orElseThrow(() -> new DomainException("normalisation '" + text + "' is not one of "
-                        + Arrays.stream(values()).map(Normalisation::text).collect(Collectors.joining(", "))));
+        StringJoiner names = new StringJoiner(", ");
+        for (Normalisation normalisation : values()) {
+            if (normalisation.text().equals(text)) {
+                return normalisation;
+            }
+            names.add(normalisation.text());
+        }
+        throw new DomainException("normalisation '" + text + "' is not one of " + names);
     }
 }

@@ -1,6 +1,7 @@
 package bubblechain.report;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 
 /**
@@ -15,13 +16,15 @@ public record Table(String key, String title, List<Column> columns, List<List<Va
     public Table {
         Keys.checkOrEmpty(key);
         columns = List.copyOf(columns);
-        rows = rows.stream().map(List::copyOf).toList();
+        rows = copied(rows);
         if (columns.isEmpty()) {
             throw new IllegalArgumentException("table '" + title + "' has no columns");
         }
-        Keys.checkUnique(
-                columns.stream().flatMap(column -> column.keys().stream()).toList(),
-                "the columns of table '" + title + "'");
+        List<String> keys = new ArrayList<>();
+        for (Column column : columns) {
+            keys.addAll(column.keys());
+        }
+        Keys.checkUnique(keys, "the columns of table '" + title + "'");
         for (List<Value> row : rows) {
             if (row.size() != columns.size()) {
                 throw new IllegalArgumentException("a row of table '" + title + "' has " + row.size()
@@ -30,9 +33,22 @@ public record Table(String key, String title, List<Column> columns, List<List<Va
         }
     }
 
+    private static List<List<Value>> copied(List<List<Value>> rows) {
+        List<List<Value>> copies = new ArrayList<>(rows.size());
+        for (List<Value> row : rows) {
+            copies.add(List.copyOf(row));
+        }
+        return Collections.unmodifiableList(copies);
+    }
+
     /** True if no row has a value in that column. */
     public boolean isEmpty(int column) {
-        return rows.stream().allMatch(row -> row.get(column) instanceof Value.Absent);
+        for (List<Value> row : rows) {
+            if (!(row.get(column) instanceof Value.Absent)) {
+                return false;
+            }
+        }
+        return true;
     }
 
     /** A table under construction. */

@@ -2,7 +2,6 @@ package bubblechain.report;
 
 import java.util.List;
 import java.util.Optional;
-import java.util.regex.Pattern;
 
 /** What stands in a cell or behind a label. Numbers are texts whose digits have been decided by their maker. */
 public sealed interface Value {
@@ -15,12 +14,35 @@ public sealed interface Value {
      * @throws IllegalArgumentException if the text is not a decimal number
      */
     record Numeral(String decimal) implements Value {
-        private static final Pattern DECIMAL = Pattern.compile("[+-]?\\d+(?:\\.\\d+)?(?:[eE][+-]?\\d+)?");
-
         public Numeral {
-            if (!DECIMAL.matcher(decimal).matches()) {
+            if (!isDecimal(decimal)) {
                 throw new IllegalArgumentException("'" + decimal + "' is not a decimal number");
             }
+        }
+
+        /** Sign, digits, point and digits, e and signed digits; written out because lists may have millions of digits. */
+        private static boolean isDecimal(String text) {
+            int at = digits(text, sign(text, 0));
+            if (at > 0 && at < text.length() && text.charAt(at) == '.') {
+                at = digits(text, at + 1);
+            }
+            if (at > 0 && at < text.length() && (text.charAt(at) == 'e' || text.charAt(at) == 'E')) {
+                at = digits(text, sign(text, at + 1));
+            }
+            return at == text.length() && at > 0;
+        }
+
+        private static int sign(String text, int at) {
+            return at < text.length() && (text.charAt(at) == '+' || text.charAt(at) == '-') ? at + 1 : at;
+        }
+
+        /** The end of a run of digits; -1 if there is none. */
+        private static int digits(String text, int from) {
+            int at = from;
+            while (at < text.length() && text.charAt(at) >= '0' && text.charAt(at) <= '9') {
+                at++;
+            }
+            return at > from ? at : -1;
         }
     }
 

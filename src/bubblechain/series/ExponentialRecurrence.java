@@ -10,6 +10,7 @@ import java.util.List;
 final class ExponentialRecurrence {
     /** Blocks below this size are not divided. */
     private static final int SMALLEST_BLOCK = 32;
+    private static final int SAMPLES = 12;
     /** Bounds in units of the last place beyond which a better one is worth its time. */
     private static final double LARGE_BOUND = 0x1p12;
 
@@ -37,8 +38,8 @@ final class ExponentialRecurrence {
         this.last = limbs + FixedSeries.GUARD_COLUMNS;
         this.between = FixedSeries.productsBetweenCarries(limbs);
         int length = slopes.length;
-        this.slopeSizes = Arrays.stream(slopes).mapToDouble(FixedDigits::upperBound).toArray();
-        this.slopeZeros = Arrays.stream(slopes).mapToInt(FixedDigits::leadingZeros).toArray();
+        this.slopeSizes = FixedDigits.upperBounds(slopes);
+        this.slopeZeros = FixedDigits.leadingZeros(slopes);
         this.h = new long[length][];
         this.bounds = new double[length];
         this.sizes = new double[length];
@@ -75,9 +76,17 @@ final class ExponentialRecurrence {
             contribute(0, known.length, length);
             block(known.length, length);
         }
-        if (known.length == 1 && knownBounds[0] == 0 && Arrays.stream(bounds).max().orElse(0) > LARGE_BOUND) {
+        if (known.length == 1 && knownBounds[0] == 0 && largestBound() > LARGE_BOUND) {
             improveBounds();
         }
+    }
+
+    private double largestBound() {
+        double largest = 0;
+        for (double bound : bounds) {
+            largest = Math.max(largest, bound);
+        }
+        return largest;
     }
 
     private void improveBounds() {
@@ -90,7 +99,9 @@ final class ExponentialRecurrence {
         }
         factor = ExponentialBounds.factor(slopes, slopeErrors, lost, unit);
         double[] others = ExponentialBounds.errors(upper, factor);
-        Arrays.setAll(bounds, n -> others[n] < bounds[n] ? others[n] : bounds[n]);
+        for (int n = 0; n < bounds.length; n++) {
+            bounds[n] = others[n] < bounds[n] ? others[n] : bounds[n];
+        }
     }
 
     /** One unit for the digits dropped from the sum, one for the division, one for all dropped columns; times n. */
@@ -120,13 +131,7 @@ final class ExponentialRecurrence {
 
     /** Adds what h_from .. h_(middle-1) contribute to the sums of middle .. to-1. */
     private void contribute(int from, int middle, int to) {
-        double work = 0;
-        for (int n = middle; n < to; n++) {
-            for (int i = from; i < middle; i++) {
-                double columns = Math.max(0, last + 1 - slopeZeros[n - i] - zeros[i]);
-                work += columns * columns / 2;
-            }
-        }
+        double work = columnWork(from, middle, to);
         List<long[]> left = Arrays.asList(h).subList(from, middle);
         List<long[]> right = Arrays.asList(slopes).subList(0, to - from);
         TransformProduct.Shape shape = TransformProduct.Shape.of(
@@ -142,6 +147,20 @@ final class ExponentialRecurrence {
                 addColumns(from, middle, n);
             }
         }
+    }
+
+    /** Products of digits that columns would take, from a sample of the pairs. */
+    private double columnWork(int from, int middle, int to) {
+        int stepN = Math.max(1, (to - middle) / SAMPLES);
+        int stepI = Math.max(1, (middle - from) / SAMPLES);
+        double work = 0;
+        for (int n = middle; n < to; n += stepN) {
+            for (int i = from; i < middle; i += stepI) {
+                double columns = Math.max(0, last + 1 - slopeZeros[n - i] - zeros[i]);
+                work += columns * columns / 2;
+            }
+        }
+        return work * stepN * stepI;
     }
 
     private void addDigits(long[] digits, int n) {
@@ -165,12 +184,18 @@ final class ExponentialRecurrence {
         }
     }
 
-    private void finish(int n) {
-        double unit = Math.scalb(1.0, -FixedSeries.bits(limbs));
-        double bound = lost(n);
+    /** sum_k (|s_k| e_(n-k) + d_k (|h_(n-k)| + e_(n-k))), in a method of its own because it is compiled often. */
+    private double errorSum(int n, double unit) {
+        double bound = 0;
         for (int k = 1; k <= n; k++) {
             bound += slopeSizes[k] * bounds[n - k] + slopeErrors[k] * (sizes[n - k] + bounds[n - k] * unit);
         }
+        return bound;
+    }
+
+    private void finish(int n) {
+        double unit = Math.scalb(1.0, -FixedSeries.bits(limbs));
+        double bound = lost(n) + errorSum(n, unit);
         h[n] = FixedDigits.fromSums(sums[n], limbs);
         sums[n] = new long[0];
         FixedDigits.divideSmall(h[n], n);

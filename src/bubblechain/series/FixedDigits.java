@@ -1,5 +1,6 @@
 package bubblechain.series;
 
+import bubblechain.exact.Rational;
 import java.math.BigInteger;
 import java.util.List;
 
@@ -23,6 +24,9 @@ final class FixedDigits {
      * {@link #combination} can make of it, still fits a long.
      */
     static final long LARGEST = 1L << 56;
+
+    private static final int SMALL_BITS = 25;
+    private static final double LARGEST_RATIO = 64;
 
     private FixedDigits() {}
 
@@ -84,6 +88,21 @@ final class FixedDigits {
         }
     }
 
+    /** Adds another number of as many digits. */
+    static void add(long[] target, long[] more) {
+        for (int k = 0; k < target.length; k++) {
+            target[k] += more[k];
+        }
+        normalise(target);
+    }
+
+    /** Adds a small multiple of another number from a digit on, without carries. */
+    static void addMultiple(long[] target, long[] more, int weight, int from) {
+        for (int k = from; k < target.length; k++) {
+            target[k] += weight * more[k];
+        }
+    }
+
     /** Number of zero digits at the start; the length if all are zero. */
     static int leadingZeros(long[] digits) {
         int k = 0;
@@ -91,6 +110,22 @@ final class FixedDigits {
             k++;
         }
         return k;
+    }
+
+    static int[] leadingZeros(long[][] numbers) {
+        int[] zeros = new int[numbers.length];
+        for (int k = 0; k < zeros.length; k++) {
+            zeros[k] = leadingZeros(numbers[k]);
+        }
+        return zeros;
+    }
+
+    static double[] upperBounds(long[][] numbers) {
+        double[] bounds = new double[numbers.length];
+        for (int k = 0; k < bounds.length; k++) {
+            bounds[k] = upperBound(numbers[k]);
+        }
+        return bounds;
     }
 
     /** Not below the bit lengths of the integers behind some numbers. */
@@ -118,6 +153,11 @@ final class FixedDigits {
 
     /** Not below |number|. */
     static double upperBound(long[] digits) {
+        return upperBound(digits, 0);
+    }
+
+    /** Not below |number| 2^shift. */
+    static double upperBound(long[] digits, int shift) {
         int zeros = leadingZeros(digits);
         if (zeros == digits.length) {
             return 0;
@@ -126,7 +166,7 @@ final class FixedDigits {
         double second = zeros + 1 < digits.length ? Math.abs((double) digits[zeros + 1]) : 0;
         // the digits that are left out add less than one unit of the second
         double mantissa = (first + (second + 1) * 0x1p-56) * (1 + 0x1p-50);
-        return Math.max(Math.scalb(mantissa, -BITS * zeros), Double.MIN_VALUE);
+        return Math.max(Math.scalb(mantissa, shift - BITS * zeros), Double.MIN_VALUE);
     }
 
     /**
@@ -173,6 +213,14 @@ final class FixedDigits {
         sums[0] += carry;
     }
 
+    /** The product of two numbers, off by less than two units in the last place. */
+    static long[] product(long[] a, long[] b, int limbs) {
+        int last = limbs + FixedSeries.GUARD_COLUMNS;
+        long[] sums = new long[last + 3];
+        accumulateProduct(a, leadingZeros(a), b, leadingZeros(b), last, sums);
+        return fromSums(sums, limbs);
+    }
+
     /** The column sums as a number of so many limbs, columns beyond the last digit dropped. */
     static long[] fromSums(long[] sums, int limbs) {
         carry(sums);
@@ -205,6 +253,13 @@ final class FixedDigits {
             digits[k] = (upper << WORD) + lower;
         }
         normalise(digits);
+    }
+
+    /** True if {@link #scale} takes this factor. */
+    static boolean scales(Rational factor) {
+        return factor.numerator().bitLength() < SMALL_BITS
+                && factor.denominator().bitLength() < SMALL_BITS
+                && Math.abs(factor.toDouble()) <= LARGEST_RATIO;
     }
 
     /** number p/q in place, digits from {@code from} on (those before are zero); error below two units in the last place. */

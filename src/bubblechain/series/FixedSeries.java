@@ -4,16 +4,19 @@ import bubblechain.exact.Ball;
 import bubblechain.exact.Magnitude;
 import bubblechain.exact.Rational;
 import java.math.BigInteger;
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
+import java.util.function.IntFunction;
 
 /**
  * A power series with fixed-point coefficients at one common scale and an error bound for each, in units of the last
  * place: the fast counterpart of a series of balls. Coefficients should be of order one; a number that grows out of
  * range throws {@link ArithmeticException}, and the caller takes another route. Immutable.
  *
- * <p>Error discipline: every operation carries the same recurrence for the bounds as for the numbers. Bounds are sums
- * of positive doubles; their own rounding, below n 2^-52 for n terms, is covered by the factor {@link #UP}.
+ * <p>Error discipline: every operation carries the same recurrence for the bounds as for the numbers. Bounds are sums of
+ * positive doubles; their own rounding, below n 2^-52 for n terms, is covered by the factor {@link #UP}.
  */
 public final class FixedSeries {
     /** Covers the rounding of a sum of up to 2^20 positive doubles. */
@@ -26,12 +29,12 @@ public final class FixedSeries {
     /** Nanoseconds for one product of digits, to be weighed against a transform. */
     static final double COLUMN_COST = 1.2;
 
-    private static final int SMALL = 1 << 26;
     private static final int MANTISSA_BITS = 52;
 
     private final int limbs;
     private final long[][] digits;
     private final double[] errors;
+
     /** The errors once more as a factor of the series, see {@link ExponentialBounds}; empty if not known. */
     private final double[] factor;
 
@@ -62,7 +65,7 @@ public final class FixedSeries {
     public static FixedSeries of(List<BigInteger> values, double[] errors, int limbs) {
         long[][] digits = new long[values.size()][];
         for (int k = 0; k < digits.length; k++) {
-            digits[k] = FixedDigits.of(values.get(k), limbs);
+            digits[k] = values.get(k).signum() == 0 ? new long[limbs + 1] : FixedDigits.of(values.get(k), limbs);
         }
         return new FixedSeries(limbs, digits, errors.clone());
     }
@@ -72,11 +75,47 @@ public final class FixedSeries {
         return new FixedSeries(limbs, digits, errors);
     }
 
+    /** Nothing but zeros. */
+    public static FixedSeries zero(int length, int limbs) {
+        return new FixedSeries(limbs, new long[length][limbs + 1], new double[length]);
+    }
+
     /** The constant 1. */
     public static FixedSeries one(int length, int limbs) {
         long[][] digits = new long[length][limbs + 1];
         digits[0][0] = 1;
         return new FixedSeries(limbs, digits, new double[length]);
+    }
+
+    /** first e^(ratio v): first ratio^k/k!. */
+    public static FixedSeries exponential(Rational first, Rational ratio, int length, int limbs) {
+        return ratios(first, k -> ratio.divide(k), length, limbs);
+    }
+
+    /** A series whose first coefficient is given, and the quotients of each other one by that before it. */
+    public static FixedSeries ratios(Rational first, IntFunction<Rational> quotient, int length, int limbs) {
+        long[][] digits = new long[length][];
+        double[] errors = new double[length];
+        BigInteger scaled = first.numerator().shiftLeft(bits(limbs)).divide(first.denominator());
+        for (int k = 0; k < length; k++) {
+            if (k == 0) {
+                digits[k] = FixedDigits.of(scaled, limbs);
+                errors[k] = 1;
+                continue;
+            }
+            Rational factor = quotient.apply(k);
+            digits[k] = digits[k - 1].clone();
+            if (FixedDigits.scales(factor)) {
+                FixedDigits.scale(
+                        digits[k], factor.numerator().intValueExact(), factor.denominator().intValueExact(),
+                        FixedDigits.leadingZeros(digits[k]));
+            } else {
+                BigInteger next = FixedDigits.toInteger(digits[k]).multiply(factor.numerator());
+                digits[k] = FixedDigits.of(next.divide(factor.denominator()), limbs);
+            }
+            errors[k] = (errors[k - 1] * Math.abs(factor.toDouble()) + 2) * UP;
+        }
+        return new FixedSeries(limbs, digits, errors);
     }
 
     public int length() {
@@ -112,10 +151,7 @@ public final class FixedSeries {
         double[] bounds = new double[length()];
         for (int k = 0; k < sum.length; k++) {
             sum[k] = digits[k].clone();
-            for (int i = 0; i <= limbs; i++) {
-                sum[k][i] += other.digits[k][i];
-            }
-            FixedDigits.normalise(sum[k]);
+            FixedDigits.add(sum[k], other.digits[k]);
             bounds[k] = (errors[k] + other.errors[k]) * UP;
         }
         return new FixedSeries(limbs, sum, bounds);
@@ -167,143 +203,24 @@ public final class FixedSeries {
         return new FixedSeries(limbs, recurrence.digits(), recurrence.bounds(), recurrence.factor());
     }
 
-    private int productsBetweenCarries() {
-        return productsBetweenCarries(limbs);
-    }
-
     /** Products of numbers of so many limbs that can be added to column sums before they must be carried. */
     static int productsBetweenCarries(int limbs) {
         return Math.max(1, PRODUCTS_BETWEEN_CARRIES / (1 + (limbs + GUARD_COLUMNS) / DIGITS_AT_ONCE));
     }
 
-    private double[] sizes() {
-        return Arrays.stream(digits).mapToDouble(FixedDigits::upperBound).toArray();
-    }
-
-    private int[] leadingZeros() {
-        return Arrays.stream(digits).mapToInt(FixedDigits::leadingZeros).toArray();
-    }
-
     /** The product of two series, digit by digit or by one long convolution, whichever is cheaper. */
     public FixedSeries multiply(FixedSeries other) {
-        int length = Math.min(length(), other.length());
-        double[] bounds = new double[length];
-        double work = productBounds(other, bounds);
-        List<long[]> left = Arrays.asList(digits).subList(0, length);
-        List<long[]> right = Arrays.asList(other.digits).subList(0, length);
-        TransformProduct.Shape shape = TransformProduct.Shape.of(
-                length, 2 * length, FixedDigits.largestBits(left), FixedDigits.largestBits(right));
-        boolean transform = shape.isPossible() && shape.cost() < work * COLUMN_COST;
-        long[][] product = transform
-                ? TransformProduct.multiply(left, right, 0, length, limbs, shape)
-                : columnProduct(other, length);
-        return new FixedSeries(limbs, product, bounds);
+        return SeriesProduct.of(this, other);
     }
 
-    /** Fills in the bounds of a product; returns the number of digit products it would take. */
-    private double productBounds(FixedSeries other, double[] bounds) {
-        double[] left = sizes();
-        double[] right = other.sizes();
-        int[] leftZeros = leadingZeros();
-        int[] rightZeros = other.leadingZeros();
-        double unit = Math.scalb(1.0, -bits(limbs));
-        int last = limbs + GUARD_COLUMNS;
-        double work = 0;
-        for (int n = 0; n < bounds.length; n++) {
-            double bound = 0;
-            for (int k = 0; k <= n; k++) {
-                bound += left[k] * other.errors[n - k] + errors[k] * (right[n - k] + other.errors[n - k] * unit);
-                double columns = Math.max(0, last + 1 - leftZeros[k] - rightZeros[n - k]);
-                work += columns * columns / 2;
-            }
-            bounds[n] = (bound + 2) * UP;
-        }
-        return work;
+    /** The digits, not to be changed. */
+    long[][] digits() {
+        return digits;
     }
 
-    private long[][] columnProduct(FixedSeries other, int length) {
-        long[][] product = new long[length][];
-        int[] leftZeros = leadingZeros();
-        int[] rightZeros = other.leadingZeros();
-        int last = limbs + GUARD_COLUMNS;
-        int between = productsBetweenCarries();
-        long[] sums = new long[last + 3];
-        for (int n = 0; n < length; n++) {
-            Arrays.fill(sums, 0);
-            int products = 0;
-            for (int k = 0; k <= n; k++) {
-                if (leftZeros[k] + rightZeros[n - k] <= last) {
-                    FixedDigits.accumulateProduct(
-                            digits[k], leftZeros[k], other.digits[n - k], rightZeros[n - k], last, sums);
-                    if (++products % between == 0) {
-                        FixedDigits.carry(sums);
-                    }
-                }
-            }
-            product[n] = FixedDigits.fromSums(sums, limbs);
-        }
-        return product;
-    }
-
-    /** True if {@link #timesPolynomial} and {@link #overPolynomial} can take these integers. */
-    static boolean fits(long[] polynomial, long divisor) {
-        if (polynomial.length > FixedDigits.TERMS || divisor <= 0 || divisor >= SMALL) {
-            return false;
-        }
-        double sum = 0;
-        for (long c : polynomial) {
-            if (Math.abs(c) >= SMALL) {
-                return false;
-            }
-            sum += Math.abs((double) c);
-        }
-        return sum / divisor <= 64;
-    }
-
-    /** This times (p_0 + p_1 v + ... )/divisor. */
-    FixedSeries timesSmallPolynomial(long[] polynomial, int divisor) {
-        return combine(polynomial, divisor, digits, errors);
-    }
-
-    /**
-     * This over (p_0 + p_1 v + ...) with p_0 &gt; 0: p_0 g_n = f_n - sum_{i>=1} p_i g_{n-i}, with f = p_0 times this.
-     */
-    FixedSeries overSmallPolynomial(long[] polynomial) {
-        long[] recurrence = polynomial.clone();
-        for (int i = 1; i < recurrence.length; i++) {
-            recurrence[i] = -recurrence[i];
-        }
-        long[][] result = new long[length()][];
-        double[] bounds = new double[length()];
-        return combine(recurrence, (int) polynomial[0], result, bounds);
-    }
-
-    /**
-     * g_n = (w_0 f_n + sum_{i>=1} w_i x_{n-i})/divisor with x either the input or the output itself.
-     */
-    private FixedSeries combine(long[] weights, int divisor, long[][] shifted, double[] shiftedErrors) {
-        boolean recurrence = shifted != digits;
-        long[][] result = recurrence ? shifted : new long[length()][];
-        double[] bounds = recurrence ? shiftedErrors : new double[length()];
-        long[][] terms = new long[FixedDigits.TERMS][];
-        int[] w = new int[FixedDigits.TERMS];
-        for (int i = 0; i < weights.length; i++) {
-            w[i] = (int) weights[i];
-        }
-        for (int n = 0; n < result.length; n++) {
-            terms[0] = digits[n];
-            double bound = Math.abs((double) weights[0]) * errors[n];
-            int count = 1;
-            for (int i = 1; i < weights.length && i <= n; i++) {
-                terms[i] = shifted[n - i];
-                bound += Math.abs((double) weights[i]) * shiftedErrors[n - i];
-                count++;
-            }
-            result[n] = new long[limbs + 1];
-            FixedDigits.combination(result[n], terms, w, count, divisor);
-            bounds[n] = (bound / divisor + 2) * UP;
-        }
-        return new FixedSeries(limbs, result, bounds);
+    /** The error bounds, not to be changed. */
+    double[] errors() {
+        return errors;
     }
 
     /** This times a polynomial over Q in v. */
@@ -320,8 +237,11 @@ public final class FixedSeries {
     public FixedSeries over(List<Rational> polynomial) {
         Rational leading = polynomial.get(0);
         FixedSeries scaled = leading.equals(Rational.ONE) ? this : times(List.of(leading.inverse()));
-        FixedSeries quotient =
-                RationalSteps.over(scaled, polynomial.stream().map(c -> c.divide(leading)).toList());
+        List<Rational> monic = new ArrayList<>();
+        for (Rational c : polynomial) {
+            monic.add(c.divide(leading));
+        }
+        FixedSeries quotient = RationalSteps.over(scaled, monic);
         double[] sizes = RationalSteps.quotientSizes(polynomial, length());
         double[] bounds = new double[length()];
         for (int n = 0; n < bounds.length; n++) {
@@ -355,7 +275,9 @@ public final class FixedSeries {
     private double[] upper(long[][] numbers, double[] bounds) {
         double unit = Math.scalb(1.0, -bits(limbs));
         double[] upper = new double[numbers.length];
-        Arrays.setAll(upper, n -> (FixedDigits.upperBound(numbers[n]) + bounds[n] * unit) * UP);
+        for (int n = 0; n < upper.length; n++) {
+            upper[n] = (FixedDigits.upperBound(numbers[n]) + bounds[n] * unit) * UP;
+        }
         return upper;
     }
 
@@ -378,6 +300,94 @@ public final class FixedSeries {
             bounds[k] = inside ? errors[from] : 0;
         }
         return new FixedSeries(limbs, moved, bounds);
+    }
+
+    /** The coefficients from one power on, as those of v^0, v^1, ...; zeros take the place of what is beyond the end. */
+    public FixedSeries window(int from, int length) {
+        long[][] moved = new long[length][];
+        double[] bounds = new double[length];
+        for (int k = 0; k < length; k++) {
+            boolean inside = from + k < length();
+            moved[k] = inside ? digits[from + k] : new long[limbs + 1];
+            bounds[k] = inside ? errors[from + k] : 0;
+        }
+        return new FixedSeries(limbs, moved, bounds);
+    }
+
+    /** Several series one behind the other; at least one, all with the same limbs. */
+    public static FixedSeries joined(List<FixedSeries> parts) {
+        int length = 0;
+        for (FixedSeries part : parts) {
+            length += part.length();
+        }
+        long[][] digits = new long[length][];
+        double[] errors = new double[length];
+        int at = 0;
+        for (FixedSeries part : parts) {
+            System.arraycopy(part.digits, 0, digits, at, part.length());
+            System.arraycopy(part.errors, 0, errors, at, part.length());
+            at += part.length();
+        }
+        return new FixedSeries(parts.get(0).limbs, digits, errors);
+    }
+
+    /** The same numbers, each with an error larger by so much. */
+    public FixedSeries withError(Magnitude error) {
+        double units = error.scale(bits(limbs)).toDouble();
+        double[] bounds = errors.clone();
+        for (int k = 0; k < bounds.length; k++) {
+            bounds[k] = (bounds[k] + units) * UP;
+        }
+        return new FixedSeries(limbs, digits, bounds);
+    }
+
+    /** The coefficients of this and of another series multiplied one by one, with the limbs of the other. */
+    public FixedSeries timesEach(FixedSeries other) {
+        int length = Math.min(length(), other.length());
+        int last = other.limbs + GUARD_COLUMNS;
+        int excess = bits(other.limbs - limbs);
+        double unit = Math.scalb(1.0, -bits(limbs));
+        long[][] product = new long[length][];
+        double[] bounds = new double[length];
+        long[] sums = new long[last + 3];
+        for (int k = 0; k < length; k++) {
+            Arrays.fill(sums, 0);
+            int zeros = FixedDigits.leadingZeros(digits[k]);
+            FixedDigits.accumulateProduct(
+                    digits[k], zeros, other.digits[k], FixedDigits.leadingZeros(other.digits[k]), last, sums);
+            product[k] = FixedDigits.fromSums(sums, other.limbs);
+            double size = FixedDigits.upperBound(digits[k]) + errors[k] * unit;
+            bounds[k] = (size * other.errors[k] + errors[k] * FixedDigits.upperBound(other.digits[k], excess) + 2) * UP;
+        }
+        return new FixedSeries(other.limbs, product, bounds);
+    }
+
+    /** The coefficient of v^k times 1 - 2^-k, for each k. */
+    FixedSeries timesOneMinusPowersOfHalf() {
+        long[][] result = new long[length()][];
+        double[] bounds = new double[length()];
+        for (int k = 0; k < result.length; k++) {
+            result[k] = digits[k].clone();
+            DigitWords.addShifted(result[k], k, -1);
+            bounds[k] = (errors[k] + 1) * UP;
+        }
+        return new FixedSeries(limbs, result, bounds);
+    }
+
+    /** This times a constant. */
+    public FixedSeries times(Ball constant) {
+        int bits = bits(limbs);
+        long[] factor = FixedDigits.of(constant.scaledMidpoint(bits), limbs);
+        double error = constant.radius().scale(bits).toDouble() + 1;
+        long[][] factors = new long[length()][];
+        double[] factorErrors = new double[length()];
+        Arrays.fill(factors, factor);
+        Arrays.fill(factorErrors, error);
+        return timesEach(new FixedSeries(limbs, factors, factorErrors));
+    }
+
+    Optional<String> decimal(int k, FixedDecimals decimals, int significant) {
+        return decimals.decimal(digits[k], errors[k], significant);
     }
 
     /** The first coefficients only. */

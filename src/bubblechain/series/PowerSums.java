@@ -53,14 +53,12 @@ public final class PowerSums {
         int from = 0;
         for (int k = 1; k <= largest; k++) {
             FixedDigits.scale(power, p, q, from);
-            error = (error * size + 2) * (1 + 0x1p-30);
+            // without a division the step is exact
+            error = (error * size + (q == 1 ? 0 : 2)) * (1 + 0x1p-30);
             while (from <= limbs && power[from] == 0) {
                 from++;
             }
-            long[] sum = sums[k];
-            for (int i = from; i <= limbs; i++) {
-                sum[i] += weight * power[i];
-            }
+            FixedDigits.addMultiple(sums[k], power, weight, from);
             errors[k] += Math.abs((double) weight) * error;
         }
     }

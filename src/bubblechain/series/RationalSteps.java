@@ -14,8 +14,8 @@ final class RationalSteps {
 
     static FixedSeries times(FixedSeries series, List<Rational> polynomial) {
         Integers p = Integers.of(polynomial);
-        if (p.isSmall() && FixedSeries.fits(p.small(), p.divisor.longValueExact())) {
-            return series.timesSmallPolynomial(p.small(), p.divisor.intValueExact());
+        if (p.isSmall() && SmallPolynomials.fits(p.small(), p.divisor.longValueExact())) {
+            return SmallPolynomials.times(series, p.small(), p.divisor.intValueExact());
         }
         List<BigInteger> values = integers(series);
         List<BigInteger> result = new ArrayList<>();
@@ -35,10 +35,14 @@ final class RationalSteps {
 
     static FixedSeries over(FixedSeries series, List<Rational> polynomial) {
         Rational leading = polynomial.get(0);
-        Integers p = Integers.of(polynomial.stream().map(c -> c.divide(leading)).toList());
+        List<Rational> monic = new ArrayList<>();
+        for (Rational c : polynomial) {
+            monic.add(c.divide(leading));
+        }
+        Integers p = Integers.of(monic);
         FixedSeries scaled = leading.equals(Rational.ONE) ? series : times(series, List.of(leading.inverse()));
-        if (p.isSmall() && FixedSeries.fits(p.small(), p.small()[0])) {
-            return scaled.overSmallPolynomial(p.small());
+        if (p.isSmall() && SmallPolynomials.fits(p.small(), p.small()[0])) {
+            return SmallPolynomials.over(scaled, p.small());
         }
         List<BigInteger> values = integers(scaled);
         List<BigInteger> result = new ArrayList<>();
@@ -131,11 +135,19 @@ final class RationalSteps {
         }
 
         boolean isSmall() {
-            return divisor.bitLength() < 30 && numerators.stream().allMatch(n -> n.bitLength() < 30);
+            boolean small = divisor.bitLength() < 30;
+            for (BigInteger numerator : numerators) {
+                small &= numerator.bitLength() < 30;
+            }
+            return small;
         }
 
         long[] small() {
-            return numerators.stream().mapToLong(BigInteger::longValueExact).toArray();
+            long[] result = new long[numerators.size()];
+            for (int i = 0; i < result.length; i++) {
+                result[i] = numerators.get(i).longValueExact();
+            }
+            return result;
         }
     }
 }

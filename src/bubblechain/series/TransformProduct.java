@@ -1,6 +1,5 @@
 package bubblechain.series;
 
-import java.math.BigInteger;
 import java.util.List;
 
 /**
@@ -14,6 +13,9 @@ final class TransformProduct {
     private static final int LARGEST_LOG2_LENGTH = 26;
     private static final int SMALLEST_CHUNK = 4;
     private static final int LARGEST_CHUNK = 26;
+
+    private static final int WORD = 28;
+    private static final long WORD_MASK = (1L << WORD) - 1;
 
     private TransformProduct() {}
 
@@ -77,71 +79,79 @@ final class TransformProduct {
     private static long[] pack(List<long[]> numbers, Shape shape) {
         long[] packed = new long[1 << shape.log2Length()];
         for (int k = 0; k < numbers.size(); k++) {
-            BigInteger value = FixedDigits.toInteger(numbers.get(k));
-            if (value.signum() != 0) {
-                cut(value, packed, k * shape.places(), shape.chunkBits());
-            }
+            cut(numbers.get(k), packed, k * shape.places(), shape.chunkBits());
         }
         return packed;
     }
 
     /** Balanced chunks from the lowest on, as residues. */
-    private static void cut(BigInteger value, long[] packed, int at, int chunkBits) {
-        byte[] bytes = value.toByteArray();
+    private static void cut(long[] digits, long[] packed, int at, int chunkBits) {
         long half = 1L << (chunkBits - 1);
         long mask = (1L << chunkBits) - 1;
+        int zeros = FixedDigits.leadingZeros(digits);
+        int place = at;
+        long carry = 0;
         long window = 0;
         int held = 0;
-        int next = bytes.length - 1;
-        long sign = value.signum() < 0 ? 0xff : 0;
-        long carry = 0;
-        int total = value.bitLength() / chunkBits + 2;
-        for (int j = 0; j < total; j++) {
-            while (held < chunkBits) {
-                window |= (next >= 0 ? bytes[next] & 0xffL : sign) << held;
-                next--;
-                held += Byte.SIZE;
+        for (int i = 2 * digits.length - 1; i >= 2 * zeros; i--) {
+            // words of 28 bits that are not negative; the sign goes on into the next one
+            long digit = digits[i / 2];
+            long word = (i % 2 == 1 ? digit & WORD_MASK : digit >> WORD) + carry;
+            carry = word >> WORD;
+            window += (word & WORD_MASK) << held;
+            for (held += WORD; held >= chunkBits; held -= chunkBits) {
+                long chunk = ((window + half) & mask) - half;
+                window = (window - chunk) >> chunkBits;
+                packed[place++] = chunk < 0 ? chunk + NumberTheoreticTransform.MODULUS : chunk;
             }
-            long chunk = (window & mask) + carry;
-            window >>>= chunkBits;
-            held -= chunkBits;
-            carry = chunk >= half ? 1 : 0;
-            chunk -= carry << chunkBits;
-            packed[at + j] = chunk < 0 ? chunk + NumberTheoreticTransform.MODULUS : chunk;
+        }
+        for (window += carry << held; window != 0; place++) {
+            long chunk = ((window + half) & mask) - half;
+            window = (window - chunk) >> chunkBits;
+            packed[place] = chunk < 0 ? chunk + NumberTheoreticTransform.MODULUS : chunk;
         }
     }
 
-    /** sum_j c_j 2^(j chunkBits) 2^(-56 limbs), as digits. */
+    /** sum_j c_j 2^(j chunkBits) 2^(-2 56 limbs), cut off to digits. */
     private static long[] unpack(long[] packed, int at, int limbs, Shape shape) {
-        int places = shape.places();
         int chunkBits = shape.chunkBits();
-        byte[] bytes = new byte[(places * chunkBits + 2 * Long.SIZE) / Byte.SIZE];
         long mask = (1L << chunkBits) - 1;
+        long[] digits = new long[limbs + 1];
         long carry = 0;
         long window = 0;
         int held = 0;
-        int next = bytes.length - 1;
-        for (int j = 0; j < places; j++) {
+        // number of the next word of 28 bits from the last place of the result; those below it are dropped
+        int next = -2 * limbs;
+        long ones = WORD_MASK;
+        long some = 0;
+        for (int j = 0; j < shape.places(); j++) {
             long c = packed[at + j];
             long t = (c > NumberTheoreticTransform.MODULUS / 2 ? c - NumberTheoreticTransform.MODULUS : c) + carry;
             carry = t >> chunkBits;
-            window |= (t & mask) << held;
+            window += (t & mask) << held;
             held += chunkBits;
-            while (held >= Byte.SIZE) {
-                bytes[next--] = (byte) window;
-                window >>>= Byte.SIZE;
-                held -= Byte.SIZE;
+            if (held >= WORD) {
+                long word = window & WORD_MASK;
+                if (next >= 2 * digits.length) {
+                    ones &= word;
+                    some |= word;
+                } else if (next >= 0) {
+                    digits[limbs - next / 2] += word << WORD * (next & 1);
+                }
+                next++;
+                window >>>= WORD;
+                held -= WORD;
             }
         }
-        // the rest of the last byte and the sign come from the carry
-        window |= carry << held;
-        long rest = carry >> (Long.SIZE - 1);
-        bytes[next--] = (byte) window;
-        long above = held == 0 ? carry >> Byte.SIZE : carry >> (Byte.SIZE - held);
-        while (next >= 0) {
-            bytes[next--] = (byte) above;
-            above = above >> Byte.SIZE | rest << (Long.SIZE - Byte.SIZE);
+        // the sign is all that is left above
+        for (window += carry << held; next < 2 * digits.length; window >>= WORD, next++) {
+            digits[limbs - next / 2] += (window & WORD_MASK) << WORD * (next & 1);
         }
-        return FixedDigits.of(new BigInteger(bytes).shiftRight(limbs * FixedDigits.BITS), limbs);
+        digits[0] += window << FixedDigits.BITS;
+        if (!(window == 0 && some == 0 || window == -1 && ones == WORD_MASK)) {
+            throw new ArithmeticException("a fixed-point number is out of range");
+        }
+        FixedDigits.normalise(digits);
+        return digits;
     }
 }

@@ -80,7 +80,8 @@ final class PlainReader {
         String last = path.remove(path.size() - 1);
         Node.Table parent = top;
         for (String name : path) {
-            Node known = parent.entries().computeIfAbsent(name, k -> Node.Table.empty(startLine, startColumn));
+            parent.entries().putIfAbsent(name, Node.Table.empty(startLine, startColumn));
+            Node known = parent.entries().get(name);
             if (!(known instanceof Node.Table inner)) {
                 throw new NotPlain();
             }

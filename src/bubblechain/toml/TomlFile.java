@@ -9,6 +9,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
+import java.util.Optional;
 
 /** Opens a TOML file or resource of limited size. */
 public final class TomlFile {
@@ -80,8 +81,9 @@ public final class TomlFile {
     /** The top of a text; {@code file} names it in messages. */
     public static TomlSection parse(String text, String file) {
         refuseDeepNesting(text, file);
-        PlainReader plain = new PlainReader(text);
-        Node.Table top = plain.read().orElseGet(() -> general(text, file, plain.position()));
+        PlainReader reader = new PlainReader(text);
+        Optional<Node.Table> plain = reader.read();
+        Node.Table top = plain.isPresent() ? plain.get() : general(text, file, reader.position());
         return new TomlSection(file, "at the top of the file", top);
     }
 

@@ -65,11 +65,16 @@ public final class TomlSection {
 
     /** The text of a key. @throws TomlException if it is missing or not a string */
     public String text(String key) {
-        return optionalText(key).orElseThrow(() -> at(table, "the key '" + key + "' is missing " + section));
+        Optional<String> text = optionalText(key);
+        if (text.isEmpty()) {
+            throw at(table, "the key '" + key + "' is missing " + section);
+        }
+        return text.get();
     }
 
     public Optional<String> optionalText(String key) {
-        return value(key).map(node -> asText(key, node));
+        Optional<Node> value = value(key);
+        return value.isPresent() ? Optional.of(asText(key, value.get())) : Optional.empty();
     }
 
     private Optional<Node> value(String key) {
@@ -114,7 +119,11 @@ public final class TomlSection {
         if (!(value.get() instanceof Node.Listing list)) {
             throw error(key, "'" + key + "' must be a list of strings: " + key + " = [\"...\"]");
         }
-        return list.entries().stream().map(entry -> asText(key, entry)).toList();
+        List<String> texts = new ArrayList<>();
+        for (Node entry : list.entries()) {
+            texts.add(asText(key, entry));
+        }
+        return texts;
     }
 
     /** The tables [[key]], empty if the key is absent. */

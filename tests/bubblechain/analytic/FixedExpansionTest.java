@@ -115,7 +115,7 @@ class FixedExpansionTest {
             List<FixedExpansion.Stage> stages = List.of(
                     new FixedExpansion.Stage(5, 600), new FixedExpansion.Stage(6, 500),
                     new FixedExpansion.Stage(20, 260), new FixedExpansion.Stage(40, 70));
-            FixedExpansion fixed = FixedExpansion.of(Forms.form(formula), stages).orElseThrow();
+            FixedExpansion fixed = FixedExpansion.of(Forms.form(formula), stages, Rational.of(5, 2)).orElseThrow();
             BoundSamples samples = new BoundSamples();
             compare(samples, formula, fixed, 40, 600);
             samples.assertNotWasteful(35, "%s in stages", formula);
@@ -247,9 +247,13 @@ class FixedExpansionTest {
         assertThat(FixedExpansion.of(Forms.form("exp(300*u)/(1-u)"), 300, 100)).isEmpty();
         assertThat(FixedExpansion.of(Forms.form("10^20*u/(1-u)^2+gamma(1-u)*10^20*u"), 4, 100)).isEmpty();
         assertThat(FixedExpansion.of(Forms.form("1/(1-u)^40"), 60, 100)).isEmpty();
-        // a large constant is no matter of range: it multiplies at the end
-        FixedExpansion large = FixedExpansion.of(Forms.form("pi^99*exp(u)/(1-u)"), 3, 200).orElseThrow();
-        Ball first = Forms.constant("pi^99").toBall(200);
-        assertThat(large.scaled(0).overlaps(first)).isTrue();
+        assertThat(FixedExpansion.of(Forms.form("pi^99*exp(u)/(1-u)"), 3, 200)).isEmpty();
+        // a small constant is no matter of precision: there are more limbs for it
+        for (String constant : new String[] {"pi^30", "pi^(-99)"}) {
+            FixedExpansion large = FixedExpansion.of(Forms.form(constant + "*exp(u)/(1-u)"), 3, 200).orElseThrow();
+            Ball first = Forms.constant(constant).toBall(400);
+            assertThat(large.scaled(0).overlaps(first)).isTrue();
+            assertThat(large.scaled(0).accuracyBits()).isGreaterThan(195);
+        }
     }
 }
