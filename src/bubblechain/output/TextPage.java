@@ -1,10 +1,14 @@
 package bubblechain.output;
 
+import java.io.IOException;
+import java.io.Writer;
 import java.util.ArrayList;
 import java.util.List;
 
 /** Lines of text under construction, with a current indentation; no trailing spaces, no two blank lines in a row. */
 final class TextPage {
+    private static final int PIECE = 8_192;
+
     private final StringBuilder text = new StringBuilder();
     private final int width;
     private int indent;
@@ -35,7 +39,14 @@ final class TextPage {
             text.append('\n');
         }
         blankPending = false;
-        text.append((" ".repeat(indent) + line).stripTrailing()).append('\n');
+        int end = line.length();
+        while (Character.isWhitespace(line.charAt(end - 1))) {
+            end--;
+        }
+        for (int i = 0; i < indent; i++) {
+            text.append(' ');
+        }
+        text.append(line, 0, end).append('\n');
     }
 
     void lines(List<String> lines) {
@@ -78,6 +89,16 @@ final class TextPage {
         }
         pieces.addAll(Wrapping.words(current, room));
         hanging(lead, pieces);
+    }
+
+    /** Writes the page piece by piece: a long one is not copied as a whole. */
+    void writeTo(Writer out) throws IOException {
+        char[] piece = new char[PIECE];
+        for (int start = 0; start < text.length(); start += PIECE) {
+            int end = Math.min(text.length(), start + PIECE);
+            text.getChars(start, end, piece, 0);
+            out.write(piece, 0, end - start);
+        }
     }
 
     @Override

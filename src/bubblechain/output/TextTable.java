@@ -62,7 +62,7 @@ final class TextTable {
     private int height(List<List<Cell>> rows) {
         int height = 0;
         for (List<Cell> row : rows) {
-            height += lines(row).size();
+            height += tallest(blocks(row));
         }
         return height;
     }
@@ -131,11 +131,15 @@ final class TextTable {
 
     /** One row, in several lines if a cell is broken. */
     List<String> lines(List<Cell> row) {
+        return sideBySide(blocks(row));
+    }
+
+    private List<List<String>> blocks(List<Cell> row) {
         List<List<String>> blocks = new ArrayList<>();
         for (int c = 0; c < widths.length; c++) {
             blocks.add(columns.get(c).lines(row.get(c), widths[c]));
         }
-        return sideBySide(blocks);
+        return blocks;
     }
 
     private static int tallest(List<List<String>> blocks) {
@@ -148,12 +152,16 @@ final class TextTable {
 
     private List<String> sideBySide(List<List<String>> blocks) {
         int height = tallest(blocks);
-        List<String> lines = new ArrayList<>();
+        List<String> lines = new ArrayList<>(height);
+        StringBuilder line = new StringBuilder();
         for (int i = 0; i < height; i++) {
-            StringBuilder line = new StringBuilder();
+            line.setLength(0);
             for (int c = 0; c < widths.length; c++) {
                 String piece = i < blocks.get(c).size() ? blocks.get(c).get(i) : "";
-                line.append(piece).append(" ".repeat(widths[c] - Wrapping.width(piece) + GAP));
+                line.append(piece);
+                for (int spaces = widths[c] - Wrapping.width(piece) + GAP; spaces > 0; spaces--) {
+                    line.append(' ');
+                }
             }
             lines.add(line.toString());
         }

@@ -49,7 +49,7 @@ public final class TextWriter implements ReportWriter {
         }
         remarks(page, "Cautions", report.cautions());
         remarks(page, "Sources", report.sources().stream().map(TextWriter::source).toList());
-        out.write(page.toString());
+        page.writeTo(out);
     }
 
     /** A key of the bibliography with what it stands for; any other text as it is. */
