@@ -10,6 +10,7 @@ import bubblechain.exact.Rational;
 import bubblechain.exact.UnitHypergeometric;
 import bubblechain.series.BallRing;
 import bubblechain.series.FixedSeries;
+import bubblechain.series.FixedUnit3f2;
 import bubblechain.series.FixedZeta;
 import bubblechain.series.PowerSums;
 import java.util.Arrays;
@@ -38,7 +39,7 @@ final class GammaProducts {
     private final int removal;
     private final BallRing ring;
     private final Map<TermKey, Known> products = new HashMap<>();
-    private final Map<Rational, Ball[]> unit3f2Tables = new HashMap<>();
+    private final Map<UnitFactor, FixedSeries> unit3f2Series = new HashMap<>();
     /** Polygammas want zeta values up to the last order, products of gammas do not. */
     private Optional<BallRing> polygammaRing = Optional.empty();
 
@@ -286,15 +287,36 @@ final class GammaProducts {
         return values.series();
     }
 
-    /** W^(n)(s + b rho v) = sum_k (n+k)!/k! w_(n+k) (b rho)^k v^k, w_k the Taylor coefficients of W at s. */
+    /** W^(n)(s + b rho v) = sum_k (n+k)!/k! w_(n+k) (b rho)^k v^k, w_k (b rho)^k the coefficients of W(s + b rho v). */
     FixedSeries unit3f2(UnitFactor factor, Stage stage) {
         int n = factor.n();
-        Ball[] taylor = unit3f2Tables.computeIfAbsent(
-                factor.shift(), s -> UnitHypergeometric.taylor(s, length + n, bits));
-        if (taylor.length < length + n) {
-            taylor = UnitHypergeometric.taylor(factor.shift(), length + n, bits);
-            unit3f2Tables.put(factor.shift(), taylor);
+        Rational step = factor.slope().multiply(radius);
+        if (!FixedUnit3f2.fits(factor.shift(), step)) {
+            return unit3f2FromBalls(factor).truncated(stage.length(), stage.limbs());
         }
+        // one more limb for what the derivatives lose
+        FixedSeries known = unit3f2Series.get(factor.withoutDerivative());
+        if (known == null || known.length() < stage.length() + n || known.limbs() <= stage.limbs()) {
+            known = FixedUnit3f2.of(factor.shift(), step, stage.length() + n, stage.limbs() + 1);
+            unit3f2Series.put(factor.withoutDerivative(), known);
+        }
+        if (n == 0) {
+            return known.truncated(stage.length(), stage.limbs());
+        }
+        Rational first = Rational.of(ExactFunctions.factorial(n)).multiply(step.power(-n));
+        FixedValues weights = new FixedValues(stage.length(), known.limbs());
+        Rational weight = first;
+        for (int k = 0; k < stage.length(); k++) {
+            weight = k == 0 ? first : weight.multiply(n + k).divide(k);
+            weights.set(k, Ball.of(weight, FixedSeries.bits(known.limbs())));
+        }
+        return known.window(n, stage.length()).timesEach(weights.series()).truncated(stage.length(), stage.limbs());
+    }
+
+    /** The same from balls, for a step beyond the nearest pole of W. */
+    private FixedSeries unit3f2FromBalls(UnitFactor factor) {
+        int n = factor.n();
+        Ball[] taylor = UnitHypergeometric.taylor(factor.shift(), length + n, bits);
         FixedValues values = new FixedValues(length, limbs);
         Rational step = factor.slope().multiply(radius);
         Ball weight = Ball.of(ExactFunctions.factorial(n));
@@ -304,6 +326,6 @@ final class GammaProducts {
             }
             values.set(k, taylor[n + k].multiply(weight, bits));
         }
-        return values.series().truncated(stage.length(), stage.limbs());
+        return values.series();
     }
 }

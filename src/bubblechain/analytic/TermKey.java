@@ -56,7 +56,12 @@ record TermKey(
     }
 
     /** W^(n)(shift + slope u) with shift in (0,1] and slope not zero. */
-    record UnitFactor(int n, Rational slope, Rational shift) {}
+    record UnitFactor(int n, Rational slope, Rational shift) {
+        /** W(shift + slope u) itself. */
+        UnitFactor withoutDerivative() {
+            return n == 0 ? this : new UnitFactor(0, slope, shift);
+        }
+    }
 
     /** sin(constant + slope u) with slope not zero. */
     record SineFactor(ExactConstant constant, Rational slope) {}

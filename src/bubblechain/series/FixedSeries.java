@@ -186,6 +186,21 @@ public final class FixedSeries {
         return new FixedSeries(fewerLimbs, result, bounds);
     }
 
+    /** The same numbers with more limbs; an error is then that many more units. */
+    FixedSeries extended(int moreLimbs) {
+        if (moreLimbs <= limbs) {
+            return this;
+        }
+        long[][] result = new long[length()][];
+        double[] bounds = new double[length()];
+        double scale = Math.scalb(1.0, bits(moreLimbs - limbs));
+        for (int k = 0; k < result.length; k++) {
+            result[k] = Arrays.copyOf(digits[k], moreLimbs + 1);
+            bounds[k] = errors[k] * scale;
+        }
+        return new FixedSeries(moreLimbs, result, bounds);
+    }
+
     /**
      * e^L for a series given by its derivative: this series holds k L_k at v^k, the constant term is not used.
      *
