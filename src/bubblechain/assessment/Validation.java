@@ -4,6 +4,7 @@ import bubblechain.analytic.AnalyticFunction;
 import bubblechain.borel.BorelPlane;
 import bubblechain.borel.BorelPole;
 import bubblechain.chain.Chain;
+import bubblechain.chain.FlavourTerm;
 import bubblechain.chain.Scales;
 import bubblechain.exact.Ball;
 import bubblechain.exact.DomainException;
@@ -143,6 +144,11 @@ public final class Validation {
         if (check instanceof KernelCheck.Coefficient c) {
             ExactConstant found = Chain.of(kernel).exact(c.n() + 1).get(c.n());
             return compared(file, "c_" + c.n(), found, c.value());
+        }
+        if (check instanceof KernelCheck.FlavourTerm f) {
+            ExactConstant coefficient = Chain.of(kernel).exact(f.n() + 1).get(f.n());
+            return compared(
+                    file, "nf^" + f.n() + " term", FlavourTerm.perAlphaOverPi(kernel, f.n(), coefficient), f.value());
         }
         if (check instanceof KernelCheck.Laurent l) {
             Optional<BorelPole> pole = BorelPlane.of(kernel, Scales.NATURAL).poleAt(l.u());

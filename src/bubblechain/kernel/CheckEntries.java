@@ -28,13 +28,9 @@ final class CheckEntries {
         String source = entry.text("source");
         String kind = entry.text("kind");
         return switch (kind) {
-            case "coefficient" -> {
-                int n = entry.integer("n");
-                if (n < 0 || n > LARGEST_INDEX) {
-                    throw entry.error("n", "a checked coefficient has n between 0 and " + LARGEST_INDEX + ", got " + n);
-                }
-                yield new KernelCheck.Coefficient(n, KernelFile.constant(entry, "value"), source);
-            }
+            case "coefficient" -> new KernelCheck.Coefficient(
+                    index(entry), KernelFile.constant(entry, "value"), source);
+            case "nf-term" -> new KernelCheck.FlavourTerm(index(entry), KernelFile.constant(entry, "value"), source);
             case "laurent" -> {
                 int power = entry.integer("power");
                 if (power > -1) {
@@ -45,7 +41,15 @@ final class CheckEntries {
             case "absent" -> new KernelCheck.Absent(entry.rational("u"), source);
             case "same-as" -> new KernelCheck.SameAs(entry.text("kernel"), source);
             default -> throw entry.error(
-                    "kind", "a check is \"coefficient\", \"laurent\", \"absent\" or \"same-as\", got \"" + kind + "\"");
+                    "kind", "a check is \"coefficient\", \"nf-term\", \"laurent\", \"absent\" or \"same-as\", got \"" + kind + "\"");
         };
+    }
+
+    private static int index(TomlSection entry) {
+        int n = entry.integer("n");
+        if (n < 0 || n > LARGEST_INDEX) {
+            throw entry.error("n", "a checked coefficient has n between 0 and " + LARGEST_INDEX + ", got " + n);
+        }
+        return n;
     }
 }

@@ -29,6 +29,7 @@ class ValidationTest {
     @ParameterizedTest
     @CsvSource(delimiter = '|', value = {
         "kind = 'coefficient'; n = '1'; value = '5'  | computed 2, promised 5, difference -3",
+        "kind = 'nf-term'; n = '1'; value = '1'      | computed -1/18, promised 1, difference -19/18",
         "kind = 'laurent'; u = '1'; power = '-1'; value = '1' | computed -1, promised 1, difference -2",
         "kind = 'laurent'; u = '1'; power = '-2'; value = '1' | computed 0, promised 1, difference -1",
         "kind = 'laurent'; u = '3'; power = '-1'; value = '1' | computed 0, promised 1, difference -1",
@@ -43,6 +44,16 @@ class ValidationTest {
         Validation.Finding last = Validation.of(path).get(1);
         assertThat(last.passed()).isFalse();
         assertThat(last.detail()).isEqualTo(detail);
+    }
+
+    /** c_1 = 1 with CF/beta0: CF (-4 TF/3)/16 = -1/18; any other prefactor shows. */
+    @ParameterizedTest
+    @CsvSource({"CF/beta0, true", "1/beta0, false", "4*CF/beta0, false", "pi*CF/beta0, false"})
+    void aWrongPrefactorIsFoundByTheFlavourTerm(String prefactor, boolean passed) {
+        String path = KernelText.of("1/(1-u)")
+                .and("prefactor = \"" + prefactor + "\"\n[[check]]\nsource = \"test\"\nkind = \"nf-term\"\nn = \"1\"\nvalue = \"-1/18\"")
+                .in(folder);
+        assertThat(Validation.of(path).get(1).passed()).isEqualTo(passed);
     }
 
     @Test

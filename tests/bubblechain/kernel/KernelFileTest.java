@@ -140,7 +140,7 @@ class KernelFileTest {
         assertRefused(good.and("[[singularity]]\nu = \"1\"\nkind = \"ir\""),
                 "FILE, line 10, column 1: a singularity is \"IR\" or \"UV\", got \"ir\"");
         assertRefused(good.and("[[check]]\nkind = \"value\"\nsource = \"x\""),
-                "FILE, line 9, column 1: a check is \"coefficient\", \"laurent\", \"absent\" or \"same-as\", got \"value\"");
+                "FILE, line 9, column 1: a check is \"coefficient\", \"nf-term\", \"laurent\", \"absent\" or \"same-as\", got \"value\"");
         assertRefused(good.and("[[check]]\nkind = \"coefficient\"\nsource = \"x\"\nn = \"-1\"\nvalue = \"1\""),
                 "FILE, line 11, column 1: a checked coefficient has n between 0 and 60, got -1");
         assertRefused(good.and("[[check]]\nkind = \"laurent\"\nsource = \"x\"\nu = \"1\"\npower = \"0\"\nvalue = \"1\""),
