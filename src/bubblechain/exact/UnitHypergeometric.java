@@ -189,8 +189,10 @@ public final class UnitHypergeometric {
 
     /**
      * W^(k)(s)/k!, for s in [1, 2). In closed form W(1) = zeta(2), W'(1) = -2 sum H_n/n^2 = -4 zeta(3),
-     * W''(1) = sum (4 H_n^2 + 2 H_n^(2))/n^2 = 41 zeta(4)/2 by the sums of Euler, and W(3/2) = 4 pi - 12, since the residue
-     * of W at 1/2 is pi/2 (the terms of the sum over k go like Gamma(z)^2 k^(-2z)).
+     * W''(1) = sum (4 H_n^2 + 2 H_n^(2))/n^2 = 41 zeta(4)/2,
+     * W'''(1) = -sum (8 H_n^3 + 12 H_n H_n^(2) + 4 H_n^(3))/n^2 = -114 zeta(5) - 12 zeta(2) zeta(3) by the sums of Euler
+     * (the cubic ones: Flajolet and Salvy, Experimental Mathematics 7 (1998) 15, from memory), and W(3/2) = 4 pi - 12,
+     * since the residue of W at 1/2 is pi/2 (the terms of the sum over k go like Gamma(z)^2 k^(-2z)).
      */
     public static ExactConstant coefficient(int k, Rational s) {
         return closedForm(k, s).orElseGet(() -> ExactConstant.opaque(
@@ -204,13 +206,15 @@ public final class UnitHypergeometric {
         if (s.equals(THREE_HALVES) && k == 0) {
             return Optional.of(ExactConstant.PI.multiply(Rational.of(4)).subtract(ExactConstant.of(12)));
         }
-        if (!s.equals(Rational.ONE) || k > 2) {
+        if (!s.equals(Rational.ONE) || k > 3) {
             return Optional.empty();
         }
         return Optional.of(switch (k) {
             case 0 -> ExactFunctions.zeta(2);
             case 1 -> ExactFunctions.zeta(3).multiply(Rational.of(-4));
-            default -> ExactFunctions.zeta(4).multiply(Rational.of(41, 4));
+            case 2 -> ExactFunctions.zeta(4).multiply(Rational.of(41, 4));
+            default -> ExactFunctions.zeta(5).multiply(Rational.of(-19))
+                    .subtract(ExactFunctions.zeta(2).multiply(ExactFunctions.zeta(3)).multiply(Rational.TWO));
         });
     }
 }
