@@ -7,6 +7,7 @@ end point found by the secant method; only numbers on which both agree are writt
 from its first two terms; the Landau pole likewise.
 Thresholds: the logarithms come from expanding the running on both sides in powers of alpha_s (Lie series in ln mu) and
 composing with the constants at mu = mbar(mbar); pole masses by inserting M/mbar into the logarithm at any mu."""
+import functools
 import sys
 from mpmath import mp, mpf
 
@@ -71,7 +72,7 @@ def mass_constants(nl):
     b4 = 16 * mp.polylog(4, f(1, 2)) - f(13, 2) * z4 - 4 * z2 * l2 ** 2 + f(2, 3) * l2 ** 4
     return [mpf(0), f(89, 432),
             f(2951, 2916) - f(407, 864) * z3 + f(5, 4) * z4 - b4 / 36 + n * (f(1327, 11664) - f(2, 27) * z3),
-            mpf('6.850') - mpf('1.466') * n + mpf('0.05616') * n ** 2]
+            mpf('6.850') - mpf('1.466') * n + (f(17671, 124416) - f(5, 864) * z3 - f(7, 96) * z4) * n ** 2]
 
 
 def pole_mass(nl):
@@ -154,12 +155,12 @@ def add(p, q, factor=1):
     r = dict(p)
     for key, c in q.items():
         r[key] = r.get(key, mpf(0)) + factor * c
-    return r
+    return {key: c for key, c in r.items() if c}
 
 
 def multiply(p, q):
     r = {}
-    for (k, j), c in p.items():
+    for (k, j), c in p.items():  # no zeros, else powers of L without a pile up
         for (n, i), d in q.items():
             if k + n <= MAX_POWER:
                 r[k + n, j + i] = r.get((k + n, j + i), mpf(0)) + c * d
@@ -208,6 +209,7 @@ def flow(series, coupling, logarithm):
     return r
 
 
+@functools.lru_cache(maxsize=None)
 def threshold_series(nl, pole):
     """(zeta, zeta_m): {(k, j): coefficient}, a = alpha^(nl+1)(mu)/pi, L = ln(mu^2/mass^2)."""
     bh, bl, gh, gl = beta_function(nl + 1), beta_function(nl), gamma_function(nl + 1), gamma_function(nl)

@@ -21,8 +21,9 @@ import java.util.Map;
  * follow from the renormalisation group on both sides, since these masses do not depend on mu; those of the pole mass from
  * M = mbar (1 + c_1 a + c_2 a^2 + c_3 a^3). All this is exact algebra on the constants; derived here.
  *
- * <p>Errors: z_40 at nl^0 is the decimal 5.170347, good to about 0.001. m_40 is quoted with four digits and untested but
- * for its nl^2 part. The series is the truncated one: nothing is said about higher orders.
+ * <p>Errors: z_40 at nl^0 is the decimal 5.170347, good to about 0.001. m_40 is
+ * quoted as 6.850 - 1.466 nl + 0.05616 nl^2; the nl^2 part is replaced by its exact value from one chain of bubbles, derived
+ * here, which agrees, the others are untested. The series is the truncated one: nothing is said about higher orders.
  *
  * <p>Sources: {@link Decoupling#SOURCES}, {@link #MASS_SOURCES} and {@link #POLE_MASS_SOURCES}, all from memory.
  */
@@ -40,7 +41,7 @@ public final class DecouplingSeries {
             Formula.parse("2951/2916 - 407/864*zeta(3) + 5/4*zeta(4)"
                     + " - (16*polylog(4,1/2) - 13/2*zeta(4) - 4*zeta(2)*ln(2)^2 + 2/3*ln(2)^4)/36"
                     + " + nl*(1327/11664 - 2/27*zeta(3))"),
-            Formula.parse("6.850 - 1.466*nl + 0.05616*nl^2"));
+            Formula.parse("6.850 - 1.466*nl + nl^2*(17671/124416 - 5/864*zeta(3) - 7/96*zeta(4))"));
     /** c_k of M/mbar(mbar) in alpha_s^(nl+1)(mbar)/pi. */
     private static final List<Formula> POLE_MASS = List.of(
             Formula.parse("4/3"),
