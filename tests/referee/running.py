@@ -4,7 +4,7 @@ Usage: python3 running.py OUTPUT.csv
 Equations: dy/d ln mu = -2 sum beta_k y^(k+2), d ln m/d ln mu = -2 sum gamma_k y^(k+1), y = alpha_s/(4 pi), truncated after
 a number of loops. They are integrated twice: by Taylor series in ln mu (mpmath odefun), and by quadrature in y with the
 end point found by the secant method; only numbers on which both agree are written. Lambda by quadrature of the difference
-from its first two terms; the Landau pole likewise.
+from its first two terms, in two forms; the Landau pole likewise.
 Thresholds: the logarithms come from expanding the running on both sides in powers of alpha_s (Lie series in ln mu) and
 composing with the constants at mu = mbar(mbar); pole masses by inserting M/mbar into the logarithm at any mu."""
 import functools
@@ -133,13 +133,22 @@ def run(nf, loops, mu0, alpha0, scales):
 
 
 def lambda_msbar(nf, loops, mu, alpha):
+    """ln(mu/Lambda) = 1/(2 beta0 y) + b ln(beta0 y) + int_0^y [-1/(2 x^2 P) + 1/(2 beta0 x^2) - b/x] dx."""
     beta = beta_function(nf)[:loops] + [mpf(0)]
     y, b = alpha / (4 * mp.pi), beta[1] / (2 * beta[0] ** 2)
-    # subtraction done in 30 more digits, away from 0 by a series-free change of variable x = y t^2
-    mp.dps += 40
-    rest = quadrature(lambda t: 2 * y * t * (-1 / (2 * (y * t * t) ** 2 * polynomial(beta, y * t * t))
-                                             + 1 / (2 * beta[0] * (y * t * t) ** 2) - b / (y * t * t)), mpf(0), mpf(1))
-    mp.dps -= 40
+    # over the denominator 2 beta0^2 x^2 P the numerator is beta0 P - beta0^2 - beta1 x P, which starts at x^2
+    numerator = [beta[0] * c for c in beta] + [mpf(0)]
+    for k, c in enumerate(beta):
+        numerator[k + 1] -= beta[1] * c
+    smooth = lambda x: polynomial(numerator[2:], x) / (2 * beta[0] ** 2 * polynomial(beta, x))
+    rest = quadrature(smooth, mpf(0), y)
+    # the definition itself, from a small cut on, in ln x
+    cut = y * mpf(10) ** -10
+    mp.dps += 25
+    plain = lambda x: -1 / (2 * x ** 2 * polynomial(beta, x)) + 1 / (2 * beta[0] * x ** 2) - b / x
+    direct = quadrature(lambda l: mp.exp(l) * plain(mp.exp(l)), mp.log(cut), mp.log(y))
+    mp.dps -= 25
+    assert abs(direct + smooth(cut / 2) * cut - rest) < mpf(10) ** -24, (nf, loops)
     return mu * mp.exp(-1 / (2 * beta[0] * y) - b * mp.log(beta[0] * y) - rest)
 
 

@@ -2,7 +2,8 @@ package bubblechain.qcd;
 
 import bubblechain.exact.PrecisionException;
 import org.apache.commons.math3.analysis.UnivariateFunction;
-import org.apache.commons.math3.analysis.integration.IterativeLegendreGaussIntegrator;
+import org.apache.commons.math3.analysis.integration.gauss.GaussIntegrator;
+import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
 import org.apache.commons.math3.exception.MathIllegalStateException;
 import org.apache.commons.math3.exception.NumberIsTooSmallException;
 import org.apache.commons.math3.ode.FirstOrderDifferentialEquations;
@@ -19,10 +20,12 @@ final class Evolution {
     private static final double ABSOLUTE_TOLERANCE = 1e-15;
 
     private static final double SMALLEST_STEP = 1e-10;
-    private static final double QUADRATURE_TOLERANCE = 1e-14;
+    private static final double QUADRATURE_TOLERANCE = 3e-14;
     private static final int QUADRATURE_POINTS = 20;
-    private static final int MOST_ITERATIONS = 24;
+    private static final int MOST_BISECTIONS = 50;
     private static final int MOST_EVALUATIONS = 2_000_000;
+
+    private static final GaussIntegrator GAUSS = new GaussIntegratorFactory().legendre(QUADRATURE_POINTS);
 
     private final double[] beta;
     private final double[] gamma;
@@ -108,18 +111,29 @@ final class Evolution {
     }
 
     private static double integral(UnivariateFunction f, double from, double to) {
-        if (from == to) {
-            return 0;
+        return from == to ? 0 : bisected(f, from, to, gauss(f, from, to), MOST_BISECTIONS);
+    }
+
+    private static double gauss(UnivariateFunction f, double from, double to) {
+        double half = (to - from) / 2;
+        double middle = from + half;
+        return half * GAUSS.integrate(t -> f.value(middle + half * t));
+    }
+
+    /** Gauss-Legendre, halving the interval until the value of the halves is that of the whole up to rounding. */
+    private static double bisected(UnivariateFunction f, double from, double to, double whole, int depth) {
+        double middle = from + (to - from) / 2;
+        double left = gauss(f, from, middle);
+        double right = gauss(f, middle, to);
+        double sum = left + right;
+        if (Math.abs(sum - whole) <= QUADRATURE_TOLERANCE * (Math.abs(left) + Math.abs(right))) {
+            return sum;
         }
-        IterativeLegendreGaussIntegrator integrator = new IterativeLegendreGaussIntegrator(
-                QUADRATURE_POINTS, QUADRATURE_TOLERANCE, ABSOLUTE_TOLERANCE, 2, MOST_ITERATIONS);
-        try {
-            double sign = from < to ? 1 : -1;
-            return sign * integrator.integrate(MOST_EVALUATIONS, f, Math.min(from, to), Math.max(from, to));
-        } catch (MathIllegalStateException e) {
+        if (depth == 0) {
             throw new PrecisionException("an integral over the beta function did not reach " + QUADRATURE_TOLERANCE
-                    + " (" + e.getMessage() + ")");
+                    + "; the coupling is too near to a zero of the beta function");
         }
+        return bisected(f, from, middle, left, depth - 1) + bisected(f, middle, to, right, depth - 1);
     }
 
     /** The two equations. */

@@ -32,11 +32,12 @@ public final class LambdaParameter {
         this.lambda = lambda;
     }
 
-    /** Lambda of a coupling. */
+    /** Lambda of a coupling. @throws DomainException if the coupling is so small that Lambda is below any double */
     public static LambdaParameter of(RunningCoupling coupling) {
         double y = coupling.value() / (4 * Math.PI);
         double logarithm = logarithm(BetaFunction.of(coupling.nf(), coupling.loops()), coupling.evolution(), y);
-        return new LambdaParameter(coupling.nf(), coupling.loops(), coupling.scale() * Math.exp(-logarithm));
+        double lambda = Math.exp(Math.log(coupling.scale()) - logarithm);
+        return of(coupling.nf(), coupling.loops(), lambda);
     }
 
     /**
@@ -82,7 +83,11 @@ public final class LambdaParameter {
         return lambda * Math.pow(2, -exponent(BetaFunction.of(nf, loops)));
     }
 
-    /** The coupling with this Lambda; its reference value is 0.2, or half the zero of the beta function if that is less. */
+    /**
+     * The coupling with this Lambda; its reference value is 0.2, or half the zero of the beta function if that is less.
+     *
+     * @throws DomainException if the scale of that value is above any double, as for nf = 16 beyond one loop
+     */
     public RunningCoupling coupling() {
         BetaFunction beta = BetaFunction.of(nf, loops);
         double[] numbers = Numbers.of(beta.coefficients());
