@@ -15,8 +15,8 @@ import java.util.List;
  * zeta_m of the same alpha_s^(nl+1). Between thresholds the equations are integrated ({@link RunningCoupling}).
  * Running with n loops goes with n - 1 orders here; n = 1 leaves coupling and mass continuous.
  *
- * <p>Error: relative, a few 1e-12, constants taken as printed. The truncation of zeta is another matter: vary the scales
- * of the thresholds ({@link Threshold#atScale}) and the order.
+ * <p>Error: relative, below {@link RunningCoupling#RELATIVE_ACCURACY}, constants taken as printed. The truncation of zeta is
+ * another matter: vary the scales of the thresholds ({@link Threshold#atScale}) and the order.
  */
 public final class FlavourThresholds {
     private static final int MOST_STEPS = 50;
