@@ -13,7 +13,7 @@ import bubblechain.exact.DomainException;
  * not depend on mu. {@link #lambdaT} is the one of the truncated sum rule and of ambiguities,
  * Lambda_t = mu e^(-1/z) z^(-b) (1 + O(z)), z = 2 beta_0 y: Lambda_t = 2^(-b) Lambda_MSbar exactly. Both in GeV.
  *
- * <p>Error: numerical, relative, below {@link RunningCoupling#RELATIVE_ACCURACY} for alpha_s between 0.01 and pi. It grows like
+ * <p>Error: numerical, relative, below {@link RunningCoupling#RELATIVE_ACCURACY} for alpha_s between 0.01 and 1. It grows like
  * 1e-16/(2 beta_0 y) for smaller couplings, and it does not contain missing orders.
  *
  * <p>Source: the definition is the usual one, stated with b in the literature on renormalons (hep-ph/0105008, from memory).

@@ -16,13 +16,14 @@ import org.apache.commons.math3.complex.Complex;
  * one. If the truncated beta function has a zero the coupling tends to it at low scales ({@link #fixedPoint}) and has no Landau
  * pole; a reference value beyond the zero is refused, it would not be asymptotically free.
  *
- * <p>Error: the relative error of a value, reference value and scales taken as exact, is below {@value #RELATIVE_ACCURACY}.
+ * <p>Error: the relative error of a value, reference value and scales taken as exact, is below {@value #RELATIVE_ACCURACY}
+ * for alpha_s up to 1, and below ten times that up to pi, where rounding is amplified a thousandfold.
  * It does not contain the error of the reference value nor the missing orders; see {@link #of} with fewer loops for the latter.
  *
  * @implNote an adaptive Dormand-Prince integration of order 8(5,3) in ln mu for each value, about 0.1 ms.
  */
 public final class RunningCoupling {
-    /** Stated bound of the relative error, for alpha_s up to pi. */
+    /** Stated bound of the relative error, for alpha_s up to 1. */
     public static final double RELATIVE_ACCURACY = 1e-12;
     /** Largest coupling. */
     public static final double LARGEST_ALPHA = Math.PI;
