@@ -58,9 +58,7 @@ public final class AssessmentReport {
                 .request("range", range.toString());
         report.normalisation(options.words(kernel));
         report.add(defaults(kernel, series, nf));
-        Optional<CrossCheck> check = kernel.isAnomalousDimension()
-                ? Optional.empty()
-                : series.map(s -> CrossCheck.of(kernel, s, nf, Optional.empty()));
+        Optional<CrossCheck> check = series.map(s -> CrossCheck.of(kernel, s, nf, Optional.empty()));
         // the result comes first, how it came about afterwards
         check.ifPresent(c -> report.add(CrossCheckReport.comparison(c)));
         add(report, CoefficientReport.of(kernel, options, loops, DIGITS, false, false), "chain_coefficients");

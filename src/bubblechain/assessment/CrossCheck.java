@@ -66,17 +66,17 @@ public record CrossCheck(
      * @param published    the published coefficient at nf
      * @param chain        prefactor x c_(n-1) (beta0/4)^n: naive non-abelianization
      * @param flavourTerm  the chain's nf^(n-1) term
-     * @param publishedFlavourTerm the published nf^(n-1) term
+     * @param publishedFlavourTerm the published nf^(n-1) term; empty if the series is known at one nf only and n > 1
      */
     public record OrderComparison(
             int loops,
             ExactConstant published,
             ExactConstant chain,
             ExactConstant flavourTerm,
-            ExactConstant publishedFlavourTerm) {
+            Optional<ExactConstant> publishedFlavourTerm) {
         /** True if the two nf^(n-1) terms are the same closed form. */
         public boolean flavourTermsEqual() {
-            return flavourTerm.equals(publishedFlavourTerm);
+            return publishedFlavourTerm.filter(flavourTerm::equals).isPresent();
         }
     }
 
@@ -91,10 +91,6 @@ public record CrossCheck(
         if (kernel.theory() != Theory.QCD) {
             throw new DomainException("the kernel " + kernel.name() + " belongs to " + kernel.theory() + ", the series "
                     + series.name() + " to QCD; there is nothing to compare");
-        }
-        if (kernel.isAnomalousDimension()) {
-            throw new DomainException("the kernel " + kernel.name()
-                    + " is an anomalous dimension: its Borel transform has no singularity to compare");
         }
         Rational u = p.divide(2);
         Optional<BorelPole> pole = BorelPlane.of(kernel, Scales.NATURAL).poleAt(u);
@@ -128,14 +124,21 @@ public record CrossCheck(
         ExactConstant unit = series.coupling().inUnitsOf(Coupling.ALPHA_OVER_PI, Rational.ONE);
         List<OrderComparison> rows = new ArrayList<>();
         for (int n = 1; n <= Math.min(series.loops(), chain.size()); n++) {
+            int loops = n;
             rows.add(new OrderComparison(
                     n,
                     published.get(n - 1).multiply(prefactor),
                     naive.get(n - 1),
                     FlavourTerm.perAlphaOverPi(kernel, n - 1, chain.get(n - 1)),
-                    series.leadingFlavourCoefficient(n).multiply(prefactor).multiply(unit.power(n))));
+                    publishedFlavourTerm(series, n).map(c -> c.multiply(prefactor).multiply(unit.power(loops)))));
         }
         return rows;
+    }
+
+    private static Optional<ExactConstant> publishedFlavourTerm(PerturbativeSeries series, int loops) {
+        return series.isForOneFlavourNumber() && loops > 1
+                ? Optional.empty()
+                : Optional.of(series.leadingFlavourCoefficient(loops));
     }
 
     /** N = beta0 K/(4 pi) for a strength K with prefactor. */
@@ -161,9 +164,14 @@ public record CrossCheck(
         return Math.sqrt(variance) * Math.abs(series.prefactor(nf).toBall(BITS).toDouble());
     }
 
-    /** True if every published nf^(n-1) term is the chain's, in closed form. */
+    /** True if every published nf^(n-1) term that is known is the chain's, in closed form. */
     public boolean flavourTermsAgree() {
-        return orders.stream().allMatch(OrderComparison::flavourTermsEqual);
+        return orders.stream().limit(flavourLoops()).allMatch(OrderComparison::flavourTermsEqual);
+    }
+
+    /** Loops through which the published nf^(n-1) terms are known. */
+    public int flavourLoops() {
+        return (int) orders.stream().takeWhile(row -> row.publishedFlavourTerm().isPresent()).count();
     }
 
     /** True if no pole of the chain is as near to the origin: then the sum rule on its first terms has a limit. */
@@ -178,9 +186,15 @@ public record CrossCheck(
         String published = "sum rule on the published series: singularity at u = " + power.divide(2) + ": "
                 + measured.verdict().text();
         String chain = pole.isPresent() ? "chain: simple pole there" : "chain: no pole there";
-        String flavours = flavourTermsAgree()
-                ? "the nf^n terms agree exactly through " + orders.size() + " loops"
-                : "the nf^n terms DIFFER: the kernel does not describe this series";
-        return published + "; " + chain + "; " + flavours;
+        return published + "; " + chain + "; " + flavoursInWords();
+    }
+
+    private String flavoursInWords() {
+        if (!flavourTermsAgree()) {
+            return "the nf^n terms DIFFER: the kernel does not describe this series";
+        }
+        int known = flavourLoops();
+        String agreement = "the nf^n terms agree exactly through " + known + (known == 1 ? " loop" : " loops");
+        return known == orders.size() ? agreement : agreement + ", beyond they are not known (series at one nf only)";
     }
 }

@@ -150,7 +150,8 @@ public final class CrossCheckReport {
                             : CertainDigits.withError(
                                     chain.divide(published, BITS),
                                     Math.abs(error * chain.toDouble() / Math.pow(published.toDouble(), 2))),
-                    number(row.flavourTerm()), Value.flag(row.flavourTermsEqual()));
+                    number(row.flavourTerm()),
+                    row.publishedFlavourTerm().isPresent() ? Value.flag(row.flavourTermsEqual()) : Value.absent());
         }
         return table.build();
     }

@@ -153,8 +153,8 @@ final class Answers {
 
     static Report crosscheck(CrosscheckCommand c) {
         Kernel kernel = KernelLibrary.load(chosen(c.kernel, c.name, "--kernel"), parameters(c.family));
-        String series = c.series != null || c.name != null
-                ? chosen(c.series, c.name, "--series")
+        String series = c.series != null
+                ? c.series
                 : kernel.series().orElseThrow(() -> new DomainException(
                         "the kernel " + kernel.name() + " names no series; give --series"));
         Report report = CrossCheckReport.of(

@@ -30,6 +30,8 @@ import java.util.Set;
  * @param flavours     allowed flavour numbers
  * @param prefactor    prefactor as a formula in {@code nf}, 1 if nothing is taken out
  * @param power        p = 2 u0 of the leading singularity, not zero
+ * @param prescription what was left out or chosen where the series is not unique, in words, such as the scale of an
+ *                     ultrasoft logarithm; empty if there is nothing to choose
  * @param coefficients c_1, c_2, ...
  * @param singularities what is known of each singularity
  * @param sources      bibliography keys of the series as a whole
@@ -45,6 +47,7 @@ public record PerturbativeSeries(
         FlavourRange flavours,
         Formula prefactor,
         Rational power,
+        Optional<String> prescription,
         List<SeriesCoefficient> coefficients,
         List<Singularity> singularities,
         List<String> sources,
@@ -169,9 +172,38 @@ public record PerturbativeSeries(
         return singularities.stream().filter(s -> s.power().equals(p)).findFirst();
     }
 
-    /** What is expanded in what: "M/mbar(mbar) - 1 in alpha_s^(3)(mbar)/pi". */
+    /**
+     * What is expanded in what: "M/mbar(mbar) - 1 in alpha_s^(3)(mbar)/pi", and the prescription if there is one.
+     *
+     * @param couplingFlavours flavours of the coupling
+     */
+    public String inWordsWith(int couplingFlavours) {
+        return quantity + " in " + coupling.words(couplingFlavours, scale)
+                + prescription.map(words -> "; " + words).orElse("");
+    }
+
+    /** The same in the coupling of the series at {@code nf} massless flavours. */
     public String inWords(int nf) {
-        return quantity + " in " + coupling.words(nf + heavyFlavours, scale);
+        return inWordsWith(nf + heavyFlavours);
+    }
+
+    /**
+     * Refuses two series whose numbers cannot be set side by side because they are made with different prescriptions. A
+     * series without a prescription goes with every other.
+     *
+     * @throws DomainException if both have a prescription and the two differ
+     */
+    public void requireSamePrescription(PerturbativeSeries other) {
+        if (prescription.isPresent() && other.prescription.isPresent() && !prescription.equals(other.prescription)) {
+            throw new DomainException("the series '" + name + "' and '" + other.name + "' cannot be compared: the first has the"
+                    + " prescription '" + prescription.get() + "', the second '" + other.prescription.get()
+                    + "'; use series with the same one");
+        }
+    }
+
+    /** True if the coefficients are given at one number of flavours only, so that their terms in nf are not known. */
+    public boolean isForOneFlavourNumber() {
+        return flavours.from() == flavours.to();
     }
 
     /** Bibliography keys of the series and its first {@code loops} coefficients, without duplicates. */

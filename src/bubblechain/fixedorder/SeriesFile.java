@@ -26,7 +26,8 @@ import java.util.function.Function;
  *
  * <p>Keys: {@code name}, {@code title}, {@code quantity}, {@code scale}, {@code coupling} (a, alpha, alpha/pi or
  * alpha/4pi), {@code coupling_flavours} ("nf" or "nf+1"), {@code flavours} (words), {@code flavours_from},
- * {@code flavours_to}, {@code prefactor} (formula in nf, default 1), {@code power}, {@code sources}, {@code cautions};
+ * {@code flavours_to}, {@code prefactor} (formula in nf, default 1), {@code power}, {@code prescription} (words, where the
+ * series is not unique), {@code sources}, {@code cautions};
  * {@code [definitions]} with named formulas, each of which may use those before it; {@code [[coefficient]]} with
  * {@code loops}, {@code value}, {@code errors}, {@code status}, {@code sources}; {@code [[singularity]]} with
  * {@code u}, {@code kind}, {@code operator}, {@code exponent_shift} (a formula or "unknown"), {@code corrections}.
@@ -34,7 +35,7 @@ import java.util.function.Function;
 public final class SeriesFile {
     private static final List<String> TOP_KEYS = List.of(
             "name", "title", "quantity", "scale", "coupling", "coupling_flavours", "flavours", "flavours_from",
-            "flavours_to", "prefactor", "power", "sources", "cautions", "definitions", "coefficient", "singularity");
+            "flavours_to", "prefactor", "power", "prescription", "sources", "cautions", "definitions", "coefficient", "singularity");
     private static final List<String> COEFFICIENT_KEYS = List.of("loops", "value", "errors", "status", "sources");
     private static final List<String> SINGULARITY_KEYS =
             List.of("u", "kind", "operator", "exponent_shift", "corrections");
@@ -88,7 +89,7 @@ public final class SeriesFile {
                     top.text("name"), top.text("title"), top.text("quantity"), top.text("scale"), coupling,
                     heavyFlavours(), flavours,
                     formula(top, "prefactor", top.optionalText("prefactor").orElse("1")),
-                    top.rational("power"), coefficients, singularities(), top.texts("sources"), top.texts("cautions"));
+                    top.rational("power"), top.optionalText("prescription"), coefficients, singularities(), top.texts("sources"), top.texts("cautions"));
         } catch (TomlException placed) {
             throw placed;
         } catch (DomainException e) {

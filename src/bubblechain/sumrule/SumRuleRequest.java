@@ -105,7 +105,7 @@ public record SumRuleRequest(
     public static Builder forSeries(PerturbativeSeries series, int nf) {
         UncertainSeries inY = series.inAlphaOverPi(nf, 0).inUnits(ExactConstant.of(4));
         Builder builder = new Builder(series.name(), inY, BetaFunction.of(nf), series.power());
-        builder.inWords = series.quantity() + " in " + series.coupling().words(nf, series.scale());
+        builder.inWords = series.inWordsWith(nf);
         builder.prefactor = series.prefactor(nf);
         builder.declared = series.singularities();
         builder.cautions = series.cautions();
