@@ -11,7 +11,9 @@ import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
 import bubblechain.fixedorder.PerturbativeSeries;
+import bubblechain.fixedorder.SeriesLibrary;
 import bubblechain.kernel.Kernel;
+import bubblechain.kernel.KernelLibrary;
 import bubblechain.qcd.Coupling;
 import bubblechain.qcd.Normalisation;
 import bubblechain.qcd.Theory;
@@ -139,6 +141,28 @@ public record CrossCheck(
         return series.isForOneFlavourNumber() && loops > 1
                 ? Optional.empty()
                 : Optional.of(series.leadingFlavourCoefficient(loops));
+    }
+
+    /** Names that stand for both a built-in kernel and the built-in series it mimics. */
+    public static List<String> names() {
+        return SeriesLibrary.names().stream()
+                .filter(KernelLibrary::contains)
+                .filter(name -> KernelLibrary.load(name).series().filter(name::equals).isPresent())
+                .toList();
+    }
+
+    /**
+     * Every built-in quantity with both a kernel and a series, each at the leading singularity of its series.
+     *
+     * @param nf massless flavours; a series known at other numbers only is taken at the nearest of them
+     */
+    public static List<CrossCheck> all(int nf) {
+        return names().stream().map(name -> ofBuiltIn(name, nf)).toList();
+    }
+
+    private static CrossCheck ofBuiltIn(String name, int nf) {
+        PerturbativeSeries series = SeriesLibrary.find(name);
+        return of(KernelLibrary.load(name), series, series.flavours().nearest(nf), Optional.empty());
     }
 
     /** N = beta0 K/(4 pi) for a strength K with prefactor. */

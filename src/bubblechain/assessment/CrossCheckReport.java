@@ -75,15 +75,16 @@ public final class CrossCheckReport {
                         CertainDigits.withError(measured.normalisation(measured.loops()), error))
                 .with("published_N_error", "  +- (truncation, scale, input, beta)", CertainDigits.error(error))
                 .with("null_test", "null test on the published series", Value.text(measured.verdict().text()));
-        Optional<Ball> ratio = check.measuredOverChain();
-        if (ratio.isPresent()) {
-            double relative = error * ratio.get().toDouble()
-                    / measured.normalisation(measured.loops()).toDouble();
-            facts = facts.with(
-                    "published_over_chain", "published N / chain N",
-                    CertainDigits.withError(ratio.get(), Math.abs(relative)));
-        }
-        return facts;
+        Optional<Value> ratio = ratio(check);
+        return ratio.isPresent() ? facts.with("published_over_chain", "published N / chain N", ratio.get()) : facts;
+    }
+
+    /** Measured N over the N of the chain, to the place of the error; empty if the chain has no pole there. */
+    static Optional<Value> ratio(CrossCheck check) {
+        double error = check.measured().normalisationErrors().combined();
+        Ball measured = check.measured().normalisation(check.measured().loops());
+        return check.measuredOverChain()
+                .map(r -> CertainDigits.withError(r, Math.abs(error * r.toDouble() / measured.toDouble())));
     }
 
     private static Value exact(ExactConstant value) {

@@ -4,6 +4,7 @@ import bubblechain.assessment.AssessmentReport;
 import bubblechain.assessment.ChainSumRule;
 import bubblechain.assessment.CrossCheck;
 import bubblechain.assessment.CrossCheckReport;
+import bubblechain.assessment.CrossCheckTable;
 import bubblechain.assessment.KernelList;
 import bubblechain.assessment.KernelReport;
 import bubblechain.assessment.Validation;
@@ -152,6 +153,9 @@ final class Answers {
     }
 
     static Report crosscheck(CrosscheckCommand c) {
+        if (c.all) {
+            return crosscheckAll(c);
+        }
         Kernel kernel = KernelLibrary.load(chosen(c.kernel, c.name, "--kernel"), parameters(c.family));
         String series = c.series != null
                 ? c.series
@@ -160,6 +164,14 @@ final class Answers {
         Report report = CrossCheckReport.of(
                 CrossCheck.of(kernel, SeriesLibrary.find(series), c.nf, optionalRational("--power", c.power)));
         return asked(report, parameterEntries(c.family));
+    }
+
+    private static Report crosscheckAll(CrosscheckCommand c) {
+        if (c.name != null || c.kernel != null || c.series != null || c.power != null || !c.family.parameters.isEmpty()) {
+            throw new DomainException("--all takes every quantity at the leading singularity of its series; leave out NAME,"
+                    + " --kernel, --series, --power and --parameter");
+        }
+        return CrossCheckTable.report(CrossCheck.all(c.nf), c.nf);
     }
 
     private static String chosen(@Nullable String given, @Nullable String name, String option) {

@@ -37,12 +37,20 @@ final class CrosscheckCommand extends ReportCommand {
     @Option(names = "--power", paramLabel = "p", description = "p = 2 u0; default: the leading singularity of the series")
     @Nullable String power;
 
+    @Option(
+            names = "--all",
+            description = "one table over every built-in quantity with both a kernel and a series, each at the leading"
+                    + " singularity of its series")
+    boolean all;
+
     @Mixin
     FamilyOption family = new FamilyOption();
 
     @Override
     List<Example> examples() {
-        return List.of(new Example("crosscheck pole-mass --nf 4", "chain against four-loop QCD for four flavours"));
+        return List.of(
+                new Example("crosscheck pole-mass --nf 4", "chain against four-loop QCD for four flavours"),
+                new Example("crosscheck --all", "one line for every quantity"));
     }
 
     @Override

@@ -18,9 +18,14 @@ public record FlavourRange(int from, int to, String words) {
         }
     }
 
+    /** The flavour number of the range that is nearest to {@code nf}. */
+    public int nearest(int nf) {
+        return Math.max(from, Math.min(to, nf));
+    }
+
     void check(String series, int nf) {
         if (nf < from || nf > to) {
-            throw new DomainException("series '" + series + "' holds for " + from + " to " + to + " flavours (" + words
+            throw new DomainException("series '" + series + "' holds for " + (from == to ? "" : from + " to ") + to + " flavours (" + words
                     + "); got " + nf);
         }
     }

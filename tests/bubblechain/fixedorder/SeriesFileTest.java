@@ -170,7 +170,7 @@ class SeriesFileTest {
     void anUnknownNameIsAnsweredWithTheNearest() {
         assertThatThrownBy(() -> SeriesLibrary.find("pole-mas"))
                 .isInstanceOf(DomainException.class)
-                .hasMessage("there is no series 'pole-mas'; did you mean pole-mass? A path to a series file works too.");
+                .hasMessage("there is no series 'pole-mas'; did you mean pole-mass or pole-mass-heavy-coupling? A path to a series file works too.");
         assertThatThrownBy(() -> SeriesLibrary.find("zzzzzz"))
                 .isInstanceOf(DomainException.class)
                 .hasMessageContaining("known are pole-mass");

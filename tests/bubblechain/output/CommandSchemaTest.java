@@ -66,6 +66,10 @@ class CommandSchemaTest {
             residue adler --chain --loops 4
             crosscheck pole-mass --nf 4
             crosscheck pole-mass --power 2
+            crosscheck --all
+            crosscheck cusp
+            crosscheck chromomag --nf 4
+            residue static-potential-r
             crosscheck --kernel static-potential-r --series pole-mass
             assess pole-mass
             assess adler --loops 3 --range 1
@@ -84,7 +88,7 @@ class CommandSchemaTest {
         return List.of(
                 "kernels", "kernels pole-mass", "coefficients pole-mass --loops 3 --exact --nf-terms",
                 "poles pole-mass --from -4 --to 6", "poles cusp", "residue pole-mass --power 3",
-                "crosscheck pole-mass --nf 4", "assess pole-mass", "validate pole-mass");
+                "crosscheck pole-mass --nf 4", "crosscheck --all", "assess pole-mass", "validate pole-mass");
     }
 
     @ParameterizedTest
