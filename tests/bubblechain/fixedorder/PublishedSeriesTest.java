@@ -193,6 +193,10 @@ class PublishedSeriesTest {
             ExactConstant rest = series("scalar-im-hbb").value(2, nf).subtract(
                     ExactConstant.PI.power(2).multiply(constant("-19/12 + nf/18", nf)));
             assertThat(rest).isEqualTo(constant("10801/144 - 39/2*zeta(3) + nf*(-65/24 + 2/3*zeta(3))", nf));
+            ExactConstant third = series("scalar-im-hbb").value(3, nf).subtract(
+                    ExactConstant.PI.power(2).multiply(ExactConstant.of(second.divide(-6))));
+            assertThat(third).isEqualTo(constant("6163613/5184 - 109735/216*zeta(3) + 815/12*zeta(5)"
+                    + " + nf*(-46147/486 + 262/9*zeta(3) - 5/6*zeta(4) - 25/9*zeta(5)) + nf^2*(15511/11664 - zeta(3)/3)", nf));
         }
     }
 

@@ -173,7 +173,7 @@ class SeriesFileTest {
                 .hasMessage("there is no series 'pole-mas'; did you mean pole-mass or pole-mass-heavy-coupling? A path to a series file works too.");
         assertThatThrownBy(() -> SeriesLibrary.find("zzzzzz"))
                 .isInstanceOf(DomainException.class)
-                .hasMessageContaining("known are pole-mass");
+                .hasMessageContaining("known are adler, bjorken-gls, chromomag,");
         assertThatThrownBy(() -> SeriesLibrary.find("nul\0byte"))
                 .isInstanceOf(DomainException.class)
                 .hasMessage("'nul?byte' is neither a series nor a path");
