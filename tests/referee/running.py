@@ -10,6 +10,7 @@ composing with the constants at mu = mbar(mbar); pole masses by inserting M/mbar
 import functools
 import sys
 from mpmath import mp, mpf
+from sum_rule import beta_function
 
 DIGITS = 30
 mp.dps = 45
@@ -18,22 +19,6 @@ MAX_POWER = 5  # of a in alpha^(nl)
 
 def f(a, b):
     return mpf(a) / b
-
-
-def beta_function(nf):
-    """beta_0 .. beta_4, alpha_s/4pi."""
-    z3, z4, z5, n = mp.zeta(3), mp.zeta(4), mp.zeta(5), mpf(nf)
-    return [
-        11 - f(2, 3) * n,
-        102 - f(38, 3) * n,
-        f(2857, 2) - f(5033, 18) * n + f(325, 54) * n ** 2,
-        f(149753, 6) + 3564 * z3 - (f(1078361, 162) + f(6508, 27) * z3) * n
-        + (f(50065, 162) + f(6472, 81) * z3) * n ** 2 + f(1093, 729) * n ** 3,
-        f(8157455, 16) + f(621885, 2) * z3 - f(88209, 2) * z4 - 288090 * z5
-        + n * (-f(336460813, 1944) - f(4811164, 81) * z3 + f(33935, 6) * z4 + f(1358995, 27) * z5)
-        + n ** 2 * (f(25960913, 1944) + f(698531, 81) * z3 - f(10526, 9) * z4 - f(381760, 81) * z5)
-        + n ** 3 * (-f(630559, 5832) - f(48722, 243) * z3 + f(1618, 27) * z4 + f(460, 9) * z5)
-        + n ** 4 * (f(1205, 2916) - f(152, 81) * z3)]
 
 
 def gamma_function(nf):
