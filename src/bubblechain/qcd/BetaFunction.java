@@ -4,11 +4,8 @@ import bubblechain.exact.Ball;
 import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
 import bubblechain.exact.Rational;
-import bubblechain.formula.ConstantValue;
 import bubblechain.formula.Formula;
-import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 
 /**
  * The MS-bar beta function of QCD with SU(3) and {@code nf} massless flavours,
@@ -46,12 +43,10 @@ public final class BetaFunction {
             List.of("vanRitbergen:1997va"),
             List.of("Baikov:2016tgj", "Herzog:2017ohr"));
 
-    private final int nf;
-    private final List<ExactConstant> coefficients;
+    private final LoopCoefficients coefficients;
 
-    private BetaFunction(int nf, List<ExactConstant> coefficients) {
-        this.nf = nf;
-        this.coefficients = List.copyOf(coefficients);
+    private BetaFunction(LoopCoefficients coefficients) {
+        this.coefficients = coefficients;
     }
 
     /** All {@value #LARGEST_LOOPS} known loops. @throws DomainException if nf is not between 0 and 16 */
@@ -65,19 +60,7 @@ public final class BetaFunction {
      * @throws DomainException if nf is not between 0 and 16, or loops not between 1 and 5
      */
     public static BetaFunction of(int nf, int loops) {
-        if (nf < 0 || nf > LARGEST_NF) {
-            throw new DomainException("the number of flavours must lie between 0 and " + LARGEST_NF
-                    + ", where beta0 is positive; got " + nf);
-        }
-        if (loops < 1 || loops > LARGEST_LOOPS) {
-            throw new DomainException("the beta function is known to " + LARGEST_LOOPS
-                    + " loops; ask for 1 to " + LARGEST_LOOPS + ", got " + loops);
-        }
-        List<ExactConstant> values = new ArrayList<>();
-        for (int k = 0; k < loops; k++) {
-            values.add(ConstantValue.of(FORMULAS.get(k), Map.of("nf", ExactConstant.of(nf))));
-        }
-        return new BetaFunction(nf, values);
+        return new BetaFunction(LoopCoefficients.of("beta function", FORMULAS, nf, loops));
     }
 
     /** The same flavours with fewer loops. @throws DomainException if there are fewer than that */
@@ -85,21 +68,21 @@ public final class BetaFunction {
         if (loops < 1 || loops > loops()) {
             throw new DomainException("this beta function has " + loops() + " loops; cannot cut it to " + loops);
         }
-        return new BetaFunction(nf, coefficients.subList(0, loops));
+        return new BetaFunction(new LoopCoefficients(nf(), coefficients.values().subList(0, loops)));
     }
 
     public int nf() {
-        return nf;
+        return coefficients.nf();
     }
 
     /** Number of loops kept. */
     public int loops() {
-        return coefficients.size();
+        return coefficients.loops();
     }
 
     /** beta_k, zero beyond the loops kept. @param k at least 0 */
     public ExactConstant beta(int k) {
-        return k < coefficients.size() ? coefficients.get(k) : ExactConstant.ZERO;
+        return coefficients.get(k);
     }
 
     /** beta_k as a ball. */
@@ -124,7 +107,7 @@ public final class BetaFunction {
 
     /** The coefficients kept, beta_0 first. */
     public List<ExactConstant> coefficients() {
-        return coefficients;
+        return coefficients.values();
     }
 
     /** Bibliography keys of beta_k. @param k 0 to 4 */
@@ -139,17 +122,17 @@ public final class BetaFunction {
 
     @Override
     public boolean equals(Object other) {
-        return other instanceof BetaFunction b && nf == b.nf && coefficients.equals(b.coefficients);
+        return other instanceof BetaFunction b && coefficients.equals(b.coefficients);
     }
 
     @Override
     public int hashCode() {
-        return 31 * nf + coefficients.hashCode();
+        return coefficients.hashCode();
     }
 
     /** "5-loop running with 3 flavours". */
     @Override
     public String toString() {
-        return loops() + "-loop running with " + nf + (nf == 1 ? " flavour" : " flavours");
+        return coefficients.inWords("running");
     }
 }

@@ -1,13 +1,9 @@
 package bubblechain.qcd;
 
 import bubblechain.exact.Ball;
-import bubblechain.exact.DomainException;
 import bubblechain.exact.ExactConstant;
-import bubblechain.formula.ConstantValue;
 import bubblechain.formula.Formula;
-import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 
 /**
  * The anomalous dimension of the MS-bar quark mass in QCD with SU(3) and {@code nf} flavours,
@@ -48,15 +44,13 @@ public final class MassAnomalousDimension {
             List.of("Chetyrkin:1997dh", "Vermaseren:1997fq"),
             List.of("Baikov:2014qja"));
 
-    private final int nf;
-    private final List<ExactConstant> coefficients;
+    private final LoopCoefficients coefficients;
 
-    private MassAnomalousDimension(int nf, List<ExactConstant> coefficients) {
-        this.nf = nf;
-        this.coefficients = List.copyOf(coefficients);
+    private MassAnomalousDimension(LoopCoefficients coefficients) {
+        this.coefficients = coefficients;
     }
 
-    /** All {@value #LARGEST_LOOPS} known loops. @throws DomainException if nf is not between 0 and 16 */
+    /** All {@value #LARGEST_LOOPS} known loops. @throws bubblechain.exact.DomainException if nf is not between 0 and 16 */
     public static MassAnomalousDimension of(int nf) {
         return of(nf, LARGEST_LOOPS);
     }
@@ -64,36 +58,24 @@ public final class MassAnomalousDimension {
     /**
      * The first {@code loops} coefficients.
      *
-     * @throws DomainException if nf is not between 0 and 16, or loops not between 1 and 5
+     * @throws bubblechain.exact.DomainException if nf is not between 0 and 16, or loops not between 1 and 5
      */
     public static MassAnomalousDimension of(int nf, int loops) {
-        if (nf < 0 || nf > BetaFunction.LARGEST_NF) {
-            throw new DomainException("the number of flavours must lie between 0 and " + BetaFunction.LARGEST_NF
-                    + ", where beta0 is positive; got " + nf);
-        }
-        if (loops < 1 || loops > LARGEST_LOOPS) {
-            throw new DomainException("the mass anomalous dimension is known to " + LARGEST_LOOPS
-                    + " loops; ask for 1 to " + LARGEST_LOOPS + ", got " + loops);
-        }
-        List<ExactConstant> values = new ArrayList<>();
-        for (int k = 0; k < loops; k++) {
-            values.add(ConstantValue.of(FORMULAS.get(k), Map.of("nf", ExactConstant.of(nf))));
-        }
-        return new MassAnomalousDimension(nf, values);
+        return new MassAnomalousDimension(LoopCoefficients.of("mass anomalous dimension", FORMULAS, nf, loops));
     }
 
     public int nf() {
-        return nf;
+        return coefficients.nf();
     }
 
     /** Number of loops kept. */
     public int loops() {
-        return coefficients.size();
+        return coefficients.loops();
     }
 
     /** gamma_k, zero beyond the loops kept. @param k at least 0 */
     public ExactConstant gamma(int k) {
-        return k < coefficients.size() ? coefficients.get(k) : ExactConstant.ZERO;
+        return coefficients.get(k);
     }
 
     /** gamma_k as a ball. */
@@ -103,7 +85,7 @@ public final class MassAnomalousDimension {
 
     /** The coefficients kept, gamma_0 first. */
     public List<ExactConstant> coefficients() {
-        return coefficients;
+        return coefficients.values();
     }
 
     /** Bibliography keys of gamma_k. @param k 0 to 4 */
@@ -118,17 +100,17 @@ public final class MassAnomalousDimension {
 
     @Override
     public boolean equals(Object other) {
-        return other instanceof MassAnomalousDimension g && nf == g.nf && coefficients.equals(g.coefficients);
+        return other instanceof MassAnomalousDimension g && coefficients.equals(g.coefficients);
     }
 
     @Override
     public int hashCode() {
-        return 31 * nf + coefficients.hashCode();
+        return coefficients.hashCode();
     }
 
     /** "5-loop mass anomalous dimension with 3 flavours". */
     @Override
     public String toString() {
-        return loops() + "-loop mass anomalous dimension with " + nf + (nf == 1 ? " flavour" : " flavours");
+        return coefficients.inWords("mass anomalous dimension");
     }
 }
