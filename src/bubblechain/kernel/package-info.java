@@ -8,6 +8,9 @@
  * B(u) = T(u) - Gtilde(u)/u at mu equal to the scale, Gtilde(u) = sum g_n u^n/n!, g(a) = gamma(a)/2 where
  * d ln O/d ln mu = prefactor x a gamma(a).
  *
+ * <p>A quantity with double logarithms has a {@link bubblechain.kernel.SudakovSubtraction} in place of gamma(a); a
+ * {@linkplain bubblechain.kernel.Combination combination} is the weighted sum of other kernels, joined as one formula.
+ *
  * <p>{@link bubblechain.kernel.KernelFile} reads the TOML; {@link bubblechain.kernel.KernelLibrary} finds built-in names
  * and files of the user.
  */
